@@ -1,0 +1,166 @@
+package tepor.mesher.mesh;
+
+/**
+ * A conforming triangle mesh of a section, written for reading by index. Immutable.
+ *
+ * <p>Nodes are numbered from 0; the first {@link #cornerCount()} nodes are corners of triangles, the rest (six-node
+ * triangles only) lie in the middle of sides. A triangle's nodes are its three corners, counter-clockwise, then the nodes
+ * in the middle of its sides 0, 1 and 2; side i lies <em>opposite</em> corner i, and runs from corner (i+1)%3 to corner
+ * (i+2)%3. Where two parts of the section touch in a single point only, each has a node of its own there.
+ *
+ * <p>A <em>facet</em> is a triangle side that lies on a segment of the section: on the boundary, or between regions. A
+ * facet runs in the direction of its segment; the triangle on its left has it as a side in that same direction.
+ */
+public final class Mesh {
+    /** No triangle, no neighbour. */
+    public static final int NONE = -1;
+
+    private final int nodesPerTriangle;
+    private final int cornerCount;
+    private final double[] xy;
+    private final int[] node;
+    private final int[] neighbour;
+    private final int[] region;
+    private final int[] facetSegment;
+    private final int[] facetLeft;
+    private final int[] facetRight;
+
+    /**
+     * @param nodesPerTriangle 3 or 6
+     * @param cornerCount number of nodes that are corners; these come first
+     * @param xy 2·nodeCount coordinates, metres
+     * @param node nodesPerTriangle·triangleCount nodes, in the order told above
+     * @param neighbour 3·triangleCount triangles: the one across side i, or {@link #NONE}
+     * @param region triangleCount region numbers of the section
+     * @param facetSegment facetCount segment numbers of the section
+     * @param facetLeft facetCount entries 3·triangle + side of the triangle on the left, or {@link #NONE}
+     * @param facetRight facetCount entries 3·triangle + side of the triangle on the right, or {@link #NONE}
+     */
+    public Mesh(
+            int nodesPerTriangle,
+            int cornerCount,
+            double[] xy,
+            int[] node,
+            int[] neighbour,
+            int[] region,
+            int[] facetSegment,
+            int[] facetLeft,
+            int[] facetRight) {
+        this.nodesPerTriangle = nodesPerTriangle;
+        this.cornerCount = cornerCount;
+        this.xy = xy.clone();
+        this.node = node.clone();
+        this.neighbour = neighbour.clone();
+        this.region = region.clone();
+        this.facetSegment = facetSegment.clone();
+        this.facetLeft = facetLeft.clone();
+        this.facetRight = facetRight.clone();
+    }
+
+    /** 3 or 6. */
+    public int nodesPerTriangle() {
+        return nodesPerTriangle;
+    }
+
+    public int nodeCount() {
+        return xy.length / 2;
+    }
+
+    /** Nodes below this number are corners, the others lie in the middle of sides. */
+    public int cornerCount() {
+        return cornerCount;
+    }
+
+    /** Metres. */
+    public double x(int iNode) {
+        return xy[2 * iNode];
+    }
+
+    /** Metres. */
+    public double y(int iNode) {
+        return xy[2 * iNode + 1];
+    }
+
+    public int triangleCount() {
+        return region.length;
+    }
+
+    /** Node i of a triangle, i below {@link #nodesPerTriangle()}. */
+    public int node(int triangle, int i) {
+        return node[nodesPerTriangle * triangle + i];
+    }
+
+    /** Triangle across side i, or {@link #NONE}. */
+    public int neighbour(int triangle, int i) {
+        return neighbour[3 * triangle + i];
+    }
+
+    /** Number of the region of the section in which the triangle lies. */
+    public int region(int triangle) {
+        return region[triangle];
+    }
+
+    public int facetCount() {
+        return facetSegment.length;
+    }
+
+    /** Segment of the section on which the facet lies. */
+    public int facetSegment(int facet) {
+        return facetSegment[facet];
+    }
+
+    /** Triangle on the left of the facet, or {@link #NONE}. */
+    public int facetLeftTriangle(int facet) {
+        return facetLeft[facet] < 0 ? NONE : facetLeft[facet] / 3;
+    }
+
+    /** Which side of the triangle on its left the facet is. */
+    public int facetLeftSide(int facet) {
+        return facetLeft[facet] % 3;
+    }
+
+    /** Triangle on the right of the facet, or {@link #NONE}. */
+    public int facetRightTriangle(int facet) {
+        return facetRight[facet] < 0 ? NONE : facetRight[facet] / 3;
+    }
+
+    /** Which side of the triangle on its right the facet is. */
+    public int facetRightSide(int facet) {
+        return facetRight[facet] % 3;
+    }
+
+    /** Whether the facet lies on the boundary: it has a triangle on one side only. */
+    public boolean isBoundaryFacet(int facet) {
+        return facetLeft[facet] < 0 || facetRight[facet] < 0;
+    }
+
+    /**
+     * Node i of a facet in the facet's direction: 0 its start, 1 its end, 2 its middle (six-node triangles only). Both
+     * triangles of an interface share these nodes.
+     */
+    public int facetNode(int facet, int i) {
+        boolean fromLeft = facetLeft[facet] >= 0;
+        int code = fromLeft ? facetLeft[facet] : facetRight[facet];
+        int triangle = code / 3;
+        int side = code % 3;
+        if (i == 2) {
+            return node(triangle, 3 + side);
+        }
+        return node(triangle, (side + (fromLeft == (i == 0) ? 1 : 2)) % 3);
+    }
+
+    /** Metres. */
+    public double facetLength(int facet) {
+        int a = facetNode(facet, 0);
+        int b = facetNode(facet, 1);
+        return Math.hypot(x(b) - x(a), y(b) - y(a));
+    }
+
+    /** Area of a triangle, m². */
+    public double area(int triangle) {
+        int a = node(triangle, 0);
+        int b = node(triangle, 1);
+        int c = node(triangle, 2);
+        return 0.5 * ((x(b) - x(a)) * (y(c) - y(a)) - (x(c) - x(a)) * (y(b) - y(a)));
+    }
+}

@@ -1,0 +1,29 @@
+package tepor.mesher.outline;
+
+import java.util.Locale;
+
+/**
+ * The unit in which a drawing gives its coordinates. Inside, every length is in metres.
+ *
+ * @param symbol the unit as the user wrote it, such as {@code mm}
+ * @param metres metres per unit
+ */
+public record DrawingUnit(String symbol, double metres) {
+    /** A point given in metres, as text in this unit, for messages. */
+    public String point(double x, double y) {
+        return "(" + number(x) + " " + number(y) + ") " + symbol;
+    }
+
+    /** A length given in metres, as text in this unit, for messages. */
+    public String length(double length) {
+        return number(length) + " " + symbol;
+    }
+
+    private String number(double inMetres) {
+        String text = String.format(Locale.ROOT, "%.6g", inMetres / metres);
+        if (text.contains("e")) {
+            return text;
+        }
+        return text.contains(".") ? text.replaceAll("0+$", "").replaceAll("\\.$", "") : text;
+    }
+}

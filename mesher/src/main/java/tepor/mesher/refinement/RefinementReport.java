@@ -1,0 +1,37 @@
+package tepor.mesher.refinement;
+
+import java.util.List;
+
+/**
+ * Where refinement stopped short of what was asked, counted by reason.
+ *
+ * @param stops one entry for each place
+ */
+public record RefinementReport(List<Stop> stops) {
+    public RefinementReport {
+        stops = List.copyOf(stops);
+    }
+
+    /**
+     * One triangle that stayed worse than asked.
+     *
+     * @param reason why
+     * @param x a point in the triangle, metres
+     * @param y a point in the triangle, metres
+     */
+    public record Stop(Reason reason, double x, double y) {}
+
+    /** Why refinement stopped short. */
+    public enum Reason {
+        /** The outline itself has the small angle. */
+        IMPOSED_BY_OUTLINE,
+        /** A smaller triangle would fall below the smallest length that numbers of this extent can hold. */
+        SIZE_FLOOR,
+        /** The greatest number of triangles was reached. */
+        ELEMENT_LIMIT
+    }
+
+    public long count(Reason reason) {
+        return stops.stream().filter(s -> s.reason() == reason).count();
+    }
+}

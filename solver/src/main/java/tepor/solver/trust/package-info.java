@@ -1,0 +1,7 @@
+/**
+ * How far an answer may be trusted: size fields from what the section shows and from the last solution, and the adaptive
+ * loop.
+ *
+ * <p>May not know the single kinds of asks.
+ */
+package tepor.solver.trust;
