@@ -28,9 +28,7 @@ public final class QuantityReader {
         UnitExpression unit = UnitExpression.of(unitText);
         Dimension dimension = dimension(plain, parts.number(), unit, allowed);
         double value = inRange(
-                unit.toSi(dimension).convert(parts.number().value()),
-                parts.number().value(),
-                plain);
+                unit.toSi(parts.number().value(), dimension), parts.number().value(), plain);
         if (dimension == Dimension.TEMPERATURE && value < 0) {
             throw new QuantityException(
                     "'" + plain + "' lies below absolute zero",
@@ -105,8 +103,8 @@ public final class QuantityReader {
                     "'" + plain + "' has no unit",
                     "give " + wanted(allowed) + ": " + number.digits() + " " + allowed[0].unit() + "?");
         }
-        if (unit.scale() != null && Arrays.asList(allowed).contains(Dimension.TEMPERATURE_DIFFERENCE)) {
-            double kelvin = unit.toSi(Dimension.TEMPERATURE_DIFFERENCE).convert(number.value());
+        if (unit.isScale() && Arrays.asList(allowed).contains(Dimension.TEMPERATURE_DIFFERENCE)) {
+            double kelvin = unit.toSi(number.value(), Dimension.TEMPERATURE_DIFFERENCE);
             throw new QuantityException(
                     "'" + plain + "' is a temperature on a scale, where a temperature difference is wanted",
                     "give it in K: " + Units.number(kelvin) + " K");
@@ -190,7 +188,7 @@ public final class QuantityReader {
             throws QuantityException {
         double stated = parts.spread().value();
         if (parts.percent()) {
-            if (dimension == Dimension.TEMPERATURE && unit.scale() != null) {
+            if (dimension == Dimension.TEMPERATURE && unit.isScale()) {
                 throw new QuantityException(
                         "'" + plain + "' has a spread in percent of " + unit.text() + ", which has an arbitrary zero",
                         "state it in degrees, such as " + parts.number().digits() + " ± 2 " + unit.text());
@@ -210,6 +208,6 @@ public final class QuantityReader {
                             + dimension.words(),
                     "state it in percent or in " + unit.text());
         }
-        return own.toSi(difference).convert(stated);
+        return own.toSi(stated, difference);
     }
 }

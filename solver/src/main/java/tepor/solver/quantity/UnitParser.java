@@ -37,7 +37,7 @@ final class UnitParser {
     UnitExpression parse() throws QuantityException {
         skipSpaces();
         if (at == text.length()) {
-            return new UnitExpression("", AbstractUnit.ONE, null, false);
+            return new UnitExpression("", AbstractUnit.ONE, 0, false);
         }
         Part whole = product(false, 0);
         if (at < text.length()) {
@@ -46,8 +46,7 @@ final class UnitParser {
                     "end the unit before it, or write a product with a point and a quotient with a slash: W/(m2.K)");
         }
         boolean alone = factors == 1 && single != null;
-        return new UnitExpression(
-                whole.spelling(), whole.unit(), alone ? single.scale() : null, alone && single.angle());
+        return new UnitExpression(whole.spelling(), whole.unit(), alone ? single.zero() : 0, alone && single.angle());
     }
 
     private Part product(boolean below, int depth) throws QuantityException {

@@ -5,6 +5,8 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.concurrent.ConcurrentHashMap;
+import java.util.stream.Stream;
 import javax.measure.Unit;
 import tech.units.indriya.AbstractUnit;
 
@@ -17,19 +19,23 @@ import tech.units.indriya.AbstractUnit;
  *
  * @param name its one spelling, such as {@code mm} or {@code degC}
  * @param unit as a factor of a product: a degree is a difference here
- * @param scale as a temperature on a scale, for degC and degF; null for all others
+ * @param zero how many of it lie between absolute zero and the zero of its scale, for degC and degF; 0 for all others
  * @param angle whether it is an angle, which JSR 385 takes for a pure number
  */
-record UnitSymbol(String name, Unit<?> unit, Unit<?> scale, boolean angle) {
-    private static final Map<String, UnitSymbol> KNOWN = new HashMap<>();
-    private static final Map<String, Integer> PREFIXES = new HashMap<>();
+record UnitSymbol(String name, Unit<?> unit, double zero, boolean angle) {
+    private static final Map<String, Integer> PREFIXES =
+            Map.of("G", 9, "M", 6, "k", 3, "h", 2, "da", 1, "d", -1, "c", -2, "m", -3, "u", -6, "n", -9);
+
+    /** Those that stand for themselves, and those that take prefixes, as they are asked for. */
+    private static final Map<String, UnitSymbol> KNOWN = new ConcurrentHashMap<>();
+
+    private static final Map<String, Unit<?>> WITH_PREFIXES = new HashMap<>();
     private static final Map<String, String> OTHER_SPELLINGS =
             Map.of("°C", "degC", "°F", "degF", "°", "deg", "Ω", "ohm");
     private static final Map<String, String> SLIPS = Map.ofEntries(
             Map.entry("c", "degC"),
             Map.entry("celsius", "degC"),
             Map.entry("centigrade", "degC"),
-            Map.entry("deg c", "degC"),
             Map.entry("f", "degF"),
             Map.entry("fahrenheit", "degF"),
             Map.entry("degk", "K"),
@@ -64,17 +70,6 @@ record UnitSymbol(String name, Unit<?> unit, Unit<?> scale, boolean angle) {
         Unit<?> radian = tech.units.indriya.unit.Units.RADIAN;
         Unit<?> joule = tech.units.indriya.unit.Units.JOULE;
 
-        prefix("G", 9);
-        prefix("M", 6);
-        prefix("k", 3);
-        prefix("h", 2);
-        prefix("da", 1);
-        prefix("d", -1);
-        prefix("c", -2);
-        prefix("m", -3);
-        prefix("u", -6);
-        prefix("n", -9);
-
         withPrefixes("m", metre);
         withPrefixes("g", kilogram.divide(1000));
         withPrefixes("s", second);
@@ -96,28 +91,21 @@ record UnitSymbol(String name, Unit<?> unit, Unit<?> scale, boolean angle) {
         plain("lb", kilogram.multiply(0.45359237));
         plain("Btu", joule.multiply(1055.05585262));
         Unit<?> fahrenheit = kelvin.multiply(5).divide(9);
-        KNOWN.put("degC", new UnitSymbol("degC", kelvin, kelvin.shift(273.15), false));
-        KNOWN.put("degF", new UnitSymbol("degF", fahrenheit, fahrenheit.shift(459.67), false));
-        KNOWN.put("rad", new UnitSymbol("rad", radian, null, true));
-        KNOWN.put("mrad", new UnitSymbol("mrad", radian.divide(1000), null, true));
-        KNOWN.put("deg", new UnitSymbol("deg", radian.multiply(Math.PI).divide(180), null, true));
-        KNOWN.put("%", new UnitSymbol("%", AbstractUnit.ONE.divide(100), null, false));
-    }
-
-    private static void prefix(String name, int power) {
-        PREFIXES.put(name, power);
+        KNOWN.put("degC", new UnitSymbol("degC", kelvin, 273.15, false));
+        KNOWN.put("degF", new UnitSymbol("degF", fahrenheit, 459.67, false));
+        KNOWN.put("rad", new UnitSymbol("rad", radian, 0, true));
+        KNOWN.put("mrad", new UnitSymbol("mrad", radian.divide(1000), 0, true));
+        KNOWN.put("deg", new UnitSymbol("deg", radian.multiply(Math.PI).divide(180), 0, true));
+        KNOWN.put("%", new UnitSymbol("%", AbstractUnit.ONE.divide(100), 0, false));
     }
 
     private static void plain(String name, Unit<?> unit) {
-        KNOWN.put(name, new UnitSymbol(name, unit, null, false));
+        KNOWN.put(name, new UnitSymbol(name, unit, 0, false));
     }
 
     private static void withPrefixes(String name, Unit<?> unit) {
         plain(name, unit);
-        PREFIXES.forEach((prefix, power) -> {
-            int factor = (int) Math.pow(10, Math.abs(power));
-            plain(prefix + name, power > 0 ? unit.multiply(factor) : unit.divide(factor));
-        });
+        WITH_PREFIXES.put(name, unit);
     }
 
     /** The symbol of this spelling; null where it is not known. */
@@ -126,7 +114,21 @@ record UnitSymbol(String name, Unit<?> unit, Unit<?> scale, boolean angle) {
         if (name.length() > 1 && (name.charAt(0) == 'µ' || name.charAt(0) == 'μ')) {
             name = "u" + name.substring(1);
         }
-        return KNOWN.get(name);
+        UnitSymbol known = KNOWN.get(name);
+        return known != null || name.length() < 2 ? known : withPrefix(name);
+    }
+
+    private static UnitSymbol withPrefix(String name) {
+        for (int length = 1; length <= 2 && length < name.length(); length++) {
+            Integer power = PREFIXES.get(name.substring(0, length));
+            Unit<?> unit = WITH_PREFIXES.get(name.substring(length));
+            if (power != null && unit != null) {
+                int factor = (int) Math.pow(10, Math.abs(power));
+                plain(name, power > 0 ? unit.multiply(factor) : unit.divide(factor));
+                return KNOWN.get(name);
+            }
+        }
+        return null;
     }
 
     /** What may have been meant by an unknown spelling, as text that would be read; null where nothing comes near. */
@@ -155,7 +157,10 @@ record UnitSymbol(String name, Unit<?> unit, Unit<?> scale, boolean angle) {
     }
 
     private static List<String> shortestFirst() {
-        return KNOWN.keySet().stream()
+        Stream<String> prefixed = PREFIXES.keySet().stream()
+                .flatMap(prefix -> WITH_PREFIXES.keySet().stream().map(name -> prefix + name));
+        return Stream.concat(KNOWN.keySet().stream(), prefixed)
+                .distinct()
                 .sorted(Comparator.comparingInt(String::length).thenComparing(Comparator.naturalOrder()))
                 .toList();
     }

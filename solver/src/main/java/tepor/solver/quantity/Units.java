@@ -22,7 +22,7 @@ public final class Units {
         if (!Double.isFinite(si)) {
             return si;
         }
-        return expression(unit).fromSi(dimension).convert(si);
+        return expression(unit).fromSi(si, dimension);
     }
 
     /**
@@ -34,7 +34,7 @@ public final class Units {
         if (!Double.isFinite(value)) {
             return value;
         }
-        return expression(unit).toSi(dimension).convert(value);
+        return expression(unit).toSi(value, dimension);
     }
 
     /** The unit in which answers and messages give a dimension when nobody asked for another. */
