@@ -1,0 +1,182 @@
+package tepor.viewer.picture;
+
+import java.awt.Font;
+import java.awt.Graphics2D;
+import java.awt.geom.Path2D;
+import java.util.ArrayList;
+import java.util.List;
+import tepor.mesher.mesh.Mesh;
+import tepor.solver.field.TemperatureField;
+import tepor.solver.model.Case;
+import tepor.solver.model.Conductivity;
+import tepor.solver.model.Values;
+import tepor.viewer.picture.drawing.Ink;
+
+/**
+ * Arrows along the heat flux q = −k ∇T, one for each point of an even pattern. Their length goes with the square root of
+ * the flux, so that good and poor conductors can be read in one picture; the key shows two of them with their values.
+ */
+final class FluxArrows {
+    private record Arrow(double x, double y, double qx, double qy) {}
+
+    private final List<Arrow> arrows = new ArrayList<>();
+    private final double spacing;
+    private final double greatest;
+
+    /** @param spacing of the arrows, px */
+    FluxArrows(TemperatureField field, Case subject, SectionView view, double spacing) {
+        this.spacing = spacing;
+        Mesh mesh = field.mesh();
+        double[] k = conductivities(subject);
+        double[] q = new double[2];
+        for (int t = 0; t < mesh.triangleCount(); t++) {
+            double[] x = new double[3];
+            double[] y = new double[3];
+            for (int i = 0; i < 3; i++) {
+                x[i] = view.x(mesh.x(mesh.node(t, i)));
+                y[i] = view.y(mesh.y(mesh.node(t, i)));
+            }
+            double rowHeight = spacing * Math.sqrt(0.75);
+            int lastRow = (int) Math.floor(max(y) / rowHeight);
+            for (int row = (int) Math.ceil(min(y) / rowHeight); row <= lastRow; row++) {
+                double shift = Math.floorMod(row, 2) * 0.5;
+                int last = (int) Math.floor(max(x) / spacing - shift);
+                for (int column = (int) Math.ceil(min(x) / spacing - shift); column <= last; column++) {
+                    double px = (column + shift) * spacing;
+                    double py = row * rowHeight;
+                    if (flux(field, t, k, mesh.region(t), x, y, px, py, q)) {
+                        arrows.add(new Arrow(px, py, q[0], q[1]));
+                    }
+                }
+            }
+        }
+        greatest = arrows.stream()
+                .mapToDouble(a -> Math.hypot(a.qx(), a.qy()))
+                .max()
+                .orElse(0);
+    }
+
+    private static double min(double[] v) {
+        return Math.min(v[0], Math.min(v[1], v[2]));
+    }
+
+    private static double max(double[] v) {
+        return Math.max(v[0], Math.max(v[1], v[2]));
+    }
+
+    /** kxx, kxy and kyy of each region, W/(m·K). */
+    private static double[] conductivities(Case subject) {
+        Values values = subject.inputs().nominal();
+        double[] k = new double[3 * subject.regions().size()];
+        for (int r = 0; r < subject.regions().size(); r++) {
+            if (subject.regions().get(r).isHole()) {
+                continue;
+            }
+            Conductivity c = subject.regions().get(r).material().conductivity();
+            if (c instanceof Conductivity.Uniform uniform) {
+                k[3 * r] = k[3 * r + 2] = values.of(uniform.k());
+            } else if (c instanceof Conductivity.Directional directional) {
+                double cos = Math.cos(values.of(directional.angle()));
+                double sin = Math.sin(values.of(directional.angle()));
+                double along = values.of(directional.along());
+                double across = values.of(directional.across());
+                k[3 * r] = along * cos * cos + across * sin * sin;
+                k[3 * r + 1] = (along - across) * cos * sin;
+                k[3 * r + 2] = along * sin * sin + across * cos * cos;
+            }
+        }
+        return k;
+    }
+
+    /** Puts the flux at a point (pixels) of a triangle into q (W/m², y upwards); false if the point is not in it. */
+    private static boolean flux(
+            TemperatureField field,
+            int t,
+            double[] k,
+            int region,
+            double[] x,
+            double[] y,
+            double px,
+            double py,
+            double[] q) {
+        double twice = (x[1] - x[0]) * (y[2] - y[0]) - (x[2] - x[0]) * (y[1] - y[0]);
+        double l1 = ((px - x[0]) * (y[2] - y[0]) - (x[2] - x[0]) * (py - y[0])) / twice;
+        double l2 = ((x[1] - x[0]) * (py - y[0]) - (px - x[0]) * (y[1] - y[0])) / twice;
+        if (!(l1 >= 0 && l2 >= 0 && l1 + l2 < 1)) {
+            return false;
+        }
+        Mesh mesh = field.mesh();
+        double[] v = new double[6];
+        for (int i = 0; i < mesh.nodesPerTriangle(); i++) {
+            v[i] = field.at(mesh.node(t, i));
+        }
+        for (int i = mesh.nodesPerTriangle(); i < 6; i++) {
+            v[i] = 0.5 * (v[(i - 2) % 3] + v[(i - 1) % 3]);
+        }
+        double l0 = 1 - l1 - l2;
+        double d0 = (4 * l0 - 1) * v[0] + 4 * (l2 * v[4] + l1 * v[5]);
+        double d1 = (4 * l1 - 1) * v[1] + 4 * (l2 * v[3] + l0 * v[5]);
+        double d2 = (4 * l2 - 1) * v[2] + 4 * (l1 * v[3] + l0 * v[4]);
+        int a = mesh.node(t, 0);
+        int b = mesh.node(t, 1);
+        int c = mesh.node(t, 2);
+        double area2 = 2 * mesh.area(t);
+        double gx =
+                (d0 * (mesh.y(b) - mesh.y(c)) + d1 * (mesh.y(c) - mesh.y(a)) + d2 * (mesh.y(a) - mesh.y(b))) / area2;
+        double gy =
+                (d0 * (mesh.x(c) - mesh.x(b)) + d1 * (mesh.x(a) - mesh.x(c)) + d2 * (mesh.x(b) - mesh.x(a))) / area2;
+        q[0] = -(k[3 * region] * gx + k[3 * region + 1] * gy);
+        q[1] = -(k[3 * region + 1] * gx + k[3 * region + 2] * gy);
+        return true;
+    }
+
+    void paint(Graphics2D g) {
+        Path2D path = new Path2D.Double();
+        for (Arrow a : arrows) {
+            double q = Math.hypot(a.qx(), a.qy());
+            double length = length(q);
+            if (length > 0.08 * spacing) {
+                append(path, a.x(), a.y(), a.qx() / q, -a.qy() / q, length);
+            }
+        }
+        Ink.draw(g, path, Ink.PAPER, 0.085 * spacing);
+        Ink.draw(g, path, Ink.DARK, 0.042 * spacing);
+    }
+
+    private double length(double q) {
+        return greatest == 0 ? 0 : 0.92 * spacing * Math.sqrt(q / greatest);
+    }
+
+    /** An arrow about its middle. */
+    private void append(Path2D path, double x, double y, double ux, double uy, double length) {
+        double tipX = x + 0.5 * length * ux;
+        double tipY = y + 0.5 * length * uy;
+        double head = Math.min(0.24 * spacing, 0.5 * length);
+        path.moveTo(x - 0.5 * length * ux, y - 0.5 * length * uy);
+        path.lineTo(tipX, tipY);
+        path.moveTo(tipX - head * (0.87 * ux - 0.45 * uy), tipY - head * (0.87 * uy + 0.45 * ux));
+        path.lineTo(tipX, tipY);
+        path.lineTo(tipX - head * (0.87 * ux + 0.45 * uy), tipY - head * (0.87 * uy - 0.45 * ux));
+    }
+
+    /** Adds two arrows with their values to the key. */
+    void addTo(KeyRow keys, Font font) {
+        if (greatest == 0) {
+            return;
+        }
+        double round = roundDown(greatest);
+        for (double q : new double[] {round, round / 10}) {
+            keys.add(length(q), FigureText.significant(q, 2) + " W/m²", (g, x, y) -> {
+                Path2D path = new Path2D.Double();
+                append(path, x + 0.5 * length(q), y, 1, 0, length(q));
+                Ink.draw(g, path, Ink.DARK, 0.042 * spacing);
+            });
+        }
+    }
+
+    private static double roundDown(double value) {
+        double power = Math.pow(10, Math.floor(Math.log10(value)));
+        double mantissa = value / power;
+        return (mantissa >= 5 ? 5 : mantissa >= 2 ? 2 : 1) * power;
+    }
+}
