@@ -21,7 +21,9 @@ final class WholeFile {
     /** Writes a file, in place of an older one of that name. */
     static void write(Path file, Contents contents) throws IOException {
         Path target = file.toAbsolutePath();
-        Path part = Files.createTempFile(target.getParent(), "." + target.getFileName(), ".part");
+        // Not a temporary file of the JDK: that could be read by its owner alone, also once it is in place.
+        Path part = target.resolveSibling(
+                "." + target.getFileName() + "." + ProcessHandle.current().pid() + ".part");
         try {
             try (OutputStream out = new BufferedOutputStream(Files.newOutputStream(part), 1 << 16)) {
                 contents.writeTo(out);

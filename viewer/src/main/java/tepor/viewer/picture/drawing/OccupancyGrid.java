@@ -30,6 +30,17 @@ public final class OccupancyGrid {
         state = new int[columns * rows];
     }
 
+    private OccupancyGrid(OccupancyGrid other) {
+        cell = other.cell;
+        columns = other.columns;
+        rows = other.rows;
+        state = other.state.clone();
+    }
+
+    public OccupancyGrid copy() {
+        return new OccupancyGrid(this);
+    }
+
     /** Takes everything outside a shape. */
     public void takeOutside(Shape shape) {
         BufferedImage image = new BufferedImage(columns, rows, BufferedImage.TYPE_BYTE_GRAY);
