@@ -9,6 +9,15 @@ import java.util.Locale;
  * @param metres metres per unit
  */
 public record DrawingUnit(String symbol, double metres) {
+    /**
+     * A number of this unit in metres. Where a metre is a whole number of units, it divides, so that 200 mm are exactly
+     * the double nearest to 0.2 m.
+     */
+    public double toMetres(double value) {
+        double unitsPerMetre = 1 / metres;
+        return unitsPerMetre > 1 && unitsPerMetre == Math.rint(unitsPerMetre) ? value / unitsPerMetre : value * metres;
+    }
+
     /** A point given in metres, as text in this unit, for messages. */
     public String point(double x, double y) {
         return "(" + number(x) + " " + number(y) + ") " + symbol;

@@ -1,14 +1,39 @@
 package tepor.mesher.section;
 
+import java.util.ArrayList;
+import java.util.BitSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Collectors;
 import org.locationtech.jts.geom.Coordinate;
+import org.locationtech.jts.geom.Envelope;
 import tepor.mesher.outline.DrawingUnit;
 import tepor.mesher.outline.Findings;
+import tepor.mesher.outline.Place;
 
-/** Lays regions over each other and makes the section. */
+/**
+ * Lays regions over each other and makes the section.
+ *
+ * <p>All borders are noded together ({@link BorderNoder}), the faces between them found ({@link Faces}), each given to the
+ * last region over it ({@link FaceOwners}), and what separates nothing left out. Vertices keep the coordinates of the
+ * drawing bit for bit, unless another vertex lies within snap: then the first one drawn stands for both.
+ */
 public final class SectionBuilder {
-    private SectionBuilder() {}
+    private static final double DEFAULT_SNAP = 1e-7;
+    /** Snap is never less than this many units in the last place of the largest coordinate. */
+    private static final double LEAST_SNAP_IN_ULPS = 32;
+
+    private final List<RegionShape> shapes;
+    private final double snap;
+    private final DrawingUnit unit;
+    private final Findings findings;
+
+    private SectionBuilder(List<RegionShape> shapes, double snap, DrawingUnit unit, Findings findings) {
+        this.shapes = shapes;
+        this.snap = snap;
+        this.unit = unit;
+        this.findings = findings;
+    }
 
     /**
      * Builds the section.
@@ -22,6 +47,78 @@ public final class SectionBuilder {
      */
     public static Optional<Section> build(
             List<RegionShape> shapes, List<Coordinate> splitPoints, double snap, DrawingUnit unit, Findings findings) {
-        throw new IllegalStateException("not joined yet");
+        if (shapes.stream().allMatch(RegionShape::hole)) {
+            Place place = shapes.isEmpty() ? new Place("", 0, 0) : shapes.get(0).place();
+            String what = shapes.isEmpty() ? "the section has no region" : "all regions are of nothing";
+            findings.error("no-material", place, what, "draw at least one region with a material");
+            return Optional.empty();
+        }
+        Envelope all = new Envelope();
+        shapes.forEach(s -> all.expandToInclude(s.polygons().getEnvelopeInternal()));
+        double wanted = Double.isNaN(snap) ? DEFAULT_SNAP * all.getDiameter() : snap;
+        double largest = Math.max(
+                Math.max(Math.abs(all.getMinX()), Math.abs(all.getMaxX())),
+                Math.max(Math.abs(all.getMinY()), Math.abs(all.getMaxY())));
+        double used = Math.max(wanted, LEAST_SNAP_IN_ULPS * Math.ulp(largest));
+        return new SectionBuilder(shapes, used, unit, findings).build(splitPoints);
+    }
+
+    private Optional<Section> build(List<Coordinate> splitPoints) {
+        BorderNoder noder = new BorderNoder(shapes, snap);
+        if (!noder.node()) {
+            findings.error(
+                    "snap-too-coarse",
+                    shapes.get(0).place(),
+                    "points of the outlines crowd so closely that they cannot be sorted out with a snap of "
+                            + unit.length(snap),
+                    "state a smaller snap");
+            return Optional.empty();
+        }
+        List<Border> borders = noder.borders();
+        Faces faces = new Faces(noder.vertices(), borders);
+        FaceOwners owners = new FaceOwners(shapes, borders, faces);
+        if (reportLost(owners)) {
+            return Optional.empty();
+        }
+        return Optional.of(new SectionAssembler(shapes, snap, noder, faces, owners).assemble(splitPoints));
+    }
+
+    /** Reports regions of which nothing is left, and regions of nothing that cut nothing. */
+    private boolean reportLost(FaceOwners owners) {
+        BitSet visible = owners.visible();
+        boolean lost = false;
+        for (int r = 0; r < shapes.size(); r++) {
+            RegionShape shape = shapes.get(r);
+            if (shape.hole() && !owners.cuts(r)) {
+                findings.warning(
+                        "cuts-nothing",
+                        shape.place(),
+                        "region '" + shape.name() + "' is of nothing, but cuts nothing: no material lies under it",
+                        "lay it after the regions which it is to cut");
+            } else if (!shape.hole() && !visible.get(r)) {
+                lost = true;
+                reportCovered(shape, owners.ownersOver(r));
+            }
+        }
+        return lost;
+    }
+
+    private void reportCovered(RegionShape shape, BitSet over) {
+        if (over.isEmpty()) {
+            findings.error(
+                    "thinner-than-snap",
+                    shape.place(),
+                    "region '" + shape.name() + "' is nowhere thicker than snap, " + unit.length(snap),
+                    "check the drawing's unit, or state a smaller snap");
+            return;
+        }
+        List<String> names = new ArrayList<>();
+        over.stream().forEach(r -> names.add("'" + shapes.get(r).name() + "'"));
+        findings.error(
+                "region-covered",
+                shape.place(),
+                "nothing is left of region '" + shape.name() + "': it lies wholly under "
+                        + names.stream().collect(Collectors.joining(", ")),
+                "lay it after them, or leave it out");
     }
 }

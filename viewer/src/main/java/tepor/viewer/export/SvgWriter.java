@@ -1,7 +1,9 @@
 package tepor.viewer.export;
 
 import java.awt.Dimension;
+import java.io.ByteArrayOutputStream;
 import java.io.IOException;
+import java.io.OutputStream;
 import java.io.OutputStreamWriter;
 import java.io.Writer;
 import java.nio.charset.StandardCharsets;
@@ -23,6 +25,17 @@ public final class SvgWriter {
 
     /** Writes a picture, whole or not at all. */
     public static void write(Picture picture, Path file) throws IOException {
+        WholeFile.write(file, out -> write(picture, out));
+    }
+
+    /** A picture as a file of this name, ready to be written or set into a report. */
+    public static PictureFile file(Picture picture, String name) throws IOException {
+        ByteArrayOutputStream out = new ByteArrayOutputStream(1 << 17);
+        write(picture, out);
+        return new PictureFile(name, "image/svg+xml", picture.description(), out.toByteArray());
+    }
+
+    private static void write(Picture picture, OutputStream out) throws IOException {
         Document document = GenericDOMImplementation.getDOMImplementation().createDocument(NAMESPACE, "svg", null);
         SVGGeneratorContext context = SVGGeneratorContext.createDefault(document);
         context.setPrecision(DECIMALS);
@@ -35,10 +48,8 @@ public final class SvgWriter {
         Element title = document.createElementNS(NAMESPACE, "title");
         title.appendChild(document.createTextNode(picture.description()));
         root.insertBefore(title, root.getFirstChild());
-        WholeFile.write(file, out -> {
-            Writer writer = new OutputStreamWriter(out, StandardCharsets.UTF_8);
-            g.stream(root, writer, true, false);
-            writer.flush();
-        });
+        Writer writer = new OutputStreamWriter(out, StandardCharsets.UTF_8);
+        g.stream(root, writer, true, false);
+        writer.flush();
     }
 }

@@ -4,41 +4,54 @@ import java.io.BufferedOutputStream;
 import java.io.IOException;
 import java.io.OutputStream;
 import java.nio.file.AtomicMoveNotSupportedException;
+import java.nio.file.FileAlreadyExistsException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
+import java.nio.file.StandardOpenOption;
+import java.util.UUID;
 
-/** Writes a file whole or not at all: under another name in the same folder, moved into place when it is complete. */
-final class WholeFile {
-    /** Writes the contents. */
-    @FunctionalInterface
-    interface Contents {
-        void writeTo(OutputStream out) throws IOException;
-    }
-
+/** Writes a file whole or not at all: under a passing name beside it, then renamed. */
+public final class WholeFile {
     private WholeFile() {}
 
-    /** Writes a file, in place of an older one of that name. */
-    static void write(Path file, Contents contents) throws IOException {
+    /**
+     * Writes a file; one that is there already is replaced only once the new one is complete.
+     *
+     * @throws IOException if it cannot be written; nothing is left behind then
+     */
+    public static void write(Path file, FileContent content) throws IOException {
+        if (Files.isDirectory(file)) {
+            throw new FileAlreadyExistsException(file.toString(), null, "a folder of this name is in the way");
+        }
         Path target = file.toAbsolutePath();
-        // Not a temporary file of the JDK: that could be read by its owner alone, also once it is in place.
-        Path part = target.resolveSibling(
-                "." + target.getFileName() + "." + ProcessHandle.current().pid() + ".part");
+        Files.createDirectories(target.getParent());
+        Path passing = passingName(target);
         try {
-            try (OutputStream out = new BufferedOutputStream(Files.newOutputStream(part), 1 << 16)) {
-                contents.writeTo(out);
-            }
-            move(part, target);
+            fill(passing, content);
+            replace(passing, target);
         } finally {
-            Files.deleteIfExists(part);
+            Files.deleteIfExists(passing);
         }
     }
 
-    private static void move(Path part, Path target) throws IOException {
+    /** A name beside a file or folder which nothing else has. */
+    static Path passingName(Path target) {
+        return target.resolveSibling("." + target.getFileName() + "." + UUID.randomUUID() + ".part");
+    }
+
+    static void fill(Path file, FileContent content) throws IOException {
+        try (OutputStream out =
+                new BufferedOutputStream(Files.newOutputStream(file, StandardOpenOption.CREATE_NEW), 1 << 16)) {
+            content.writeTo(out);
+        }
+    }
+
+    static void replace(Path passing, Path target) throws IOException {
         try {
-            Files.move(part, target, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);
+            Files.move(passing, target, StandardCopyOption.ATOMIC_MOVE);
         } catch (AtomicMoveNotSupportedException e) {
-            Files.move(part, target, StandardCopyOption.REPLACE_EXISTING);
+            Files.move(passing, target, StandardCopyOption.REPLACE_EXISTING);
         }
     }
 }

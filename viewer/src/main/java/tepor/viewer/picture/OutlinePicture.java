@@ -6,6 +6,7 @@ import java.awt.geom.Line2D;
 import java.awt.geom.Path2D;
 import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import tepor.mesher.mesh.Mesh;
 import tepor.mesher.section.Section;
@@ -179,7 +180,7 @@ public final class OutlinePicture implements Picture {
             for (double y = box.getMinY() + step / 2; y < box.getMaxY(); y += step) {
                 for (double x = box.getMinX() + step / 2; x < box.getMaxX(); x += step) {
                     double d = Math.hypot(x - box.getCenterX(), y - box.getCenterY());
-                    if (d < least && grid.isFree(x, y, half, height, angle, -2)) {
+                    if (d < least && grid.isFree(x, y, half, height, angle)) {
                         least = d;
                         best = new Name(region.name(), x, y, angle, null, false);
                     }
@@ -225,6 +226,7 @@ public final class OutlinePicture implements Picture {
         Ink.prepare(g, sheet.width, sheet.height);
         sheet.paintTitle(g);
         view.paintOutline(g);
+        paintEdges(g, true);
         for (Region region : subject.regions()) {
             if (!region.isHole()) {
                 Hatching.fill(g, view.shape(r -> r == region.index()), region.index(), sheet.unit);
@@ -234,17 +236,24 @@ public final class OutlinePicture implements Picture {
             view.paintMesh(g, mesh, Ink.DARK, (a, b) -> true);
         }
         view.paintBorders(g);
-        for (int e = 0; e < subject.edges().size(); e++) {
-            Path2D path = new Path2D.Double();
-            for (Chain chain : SegmentChains.lines(
-                    subject.section(), subject.edges().get(e).pieces().segments())) {
-                Ink.append(path, view.points(chain), chain.closed());
-            }
-            EdgeStyle.draw(g, path, e, EDGE * sheet.unit);
-        }
+        paintEdges(g, false);
         view.paintInsulated(g, insulated);
         names.forEach(name -> paintName(g, name));
         sheet.paintBelowTitle(g, keys, list);
+    }
+
+    /** Edges on the boundary are painted before the regions, which cover their inner half, so that they hide no layer. */
+    private void paintEdges(Graphics2D g, boolean onBoundary) {
+        for (int e = 0; e < subject.edges().size(); e++) {
+            int[] segments = Arrays.stream(subject.edges().get(e).pieces().segments())
+                    .filter(s -> subject.section().isBoundary(s) == onBoundary)
+                    .toArray();
+            Path2D path = new Path2D.Double();
+            for (Chain chain : SegmentChains.lines(subject.section(), segments)) {
+                Ink.append(path, view.points(chain), chain.closed());
+            }
+            EdgeStyle.draw(g, path, e, (onBoundary ? 2 : 0.8) * EDGE * sheet.unit);
+        }
     }
 
     private void paintName(Graphics2D g, Name name) {

@@ -1,2 +1,6 @@
-/** The report: one page of HTML that another engineer can check. */
+/**
+ * The report: one page of HTML that another engineer can check and sign, needing no other file.
+ *
+ * <p>May not know the command line.
+ */
 package tepor.viewer.report;

@@ -109,6 +109,11 @@ public final class OccupancyGrid {
         return visit(x, y, halfWidth, halfHeight, angle, owner + 1, false);
     }
 
+    /** Whether a turned rectangle is free for anyone. */
+    public boolean isFree(double x, double y, double halfWidth, double halfHeight, double angle) {
+        return visit(x, y, halfWidth, halfHeight, angle, FREE, false);
+    }
+
     /** Takes a turned rectangle. */
     public void take(double x, double y, double halfWidth, double halfHeight, double angle) {
         visit(x, y, halfWidth, halfHeight, angle, 0, true);

@@ -1,0 +1,157 @@
+package tepor.mesher.section;
+
+import java.util.ArrayList;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Set;
+import org.locationtech.jts.algorithm.Area;
+import org.locationtech.jts.algorithm.Orientation;
+import org.locationtech.jts.algorithm.RobustLineIntersector;
+import org.locationtech.jts.geom.Coordinate;
+import org.locationtech.jts.geom.Envelope;
+import org.locationtech.jts.geom.LinearRing;
+import org.locationtech.jts.index.hprtree.HPRtree;
+
+/** Finds all that is wrong with one ring on its own, where JTS's validity check stops at the first fault. */
+final class RingCheck {
+    /** An area below this share of the square of the ring's diameter is round-off. */
+    private static final double NO_AREA = 1e-13;
+
+    private final Coordinate[] points; // closed, without repeated points
+    private final List<Coordinate> repeated = new ArrayList<>();
+    private final Set<Coordinate> crossings = new LinkedHashSet<>();
+    private final Set<Coordinate> touches = new LinkedHashSet<>();
+    private final Set<Coordinate> spikes = new LinkedHashSet<>();
+    private final Set<Coordinate> overlaps = new LinkedHashSet<>();
+    private final boolean flat;
+
+    RingCheck(LinearRing ring) {
+        List<Coordinate> kept = new ArrayList<>();
+        for (Coordinate c : ring.getCoordinates()) {
+            if (!kept.isEmpty() && kept.get(kept.size() - 1).equals2D(c)) {
+                repeated.add(c);
+            } else {
+                kept.add(c);
+            }
+        }
+        points = kept.toArray(new Coordinate[0]);
+        double diameter = ring.getEnvelopeInternal().getDiameter();
+        boolean enclosesNothing = points.length < 4 || Area.ofRing(points) <= NO_AREA * diameter * diameter;
+        if (points.length >= 4) {
+            findSpikes();
+            findMeetings();
+        }
+        // A figure of eight may have lobes that cancel; its fault is the crossing.
+        flat = enclosesNothing && crossings.isEmpty();
+    }
+
+    /** Points that follow on themselves: harmless. */
+    List<Coordinate> repeated() {
+        return repeated;
+    }
+
+    /** Whether the ring encloses nothing. */
+    boolean isFlat() {
+        return flat;
+    }
+
+    /** Where the ring crosses itself. */
+    Set<Coordinate> crossings() {
+        return crossings;
+    }
+
+    /** Where the ring touches itself in a point. */
+    Set<Coordinate> touches() {
+        return touches;
+    }
+
+    /** Where the ring turns back upon itself. */
+    Set<Coordinate> spikes() {
+        return spikes;
+    }
+
+    /** Where the ring begins to run over a part of itself that is not its neighbour. */
+    Set<Coordinate> overlaps() {
+        return overlaps;
+    }
+
+    private void findSpikes() {
+        int count = points.length - 1;
+        for (int i = 0; i < count; i++) {
+            Coordinate before = points[(i + count - 1) % count];
+            Coordinate here = points[i];
+            Coordinate after = points[i + 1];
+            double dot = (before.x - here.x) * (after.x - here.x) + (before.y - here.y) * (after.y - here.y);
+            if (dot > 0 && Orientation.index(before, here, after) == Orientation.COLLINEAR) {
+                spikes.add(here);
+            }
+        }
+    }
+
+    private void findMeetings() {
+        int count = points.length - 1;
+        HPRtree index = new HPRtree();
+        for (int i = 0; i < count; i++) {
+            index.insert(new Envelope(points[i], points[i + 1]), i);
+        }
+        RobustLineIntersector intersector = new RobustLineIntersector();
+        for (int i = 0; i < count; i++) {
+            int one = i;
+            index.query(new Envelope(points[i], points[i + 1]), item -> {
+                int other = (Integer) item;
+                boolean neighbours = other == one + 1 || (one == 0 && other == count - 1);
+                if (other > one && !neighbours) {
+                    meet(one, other, intersector);
+                }
+            });
+        }
+    }
+
+    private void meet(int i, int j, RobustLineIntersector intersector) {
+        intersector.computeIntersection(points[i], points[i + 1], points[j], points[j + 1]);
+        if (!intersector.hasIntersection()) {
+            return;
+        }
+        Coordinate at = intersector.getIntersection(0).copy();
+        if (intersector.getIntersectionNum() == 2) {
+            overlaps.add(at);
+        } else if (intersector.isProper() || crossesAt(at)) {
+            crossings.add(at);
+        } else {
+            touches.add(at);
+        }
+    }
+
+    /** Whether the ring crosses itself, rather than touches, in a point that is a vertex: the passes alternate around it. */
+    private boolean crossesAt(Coordinate at) {
+        int count = points.length - 1;
+        List<double[]> passes = new ArrayList<>(); // angle of the way in (seen backwards) and of the way out
+        for (int i = 0; i < count; i++) {
+            Coordinate p = points[i];
+            Coordinate q = points[i + 1];
+            if (p.equals2D(at)) {
+                passes.add(new double[] {angle(at, points[(i + count - 1) % count]), angle(at, q)});
+            } else if (!q.equals2D(at)
+                    && new Envelope(p, q).contains(at)
+                    && Orientation.index(p, q, at) == Orientation.COLLINEAR) {
+                passes.add(new double[] {angle(at, p), angle(at, q)});
+            }
+        }
+        for (int a = 0; a < passes.size(); a++) {
+            for (int b = a + 1; b < passes.size(); b++) {
+                if (isBetween(passes.get(b)[0], passes.get(a)) != isBetween(passes.get(b)[1], passes.get(a))) {
+                    return true;
+                }
+            }
+        }
+        return false;
+    }
+
+    private static double angle(Coordinate from, Coordinate to) {
+        return Math.atan2(to.y - from.y, to.x - from.x);
+    }
+
+    private static boolean isBetween(double angle, double[] pass) {
+        return angle > Math.min(pass[0], pass[1]) && angle < Math.max(pass[0], pass[1]);
+    }
+}

@@ -1,0 +1,154 @@
+package tepor.solver.casefile;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
+import tepor.mesher.outline.Findings;
+import tepor.solver.casefile.KeyTable.Value;
+import tepor.solver.casefile.QuantityKeys.Range;
+import tepor.solver.model.Ask;
+import tepor.solver.model.Input;
+import tepor.solver.model.Limit;
+import tepor.solver.model.Within;
+import tepor.solver.quantity.Dimension;
+import tepor.solver.quantity.Quantity;
+
+/** Reads what every ask may have: {@code limit}, {@code within} and {@code with}. */
+final class AskHeadReader {
+    private static final Within DEFAULT_WITHIN = new Within.Fraction(0.01);
+    private static final Pattern LIMIT = Pattern.compile("\\s*(<=|>=|\u2264|\u2265)(.*)", Pattern.DOTALL);
+
+    private final QuantityKeys quantities;
+    private final Findings findings;
+
+    AskHeadReader(QuantityKeys quantities, Findings findings) {
+        this.quantities = quantities;
+        this.findings = findings;
+    }
+
+    /**
+     * Reads.
+     *
+     * @param ask the ask's table
+     * @param name its name
+     * @param dimension of its answer
+     */
+    Ask.Head read(KeyTable ask, String name, Dimension dimension) {
+        Limit limit = ask.value("limit").flatMap(v -> limit(v, dimension)).orElse(null);
+        Within within = ask.value("within").flatMap(v -> within(v, dimension)).orElse(DEFAULT_WITHIN);
+        return new Ask.Head(name, limit, within, with(ask), ask.place());
+    }
+
+    private Optional<Limit> limit(Value value, Dimension dimension) {
+        String example = example(dimension);
+        if (!value.isText()) {
+            value.wrongType("a text with <= or >=", "write limit = \"<= " + example + "\"");
+            return Optional.empty();
+        }
+        Matcher matcher = LIMIT.matcher((String) value.raw());
+        if (!matcher.matches()) {
+            findings.error(
+                    "limit-form",
+                    value.place(),
+                    value.name() + " is " + value.found() + ", which begins with neither <= nor >=",
+                    "write limit = \"<= " + example + "\" or limit = \">= " + example + "\"");
+            return Optional.empty();
+        }
+        boolean atMost = matcher.group(1).equals("<=") || matcher.group(1).equals("\u2264");
+        return quantities
+                .exact(matcher.group(2).strip(), value, "a limit is exact", Range.ANY, dimension)
+                .map(q -> new Limit(atMost ? Limit.Relation.AT_MOST : Limit.Relation.AT_LEAST, q));
+    }
+
+    private Optional<Within> within(Value value, Dimension dimension) {
+        if (value.isText() && Percentage.is((String) value.raw())) {
+            double fraction = Percentage.read(value).orElseThrow();
+            if (fraction > 0) {
+                return Optional.of(new Within.Fraction(fraction));
+            }
+            findings.error(
+                    "not-positive",
+                    value.place(),
+                    value.name() + " is " + value.found() + ", but must be greater than zero",
+                    "write a tolerance such as \"1 %\"");
+            return Optional.empty();
+        }
+        Dimension tolerance = dimension == Dimension.TEMPERATURE ? Dimension.TEMPERATURE_DIFFERENCE : dimension;
+        return quantities
+                .exact(value, "a tolerance is exact", Range.POSITIVE, tolerance)
+                .map(q -> new Within.Absolute(q.value()));
+    }
+
+    private static String example(Dimension dimension) {
+        return switch (dimension) {
+            case TEMPERATURE -> "105 degC";
+            case NUMBER -> "0.7";
+            default -> "1 " + dimension.unit();
+        };
+    }
+
+    private Map<Input, Double> with(KeyTable ask) {
+        Map<Input, Double> changed = new LinkedHashMap<>();
+        ask.value("with")
+                .flatMap(v -> v.table("with = { \"PATH\" = \"…\" }", v.name()))
+                .ifPresent(table -> {
+                    for (Map.Entry<String, Value> entry : flat(table, List.of()).entrySet()) {
+                        change(entry.getKey(), entry.getValue(), changed);
+                    }
+                });
+        return changed;
+    }
+
+    /** Paths may be one quoted key or TOML's own dotted keys: the latter come as tables in tables. */
+    private static Map<String, Value> flat(KeyTable table, List<String> above) {
+        Map<String, Value> values = new LinkedHashMap<>();
+        for (String key : table.keys()) {
+            List<String> steps = new ArrayList<>(above);
+            steps.add(key);
+            Value value = table.value(key).orElseThrow();
+            if (value.isTable()) {
+                values.putAll(flat(value.table("with", table.label()).orElseThrow(), steps));
+            } else {
+                values.put(steps.size() == 1 ? key : Paths.of(steps.toArray(new String[0])), value);
+            }
+        }
+        return values;
+    }
+
+    private void change(String path, Value value, Map<Input, Double> changed) {
+        Optional<Input> input = quantities.find(path);
+        if (input.isEmpty()) {
+            if (!quantities.isFaulty(path)) {
+                findings.error(
+                        "unknown-path",
+                        value.place(),
+                        "'with' names the input '" + path + "', but the case has no quantity of that path",
+                        remedy(path));
+            }
+            return;
+        }
+        Optional<Quantity> quantity = quantities.exact(
+                value,
+                "the spread stays that of the input itself",
+                quantities.rangeOf(input.get()),
+                input.get().quantity().dimension());
+        quantity.ifPresent(q -> {
+            if (changed.put(input.get(), q.value()) != null) {
+                findings.error(
+                        "duplicate-path",
+                        value.place(),
+                        "'with' names the input '" + input.get().path() + "' twice",
+                        "state it once");
+            }
+        });
+    }
+
+    private String remedy(String path) {
+        List<String> known = quantities.inputs().all().stream().map(Input::path).toList();
+        return NearestWord.remedy(path, known, "quantity");
+    }
+}

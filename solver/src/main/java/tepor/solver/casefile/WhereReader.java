@@ -1,0 +1,186 @@
+package tepor.solver.casefile;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import org.locationtech.jts.geom.Coordinate;
+import org.locationtech.jts.geom.Geometry;
+import tepor.mesher.section.OutlineCheck;
+import tepor.mesher.section.Where;
+import tepor.solver.casefile.DrawingReader.Drawing;
+import tepor.solver.casefile.KeyTable.Keys;
+import tepor.solver.casefile.KeyTable.Value;
+import tepor.solver.casefile.Names.Kind;
+
+/** Reads the {@code where} of an edge. */
+final class WhereReader {
+    private static final String LATER_LAYER = "write the line itself: where = { line = \"LINESTRING (…)\" }";
+    private static final Keys FORMS = new Keys(
+            Keys.of("line", "inside", "nearest", "of", "between").now(),
+            Map.of("layer", LATER_LAYER, "cut", "ask for temperatures at points, or draw a border of regions there"));
+    private static final Map<String, Where> WORDS = Map.of(
+            "left", new Where.OnSide(Where.Side.LEFT),
+            "right", new Where.OnSide(Where.Side.RIGHT),
+            "bottom", new Where.OnSide(Where.Side.BOTTOM),
+            "top", new Where.OnSide(Where.Side.TOP),
+            "outside", new Where.Outside(),
+            "holes", new Where.Holes(),
+            "rest", new Where.Rest());
+    private static final List<String> WORDS_IN_ORDER =
+            List.of("left", "right", "bottom", "top", "outside", "holes", "rest");
+    private static final String EXAMPLE = "where = \"outside\", or another word or form of the reference";
+
+    private final Names names;
+    private final Drawing drawing;
+    private final List<String> regions;
+    private final List<Coordinate> splitPoints = new ArrayList<>();
+
+    /**
+     * @param names the names of the case
+     * @param drawing for coordinates
+     * @param regions the names of the regions by their number in the section
+     */
+    WhereReader(Names names, Drawing drawing, List<String> regions) {
+        this.names = names;
+        this.drawing = drawing;
+        this.regions = regions;
+    }
+
+    /** The vertices of all lines read so far: where a line ends or turns away, the piece below it is split. */
+    List<Coordinate> splitPoints() {
+        return List.copyOf(splitPoints);
+    }
+
+    /** Where the edge in a table is; empty, with errors, where that is missing or wrong. */
+    Optional<Where> read(KeyTable edge) {
+        Optional<Value> value = edge.value("where");
+        if (value.isEmpty()) {
+            edge.missing("where", EXAMPLE);
+            return Optional.empty();
+        }
+        if (!value.get().isArray()) {
+            return one(value.get());
+        }
+        List<Value> elements = value.get().elements(EXAMPLE);
+        if (elements.isEmpty()) {
+            edge.findings()
+                    .error("empty-where", value.get().place(), value.get().name() + " is empty", "write " + EXAMPLE);
+            return Optional.empty();
+        }
+        List<Where> parts = new ArrayList<>();
+        for (Value element : elements) {
+            one(element).ifPresent(parts::add);
+        }
+        return parts.size() < elements.size() ? Optional.empty() : Optional.of(new Where.Union(parts));
+    }
+
+    private Optional<Where> one(Value value) {
+        if (value.isText()) {
+            return word(value, (String) value.raw());
+        }
+        if (!value.isTable()) {
+            value.wrongType("a word or a table", "write " + EXAMPLE);
+            return Optional.empty();
+        }
+        KeyTable table = value.table("where", value.name()).orElseThrow();
+        table.allow(FORMS);
+        if (!FORMS.now().containsAll(table.keys())) {
+            return Optional.empty();
+        }
+        if (table.keys().size() != 1) {
+            value.findings()
+                    .error(
+                            "where-form",
+                            value.place(),
+                            value.name() + " has " + table.keys().size() + " keys, where exactly one is wanted",
+                            "write one of line, inside, nearest, of, between; a union is an array of such tables");
+            return Optional.empty();
+        }
+        String key = table.keys().iterator().next();
+        Value form = table.value(key).orElseThrow();
+        return switch (key) {
+            case "line" -> line(form);
+            case "inside" -> inside(form);
+            case "nearest" ->
+                drawing.geometry(form, "a point", "POINT")
+                        .map(p -> new Where.Nearest(p.getCoordinate().x, p.getCoordinate().y));
+            case "of" -> region(form).map(Where.OfRegion::new);
+            default -> between(form);
+        };
+    }
+
+    private Optional<Where> word(Value value, String word) {
+        Where where = WORDS.get(word);
+        if (where != null) {
+            return Optional.of(where);
+        }
+        Optional<Kind> kind = names.kindOf(word);
+        String remedy = NearestWord.to(word, WORDS_IN_ORDER)
+                .map(near -> "did you mean \"" + near + "\"")
+                .orElse("the words are " + String.join(", ", WORDS_IN_ORDER));
+        if (kind.isPresent() && kind.get() == Kind.REGION) {
+            remedy = "write { of = \"" + word + "\" } for the border of the region, or { between = [\"" + word
+                    + "\", \"…\"] } for where it meets another";
+        }
+        value.findings()
+                .error(
+                        "unknown-word",
+                        value.place(),
+                        value.name() + " is \"" + word + "\", which is no word for a place"
+                                + kind.map(k -> " but the name of " + k.words()).orElse(""),
+                        remedy);
+        return Optional.empty();
+    }
+
+    private Optional<Where> line(Value form) {
+        Optional<Geometry> line = drawing.geometry(form, "a line", "LINESTRING", "MULTILINESTRING");
+        line.ifPresent(l -> splitPoints.addAll(Arrays.asList(l.getCoordinates())));
+        return line.map(Where.OnLine::new);
+    }
+
+    private Optional<Where> inside(Value form) {
+        return drawing.geometry(form, "an area", "POLYGON", "MULTIPOLYGON")
+                .filter(g -> OutlineCheck.check(form.name(), g, form.place(), drawing.unit(), form.findings()))
+                .map(Where.Inside::new);
+    }
+
+    private Optional<Where> between(Value form) {
+        List<Value> elements = form.elements("{ between = [\"A\", \"B\"] }");
+        if (!form.isArray()) {
+            return Optional.empty();
+        }
+        if (elements.size() != 2) {
+            form.findings()
+                    .error(
+                            "where-form",
+                            form.place(),
+                            form.name() + " has " + elements.size() + " elements, where two regions are wanted",
+                            "write { between = [\"A\", \"B\"] }");
+            return Optional.empty();
+        }
+        Optional<Integer> first = region(elements.get(0));
+        Optional<Integer> second = region(elements.get(1));
+        if (first.isEmpty() || second.isEmpty()) {
+            return Optional.empty();
+        }
+        if (first.equals(second)) {
+            form.findings()
+                    .error(
+                            "where-form",
+                            form.place(),
+                            form.name() + " names region '" + elements.get(0).raw() + "' twice",
+                            "name two different regions, or write { of = \"…\" } for the border of one");
+            return Optional.empty();
+        }
+        return Optional.of(new Where.Between(first.get(), second.get()));
+    }
+
+    private Optional<Integer> region(Value value) {
+        return value.text()
+                .filter(name -> names.check(name, value.place(), value.name(), "", Kind.REGION))
+                .map(regions::indexOf)
+                .filter(i -> i >= 0);
+    }
+}
