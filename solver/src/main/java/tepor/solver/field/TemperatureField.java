@@ -1,6 +1,9 @@
 package tepor.solver.field;
 
 import tepor.mesher.mesh.Mesh;
+import tepor.mesher.mesh.TriangleFinder;
+import tepor.solver.element.TriangleGeometry;
+import tepor.solver.element.TriangleShape;
 
 /**
  * A temperature for each node of a mesh. Immutable.
@@ -27,5 +30,61 @@ public final class TemperatureField {
     /** Temperature of a node, K. */
     public double at(int iNode) {
         return kelvin[iNode];
+    }
+
+    /** All nodal temperatures, K; a copy. */
+    public double[] nodal() {
+        return kelvin.clone();
+    }
+
+    /**
+     * Temperature at a point of the section, K; NaN off it.
+     *
+     * @param x metres
+     * @param y metres
+     * @param finder of this field's mesh
+     */
+    public double at(double x, double y, TriangleFinder finder) {
+        double[] l = new double[3];
+        int triangle = finder.find(x, y, l);
+        return triangle == Mesh.NONE ? Double.NaN : inside(triangle, l[0], l[1], l[2]);
+    }
+
+    /** Temperature at barycentric coordinates of a triangle, K. */
+    public double inside(int triangle, double l0, double l1, double l2) {
+        TriangleShape shape = TriangleShape.of(mesh.nodesPerTriangle());
+        double[] value = new double[shape.nodeCount()];
+        shape.values(l0, l1, l2, value);
+        double level = kelvin[mesh.node(triangle, 0)];
+        double sum = 0;
+        for (int i = 0; i < value.length; i++) {
+            sum += value[i] * (kelvin[mesh.node(triangle, i)] - level);
+        }
+        return level + sum;
+    }
+
+    /**
+     * Temperature gradient at barycentric coordinates of a triangle, K/m.
+     *
+     * @param out two entries, overwritten
+     */
+    public void gradient(int triangle, double l0, double l1, double l2, double[] out) {
+        TriangleShape shape = TriangleShape.of(mesh.nodesPerTriangle());
+        int n = shape.nodeCount();
+        double[] slopes = new double[3 * n];
+        double[] gx = new double[n];
+        double[] gy = new double[n];
+        shape.slopes(l0, l1, l2, slopes);
+        TriangleGeometry geometry = new TriangleGeometry(mesh);
+        geometry.moveTo(triangle);
+        geometry.gradients(slopes, n, gx, gy);
+        double level = kelvin[mesh.node(triangle, 0)];
+        out[0] = 0;
+        out[1] = 0;
+        for (int i = 0; i < n; i++) {
+            double u = kelvin[mesh.node(triangle, i)] - level;
+            out[0] += u * gx[i];
+            out[1] += u * gy[i];
+        }
     }
 }

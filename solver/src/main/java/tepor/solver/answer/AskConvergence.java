@@ -1,0 +1,117 @@
+package tepor.solver.answer;
+
+import java.util.ArrayList;
+import java.util.List;
+import tepor.solver.model.Ask;
+import tepor.solver.model.Case;
+import tepor.solver.model.Within;
+import tepor.solver.quantity.Dimension;
+import tepor.solver.trust.Convergence;
+
+/** Follows every ask of a case over the rounds of refinement. */
+final class AskConvergence {
+    private final Case subject;
+    private final List<Convergence> convergences = new ArrayList<>();
+    private final List<Double> last = new ArrayList<>();
+    private final List<Double> within = new ArrayList<>();
+    private int rounds;
+
+    AskConvergence(Case subject) {
+        this.subject = subject;
+        for (int i = 0; i < subject.asks().size(); i++) {
+            convergences.add(new Convergence());
+            last.add(Double.NaN);
+            within.add(Double.NaN);
+        }
+    }
+
+    /** Takes what a further mesh says. */
+    void add(AskEvaluator evaluator) {
+        rounds++;
+        for (int i = 0; i < convergences.size(); i++) {
+            Ask ask = subject.asks().get(i);
+            AskValue value = evaluator.evaluate(ask);
+            double tolerance = ask.head().within() instanceof Within.Fraction fraction
+                    ? fraction.value() * value.reference()
+                    : ((Within.Absolute) ask.head().within()).value();
+            last.set(i, value.value());
+            within.set(i, tolerance);
+            convergences.get(i).add(value.value(), tolerance);
+        }
+    }
+
+    boolean settled() {
+        return convergences.stream().allMatch(Convergence::settled);
+    }
+
+    /** Mesh error of the ask that is worst off, relative to its tolerance; NaN after a single round or without asks. */
+    double widestRelative() {
+        double widest = Double.NaN;
+        for (int i = 0; i < convergences.size() && rounds > 1; i++) {
+            double relative = convergences.get(i).error() / within.get(i);
+            widest = Double.isNaN(widest) ? relative : Math.max(widest, relative);
+        }
+        return widest;
+    }
+
+    MeshError error(int i) {
+        double error = convergences.get(i).error();
+        return new MeshError(
+                -error,
+                error,
+                MeshError.Kind.ESTIMATE,
+                within.get(i),
+                convergences.get(i).settled());
+    }
+
+    Answer.Round round(int triangles) {
+        List<MeshError> errors = new ArrayList<>();
+        for (int i = 0; i < convergences.size(); i++) {
+            errors.add(rounds < 2 ? null : error(i));
+        }
+        return new Answer.Round(rounds, triangles, last, errors);
+    }
+
+    List<AskAnswer> answers(AskEvaluator evaluator) {
+        List<AskAnswer> answers = new ArrayList<>();
+        for (int i = 0; i < convergences.size(); i++) {
+            Ask ask = subject.asks().get(i);
+            AskValue value = evaluator.evaluate(ask);
+            Dimension dimension = dimension(ask);
+            String unit = ask.head().limit() == null
+                    ? dimension.unit()
+                    : ask.head().limit().quantity().unit();
+            answers.add(new AskAnswer(
+                    ask, value.value(), dimension, unit, value.where(), error(i), verdict(ask, value.value()), null));
+        }
+        return answers;
+    }
+
+    /**
+     * Until the inputs' spreads count, a limit that the nominal value keeps is undecided: nobody has said yet how far off
+     * the inputs make it.
+     */
+    private static Verdict verdict(Ask ask, double value) {
+        if (ask.head().limit() == null) {
+            return null;
+        }
+        return ask.head().limit().margin(value) < 0 ? Verdict.BROKEN : Verdict.UNDECIDED;
+    }
+
+    private static Dimension dimension(Ask ask) {
+        if (ask instanceof Ask.Flow) {
+            return Dimension.HEAT_PER_LENGTH;
+        }
+        if (ask instanceof Ask.Coupling || ask instanceof Ask.Transmittance) {
+            return Dimension.COUPLING;
+        }
+        if (ask instanceof Ask.Factor) {
+            return Dimension.NUMBER;
+        }
+        if (ask instanceof Ask.Difference difference) {
+            Dimension of = dimension(difference.first());
+            return of == Dimension.TEMPERATURE ? Dimension.TEMPERATURE_DIFFERENCE : of;
+        }
+        return Dimension.TEMPERATURE;
+    }
+}

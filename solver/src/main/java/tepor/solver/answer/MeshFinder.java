@@ -1,0 +1,92 @@
+package tepor.solver.answer;
+
+import java.util.List;
+import java.util.function.BooleanSupplier;
+import tepor.mesher.mesh.Mesh;
+import tepor.mesher.mesh.MeshOptions;
+import tepor.mesher.mesh.MeshResult;
+import tepor.mesher.mesh.Mesher;
+import tepor.mesher.refinement.SizeField;
+import tepor.solver.field.Solution;
+import tepor.solver.model.Case;
+import tepor.solver.trust.AskedSizes;
+import tepor.solver.trust.ErrorIndicator;
+import tepor.solver.trust.FirstSizes;
+import tepor.solver.trust.MeshSizes;
+import tepor.solver.trust.SizePlanner;
+
+/** Makes the meshes of a case: the first from the section alone, each further one from the solutions on the last. */
+final class MeshFinder {
+    /** Growth of the number of triangles from round to round. */
+    private static final double GROWTH = 3;
+
+    /** Growth of the size per distance. */
+    private static final double GRADATION = 0.5;
+
+    /** The mesher takes a size for the longest side wanted; its triangles' sides come out shorter by this on average. */
+    private static final double LONGEST_TO_MEAN = 1.35;
+
+    private final Case subject;
+    private final BooleanSupplier stopped;
+    private final AskedSizes asked;
+    private double seconds;
+
+    MeshFinder(Case subject, BooleanSupplier stopped) {
+        this.subject = subject;
+        this.stopped = stopped;
+        asked = new AskedSizes(subject);
+    }
+
+    MeshResult first() {
+        return mesh(new FirstSizes(subject));
+    }
+
+    /**
+     * The next mesh.
+     *
+     * @param solutions those on the last mesh; each counts the same
+     * @return null where the element limit leaves no room for a mesh worth having
+     */
+    MeshResult next(Mesh last, List<Solution> solutions) {
+        double room = 0.9 * subject.mesh().trianglesAtMost() / last.triangleCount();
+        double growth = Math.min(GROWTH, room);
+        if (growth < 1.3) {
+            return null;
+        }
+        double[] squared = new double[last.triangleCount()];
+        for (Solution solution : solutions) {
+            double[] own = ErrorIndicator.squared(solution.balance(), solution.field());
+            double sum = 0;
+            for (double e : own) {
+                sum += e;
+            }
+            for (int t = 0; sum > 0 && t < own.length; t++) {
+                squared[t] += own[t] / sum;
+            }
+        }
+        double[] sizes = SizePlanner.plan(last, squared, growth);
+        for (int t = 0; t < sizes.length; t++) {
+            sizes[t] *= LONGEST_TO_MEAN;
+        }
+        return mesh(new MeshSizes(last, sizes, GRADATION));
+    }
+
+    private MeshResult mesh(SizeField sizes) {
+        long t0 = System.nanoTime();
+        MeshResult result = Mesher.mesh(
+                subject.section(),
+                new MeshOptions(
+                        subject.mesh().smallestAngle(),
+                        (x, y) -> Math.min(asked.at(x, y), sizes.at(x, y)),
+                        subject.mesh().trianglesAtMost(),
+                        subject.mesh().nodesPerTriangle()),
+                stopped);
+        seconds += 1e-9 * (System.nanoTime() - t0);
+        return result;
+    }
+
+    /** What all meshes so far took. */
+    double seconds() {
+        return seconds;
+    }
+}

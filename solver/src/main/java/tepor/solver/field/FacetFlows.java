@@ -1,0 +1,200 @@
+package tepor.solver.field;
+
+import java.util.Arrays;
+import java.util.HashMap;
+import tepor.mesher.mesh.Mesh;
+import tepor.solver.assembly.FacetEffect;
+import tepor.solver.assembly.HeatBalance;
+import tepor.solver.assembly.Tensor;
+import tepor.solver.element.SideShape;
+
+/**
+ * The heat flow through every facet, from the balance equations that were solved.
+ *
+ * <p>Films and inflows give theirs directly. Elsewhere the element residuals of the triangles of one region around a node
+ * say how much heat enters that region there through its <em>open</em> facets, those with a fixed temperature and those
+ * towards other regions (Carey 1982, Comput. Methods Appl. Mech. Engng 35, 1–14; Hughes et al. 2000, J. Comput. Phys. 163,
+ * 467–488). Where several open facets meet in a node, each first gets what the temperature gradient says, and what is left
+ * is shared equally; so the sum over all open facets of a region is exactly what the region takes up.
+ */
+public final class FacetFlows {
+    private final Mesh mesh;
+    private final double[] intoLeft;
+    private final double[] intoRight;
+
+    /** @param field a solution of the balance */
+    public FacetFlows(HeatBalance balance, TemperatureField field) {
+        mesh = balance.mesh();
+        int count = mesh.facetCount();
+        intoLeft = new double[count];
+        intoRight = new double[count];
+        double[] kelvin = field.nodal();
+        double[] residual = balance.elementResidual(kelvin);
+        for (FacetEffect effect : balance.facetEffects()) {
+            for (int f : effect.facets()) {
+                double in = effect.heatIn(kelvin, f);
+                if (mesh.facetLeftTriangle(f) != Mesh.NONE) {
+                    intoLeft[f] += in;
+                } else {
+                    intoRight[f] += in;
+                }
+            }
+        }
+        new OpenFacets(balance, field, residual).share();
+    }
+
+    /** Heat that enters the region on the left of the facet through it, W/m; 0 where there is no region. */
+    public double intoLeft(int facet) {
+        return intoLeft[facet];
+    }
+
+    /** Heat that enters the region on the right of the facet through it, W/m; 0 where there is no region. */
+    public double intoRight(int facet) {
+        return intoRight[facet];
+    }
+
+    /** Heat that enters the section through a boundary facet, W/m. */
+    public double intoSection(int facet) {
+        return intoLeft[facet] + intoRight[facet];
+    }
+
+    /** The sharing out of nodal reactions over open facets. */
+    private final class OpenFacets {
+        private final HeatBalance balance;
+        private final TemperatureField field;
+        private final int nodesPerFacet;
+        private final SideShape shape;
+
+        /** Sum of element residuals by node and region, found by {@link #key}. */
+        private final HashMap<Long, double[]> reaction = new HashMap<>();
+
+        OpenFacets(HeatBalance balance, TemperatureField field, double[] residual) {
+            this.balance = balance;
+            this.field = field;
+            nodesPerFacet = mesh.nodesPerTriangle() == 3 ? 2 : 3;
+            shape = SideShape.of(mesh.nodesPerTriangle());
+            boolean[] wanted = new boolean[mesh.nodeCount()];
+            for (int f = 0; f < mesh.facetCount(); f++) {
+                if (isOpen(f)) {
+                    for (int i = 0; i < nodesPerFacet; i++) {
+                        wanted[mesh.facetNode(f, i)] = true;
+                    }
+                }
+            }
+            int n = mesh.nodesPerTriangle();
+            for (int t = 0; t < mesh.triangleCount(); t++) {
+                for (int i = 0; i < n; i++) {
+                    int node = mesh.node(t, i);
+                    if (wanted[node]) {
+                        reaction.computeIfAbsent(key(node, mesh.region(t)), k -> new double[2])[0] +=
+                                residual[n * t + i];
+                    }
+                }
+            }
+        }
+
+        private boolean isOpen(int f) {
+            return !mesh.isBoundaryFacet(f) || balance.fixed().edgeOf(f) >= 0;
+        }
+
+        private long key(int node, int region) {
+            return (long) node * 1_000_003L + region;
+        }
+
+        void share() {
+            double[] moment = new double[nodesPerFacet];
+            for (int f = 0; f < mesh.facetCount(); f++) {
+                if (isOpen(f)) {
+                    predict(f, moment);
+                    for (int i = 0; i < nodesPerFacet; i++) {
+                        int node = mesh.facetNode(f, i);
+                        take(f, true, node, -moment[i]);
+                        take(f, false, node, moment[i]);
+                    }
+                }
+            }
+            for (int f = 0; f < mesh.facetCount(); f++) {
+                if (isOpen(f)) {
+                    for (int i = 0; i < nodesPerFacet; i++) {
+                        int node = mesh.facetNode(f, i);
+                        giveRest(f, true, node);
+                        giveRest(f, false, node);
+                    }
+                }
+            }
+        }
+
+        /** Books what the gradient says enters on one side, and counts the facet. */
+        private void take(int f, boolean left, int node, double in) {
+            double[] entry = entry(f, left, node);
+            if (entry != null) {
+                entry[0] -= in;
+                entry[1]++;
+                into(left)[f] += in;
+            }
+        }
+
+        private void giveRest(int f, boolean left, int node) {
+            double[] entry = entry(f, left, node);
+            if (entry != null) {
+                into(left)[f] += entry[0] / entry[1];
+            }
+        }
+
+        private double[] into(boolean left) {
+            return left ? intoLeft : intoRight;
+        }
+
+        private double[] entry(int f, boolean left, int node) {
+            int triangle = left ? mesh.facetLeftTriangle(f) : mesh.facetRightTriangle(f);
+            return triangle == Mesh.NONE ? null : reaction.get(key(node, mesh.region(triangle)));
+        }
+
+        /**
+         * Flow from left to right through a facet as the temperature gradient says it, weighted by each node's shape
+         * function. On an interface the better conductor's gradient is the worse known: each side counts with the
+         * conductivity of the other.
+         */
+        private void predict(int f, double[] moment) {
+            int a = mesh.facetNode(f, 0);
+            int b = mesh.facetNode(f, 1);
+            double length = mesh.facetLength(f);
+            double nx = (mesh.y(b) - mesh.y(a)) / length;
+            double ny = -(mesh.x(b) - mesh.x(a)) / length;
+            int tl = mesh.facetLeftTriangle(f);
+            int tr = mesh.facetRightTriangle(f);
+            Tensor kl = tl == Mesh.NONE ? null : balance.conduction().tensor(mesh.region(tl));
+            Tensor kr = tr == Mesh.NONE ? null : balance.conduction().tensor(mesh.region(tr));
+            double wl = kl == null ? 0 : kr == null ? 1 : kr.inDirection(nx, ny);
+            double wr = kr == null ? 0 : kl == null ? 1 : kl.inDirection(nx, ny);
+            double[] gradient = new double[2];
+            Arrays.fill(moment, 0);
+            for (int p = 0; p < shape.pointCount(); p++) {
+                double flux = 0;
+                if (kl != null) {
+                    gradientOnSide(tl, mesh.facetLeftSide(f), shape.point(p), gradient);
+                    flux += wl / (wl + wr) * normalFlux(kl, gradient, nx, ny);
+                }
+                if (kr != null) {
+                    gradientOnSide(tr, mesh.facetRightSide(f), 1 - shape.point(p), gradient);
+                    flux += wr / (wl + wr) * normalFlux(kr, gradient, nx, ny);
+                }
+                for (int i = 0; i < nodesPerFacet; i++) {
+                    moment[i] += shape.weight(p) * length * flux * shape.value(p, i);
+                }
+            }
+        }
+
+        private double normalFlux(Tensor k, double[] g, double nx, double ny) {
+            return -(nx * (k.xx() * g[0] + k.xy() * g[1]) + ny * (k.xy() * g[0] + k.yy() * g[1]));
+        }
+
+        /** Gradient at a point of a triangle's side, s from 0 at corner side+1 to 1 at corner side+2. */
+        private void gradientOnSide(int triangle, int side, double s, double[] out) {
+            double[] l = new double[3];
+            l[(side + 1) % 3] = 1 - s;
+            l[(side + 2) % 3] = s;
+            field.gradient(triangle, l[0], l[1], l[2], out);
+        }
+    }
+}

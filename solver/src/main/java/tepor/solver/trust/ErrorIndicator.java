@@ -1,0 +1,171 @@
+package tepor.solver.trust;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import tepor.mesher.mesh.Mesh;
+import tepor.solver.assembly.FacetEffect;
+import tepor.solver.assembly.HeatBalance;
+import tepor.solver.assembly.RegionHeat;
+import tepor.solver.assembly.Tensor;
+import tepor.solver.element.SideShape;
+import tepor.solver.element.TriangleGeometry;
+import tepor.solver.field.TemperatureField;
+
+/**
+ * Where the energy of the error sits: for each triangle the residual of the balance inside it and the jumps of the heat
+ * flux across its sides, weighted so that jumps of conductivity do not spoil it.
+ *
+ * <p>Source: R. Verfürth, A Review of A Posteriori Error Estimation and Adaptive Mesh-Refinement Techniques, 1996; weights
+ * for jumping conductivity after C. Bernardi and R. Verfürth, Numer. Math. 85 (2000) 579–608. Only ratios between triangles
+ * are used, so the constants are left out. It steers the mesh and is no statement of accuracy.
+ */
+public final class ErrorIndicator {
+    private final HeatBalance balance;
+    private final TemperatureField field;
+    private final Mesh mesh;
+    private final double[] flux;
+    private final double[] squared;
+    private final int[] facetOfSide;
+
+    private ErrorIndicator(HeatBalance balance, TemperatureField field) {
+        this.balance = balance;
+        this.field = field;
+        mesh = balance.mesh();
+        flux = new double[6 * mesh.triangleCount()];
+        squared = new double[mesh.triangleCount()];
+        facetOfSide = new int[3 * mesh.triangleCount()];
+    }
+
+    /**
+     * Squared indicators.
+     *
+     * @return one for each triangle, W·K/m (the energy of the error but for a constant)
+     */
+    public static double[] squared(HeatBalance balance, TemperatureField field) {
+        ErrorIndicator indicator = new ErrorIndicator(balance, field);
+        indicator.interior();
+        indicator.sides();
+        return indicator.squared;
+    }
+
+    /** Fluxes at the corners of each triangle (they are linear inside), and the residual inside. */
+    private void interior() {
+        double[] heat = new double[balance.conduction().regionCount()];
+        for (RegionHeat source : balance.heats()) {
+            heat[source.region()] += source.density();
+        }
+        TriangleGeometry geometry = new TriangleGeometry(mesh);
+        double[] g = new double[2];
+        for (int t = 0; t < mesh.triangleCount(); t++) {
+            Tensor k = balance.conduction().tensor(mesh.region(t));
+            geometry.moveTo(t);
+            double divergence = 0;
+            for (int i = 0; i < 3; i++) {
+                field.gradient(t, i == 0 ? 1 : 0, i == 1 ? 1 : 0, i == 2 ? 1 : 0, g);
+                double fx = -(k.xx() * g[0] + k.xy() * g[1]);
+                double fy = -(k.xy() * g[0] + k.yy() * g[1]);
+                flux[6 * t + 2 * i] = fx;
+                flux[6 * t + 2 * i + 1] = fy;
+                divergence += fx * geometry.dx(i) + fy * geometry.dy(i);
+            }
+            double area = geometry.area();
+            double residual = heat[mesh.region(t)] - divergence;
+            squared[t] = area * residual * residual * area / mean(k);
+        }
+    }
+
+    private static double mean(Tensor k) {
+        return 0.5 * (k.xx() + k.yy());
+    }
+
+    private void sides() {
+        Arrays.fill(facetOfSide, -1);
+        for (int f = 0; f < mesh.facetCount(); f++) {
+            if (mesh.isBoundaryFacet(f)) {
+                boolean left = mesh.facetLeftTriangle(f) != Mesh.NONE;
+                int t = left ? mesh.facetLeftTriangle(f) : mesh.facetRightTriangle(f);
+                int side = left ? mesh.facetLeftSide(f) : mesh.facetRightSide(f);
+                facetOfSide[3 * t + side] = f;
+            }
+        }
+        List<List<FacetEffect>> effects = new ArrayList<>();
+        for (int f = 0; f < mesh.facetCount(); f++) {
+            effects.add(List.of());
+        }
+        for (FacetEffect effect : balance.facetEffects()) {
+            for (int f : effect.facets()) {
+                List<FacetEffect> more = new ArrayList<>(effects.get(f));
+                more.add(effect);
+                effects.set(f, more);
+            }
+        }
+        for (int t = 0; t < mesh.triangleCount(); t++) {
+            for (int side = 0; side < 3; side++) {
+                int neighbour = mesh.neighbour(t, side);
+                if (neighbour > t) {
+                    interiorSide(t, side, neighbour);
+                } else if (neighbour == Mesh.NONE) {
+                    int f = facetOfSide[3 * t + side];
+                    if (balance.fixed().edgeOf(f) < 0) {
+                        boundarySide(t, side, effects.get(f));
+                    }
+                }
+            }
+        }
+    }
+
+    private void interiorSide(int t, int side, int neighbour) {
+        int back = 0;
+        while (mesh.neighbour(neighbour, back) != t) {
+            back++;
+        }
+        int a = mesh.node(t, (side + 1) % 3);
+        int b = mesh.node(t, (side + 2) % 3);
+        double dx = mesh.x(b) - mesh.x(a);
+        double dy = mesh.y(b) - mesh.y(a);
+        // The jump is linear along the side: its square integrates to length·(j₀² + j₀j₁ + j₁²)/3. The normals are as
+        // long as
+        // the side, which puts in the two factors of length that the indicator has.
+        double j0 = normal(t, (side + 1) % 3, dx, dy) - normal(neighbour, (back + 2) % 3, dx, dy);
+        double j1 = normal(t, (side + 2) % 3, dx, dy) - normal(neighbour, (back + 1) % 3, dx, dy);
+        double k = mean(balance.conduction().tensor(mesh.region(t)))
+                + mean(balance.conduction().tensor(mesh.region(neighbour)));
+        double square = (j0 * j0 + j0 * j1 + j1 * j1) / 3 / k;
+        squared[t] += 0.5 * square;
+        squared[neighbour] += 0.5 * square;
+    }
+
+    private void boundarySide(int t, int side, List<FacetEffect> effects) {
+        int start = (side + 1) % 3;
+        int end = (side + 2) % 3;
+        int a = mesh.node(t, start);
+        int b = mesh.node(t, end);
+        double dx = mesh.x(b) - mesh.x(a);
+        double dy = mesh.y(b) - mesh.y(a);
+        double length = Math.hypot(dx, dy);
+        double q0 = normal(t, start, dx, dy) / length;
+        double q1 = normal(t, end, dx, dy) / length;
+        SideShape shape = SideShape.of(mesh.nodesPerTriangle());
+        double sum = 0;
+        for (int p = 0; p < shape.pointCount(); p++) {
+            double s = shape.point(p);
+            double kelvin = field.inside(
+                    t,
+                    start == 0 ? 1 - s : end == 0 ? s : 0,
+                    start == 1 ? 1 - s : end == 1 ? s : 0,
+                    start == 2 ? 1 - s : end == 2 ? s : 0);
+            double residual = (1 - s) * q0 + s * q1;
+            for (FacetEffect effect : effects) {
+                residual -= effect.outwardFlux(kelvin);
+            }
+            sum += shape.weight(p) * residual * residual;
+        }
+        squared[t] += sum * length * length / mean(balance.conduction().tensor(mesh.region(t)));
+    }
+
+    /** Flux at a corner times the outward normal of a counter-clockwise side (dx, dy), not made a unit: W/m. */
+    private double normal(int t, int corner, double dx, double dy) {
+        return flux[6 * t + 2 * corner] * dy - flux[6 * t + 2 * corner + 1] * dx;
+    }
+}

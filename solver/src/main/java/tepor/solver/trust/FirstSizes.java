@@ -1,0 +1,61 @@
+package tepor.solver.trust;
+
+import java.util.List;
+import org.locationtech.jts.geom.Envelope;
+import org.locationtech.jts.index.strtree.STRtree;
+import tepor.mesher.refinement.SizeField;
+import tepor.solver.model.Case;
+
+/**
+ * Sizes of the first mesh, from the section alone: a base size everywhere, shrinking towards the points where the flux is
+ * expected to vary without limit.
+ */
+public final class FirstSizes implements SizeField {
+    /** About so many triangles would fill the section at the base size. */
+    private static final double TRIANGLES_LINEAR = 1500;
+
+    private static final double TRIANGLES_QUADRATIC = 500;
+
+    /** Growth of the size with the distance from a singular point. */
+    private static final double GRADATION = 0.4;
+
+    /** Size at a singular point, relative to its clearance. */
+    private static final double TIP = 0.1;
+
+    /** Many singular points, as of a grid of bars, are met by the adaptive rounds; the first mesh stays small. */
+    private static final int MANY = 300;
+
+    private final double base;
+    private final double tip;
+    private final STRtree tree = new STRtree();
+
+    public FirstSizes(Case subject) {
+        double area = 0;
+        for (int r = 0; r < subject.section().regionCount(); r++) {
+            if (!subject.section().isHole(r)) {
+                area += subject.section().area(r);
+            }
+        }
+        double count = subject.mesh().nodesPerTriangle() == 3 ? TRIANGLES_LINEAR : TRIANGLES_QUADRATIC;
+        base = Math.sqrt(4 / Math.sqrt(3) * area / count);
+        List<SingularPoints.Point> points = SingularPoints.of(subject);
+        tip = points.size() > MANY ? 5 * TIP : TIP;
+        for (SingularPoints.Point point : points) {
+            double reach = base / GRADATION;
+            tree.insert(
+                    new Envelope(point.x() - reach, point.x() + reach, point.y() - reach, point.y() + reach), point);
+        }
+        tree.build();
+    }
+
+    @Override
+    public double at(double x, double y) {
+        double size = base;
+        for (Object item : tree.query(new Envelope(x, x, y, y))) {
+            SingularPoints.Point point = (SingularPoints.Point) item;
+            double distance = Math.hypot(x - point.x(), y - point.y());
+            size = Math.min(size, tip * point.clearance() + GRADATION * distance);
+        }
+        return size;
+    }
+}
