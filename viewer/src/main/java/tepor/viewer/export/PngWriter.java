@@ -2,9 +2,7 @@ package tepor.viewer.export;
 
 import java.awt.Graphics2D;
 import java.awt.image.BufferedImage;
-import java.io.ByteArrayOutputStream;
 import java.io.IOException;
-import java.io.OutputStream;
 import java.nio.file.Path;
 import javax.imageio.ImageIO;
 import tepor.viewer.picture.Picture;
@@ -15,17 +13,6 @@ public final class PngWriter {
 
     /** Writes a picture, whole or not at all. */
     public static void write(Picture picture, Path file) throws IOException {
-        WholeFile.write(file, out -> write(picture, out));
-    }
-
-    /** A picture as a file of this name, ready to be written or set into a report. */
-    public static PictureFile file(Picture picture, String name) throws IOException {
-        ByteArrayOutputStream out = new ByteArrayOutputStream(1 << 18);
-        write(picture, out);
-        return new PictureFile(name, "image/png", picture.description(), out.toByteArray());
-    }
-
-    private static void write(Picture picture, OutputStream out) throws IOException {
         BufferedImage image = new BufferedImage(picture.width(), picture.height(), BufferedImage.TYPE_INT_RGB);
         Graphics2D g = image.createGraphics();
         try {
@@ -34,8 +21,10 @@ public final class PngWriter {
             g.dispose();
         }
         ImageIO.setUseCache(false); // else each picture goes through a temporary file
-        if (!ImageIO.write(image, "png", out)) {
-            throw new IOException("this Java cannot write PNG");
-        }
+        WholeFile.write(file, out -> {
+            if (!ImageIO.write(image, "png", out)) {
+                throw new IOException("this Java cannot write PNG");
+            }
+        });
     }
 }

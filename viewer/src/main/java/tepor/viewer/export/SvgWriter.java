@@ -1,11 +1,8 @@
 package tepor.viewer.export;
 
 import java.awt.Dimension;
-import java.io.ByteArrayOutputStream;
 import java.io.IOException;
-import java.io.OutputStream;
-import java.io.OutputStreamWriter;
-import java.io.Writer;
+import java.io.StringWriter;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import org.apache.batik.dom.GenericDOMImplementation;
@@ -25,17 +22,6 @@ public final class SvgWriter {
 
     /** Writes a picture, whole or not at all. */
     public static void write(Picture picture, Path file) throws IOException {
-        WholeFile.write(file, out -> write(picture, out));
-    }
-
-    /** A picture as a file of this name, ready to be written or set into a report. */
-    public static PictureFile file(Picture picture, String name) throws IOException {
-        ByteArrayOutputStream out = new ByteArrayOutputStream(1 << 17);
-        write(picture, out);
-        return new PictureFile(name, "image/svg+xml", picture.description(), out.toByteArray());
-    }
-
-    private static void write(Picture picture, OutputStream out) throws IOException {
         Document document = GenericDOMImplementation.getDOMImplementation().createDocument(NAMESPACE, "svg", null);
         SVGGeneratorContext context = SVGGeneratorContext.createDefault(document);
         context.setPrecision(DECIMALS);
@@ -48,8 +34,19 @@ public final class SvgWriter {
         Element title = document.createElementNS(NAMESPACE, "title");
         title.appendChild(document.createTextNode(picture.description()));
         root.insertBefore(title, root.getFirstChild());
-        Writer writer = new OutputStreamWriter(out, StandardCharsets.UTF_8);
-        g.stream(root, writer, true, false);
-        writer.flush();
+        StringWriter text = new StringWriter();
+        g.stream(root, text, true, false);
+        byte[] bytes = finish(text.toString()).getBytes(StandardCharsets.UTF_8);
+        WholeFile.write(file, out -> out.write(bytes));
+    }
+
+    /**
+     * Leaves out the document type, for which some readers would go to the network, and names a substitute where the font
+     * of the pictures is not at hand.
+     */
+    private static String finish(String svg) {
+        return "<?xml version=\"1.0\" encoding=\"UTF-8\"?>\n"
+                + svg.substring(svg.indexOf("<svg"))
+                        .replace("font-family:'DejaVu Sans';", "font-family:'DejaVu Sans', sans-serif;");
     }
 }
