@@ -2,9 +2,11 @@ package tepor.viewer.command;
 
 import java.io.IOException;
 import java.nio.file.Path;
+import java.util.EnumSet;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.concurrent.Callable;
 import java.util.concurrent.CancellationException;
 import java.util.function.BooleanSupplier;
@@ -18,9 +20,14 @@ import tepor.solver.answer.Answer;
 import tepor.solver.answer.AskAnswer;
 import tepor.solver.answer.Verdict;
 import tepor.solver.model.Case;
+import tepor.viewer.picture.PictureOptions;
 
 /** {@code tepor answer}. */
-@Command(name = "answer", description = "Answer cases: print the answers, and write them with a report and pictures.")
+@Command(
+        name = "answer",
+        mixinStandardHelpOptions = true,
+        versionProvider = TeporCommand.VersionText.class,
+        description = "Answer cases: print the answers, and write them with a report and pictures.")
 final class AnswerCommand implements Callable<Status> {
     @Parameters(
             arity = "1..*",
@@ -110,7 +117,7 @@ final class AnswerCommand implements Callable<Status> {
     /** Writes the files, and says where they are. */
     private void write(Answer answer) throws IOException {
         Path folder = folder(answer.subject());
-        List<String> files = new AnswerFiles(answer, new AnswerFiles.Choice(mesh, flux)).write(folder, stopped);
+        List<String> files = new AnswerFiles(answer, layers()).write(folder, stopped);
         terminal.out().println();
         terminal.out().println("Written to " + folder + ": " + String.join(", ", files));
         if (system != null) {
@@ -118,6 +125,17 @@ final class AnswerCommand implements Callable<Status> {
             terminal.out().println("Equations: " + system + ".mtx, " + system + "_rhs.mtx");
         }
         terminal.out().flush();
+    }
+
+    private Set<PictureOptions.Layer> layers() {
+        Set<PictureOptions.Layer> layers = EnumSet.noneOf(PictureOptions.Layer.class);
+        if (mesh) {
+            layers.add(PictureOptions.Layer.MESH);
+        }
+        if (flux) {
+            layers.add(PictureOptions.Layer.FLUX);
+        }
+        return layers;
     }
 
     private Answer compute(Case subject) {

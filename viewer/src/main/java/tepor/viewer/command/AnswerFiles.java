@@ -3,25 +3,26 @@ package tepor.viewer.command;
 import java.io.IOException;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Set;
 import java.util.concurrent.CancellationException;
 import java.util.function.BooleanSupplier;
 import tepor.solver.answer.Answer;
 import tepor.viewer.export.AnswerJson;
+import tepor.viewer.export.AnswerPictures;
 import tepor.viewer.export.OutputFolder;
 import tepor.viewer.export.PictureFile;
+import tepor.viewer.picture.PictureOptions;
 import tepor.viewer.report.Report;
 
 /** The files of one answer. */
 final class AnswerFiles {
     private final Answer answer;
-    private final Choice choice;
+    private final Set<PictureOptions.Layer> layers;
 
-    /** What the pictures show besides isotherms. */
-    record Choice(boolean mesh, boolean flux) {}
-
-    AnswerFiles(Answer answer, Choice choice) {
+    /** @param layers what the pictures show besides isotherms */
+    AnswerFiles(Answer answer, Set<PictureOptions.Layer> layers) {
         this.answer = answer;
-        this.choice = choice;
+        this.layers = layers;
     }
 
     /**
@@ -32,12 +33,9 @@ final class AnswerFiles {
      */
     List<String> write(Path folder, BooleanSupplier stopped) throws IOException {
         try (OutputFolder output = OutputFolder.begin(folder)) {
-            List<PictureFile> pictures = List.of();
             output.write("answers.json", out -> AnswerJson.write(answer, out));
-            output.write("report.html", out -> Report.write(answer, pictures, out));
-            for (PictureFile picture : pictures) {
-                output.write(picture.name(), out -> out.write(picture.bytes()));
-            }
+            PictureFile isotherms = AnswerPictures.write(answer, output, layers);
+            output.write("report.html", out -> Report.write(answer, List.of(isotherms), out));
             if (stopped.getAsBoolean()) {
                 throw new CancellationException();
             }

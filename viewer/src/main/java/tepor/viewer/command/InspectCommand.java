@@ -14,6 +14,8 @@ import tepor.viewer.export.InspectionJson;
 /** {@code tepor inspect}. */
 @Command(
         name = "inspect",
+        mixinStandardHelpOptions = true,
+        versionProvider = TeporCommand.VersionText.class,
         description = "Check and mesh a case, solve nothing: print regions, edges, what is insulated, and the mesh.")
 final class InspectCommand implements Callable<Status> {
     @Parameters(paramLabel = "CASE", description = "A case file, or a folder that holds a case.toml.")

@@ -8,6 +8,7 @@ import tepor.viewer.export.Version;
 /** The command itself, which only gathers its subcommands. */
 @Command(
         name = "tepor",
+        mixinStandardHelpOptions = true,
         versionProvider = TeporCommand.VersionText.class,
         header = "Temperatures and heat flows of a long part's cross-section, each with its interval.",
         synopsisSubcommandLabel = "(answer | inspect)",
@@ -21,19 +22,6 @@ import tepor.viewer.export.Version;
             "judgement of a licensed engineer."
         })
 final class TeporCommand {
-    @Option(
-            names = {"-h", "--help"},
-            usageHelp = true,
-            scope = picocli.CommandLine.ScopeType.INHERIT,
-            description = "Print this help and end.")
-    private boolean help;
-
-    @Option(
-            names = {"-V", "--version"},
-            versionHelp = true,
-            description = "Print the version and end.")
-    private boolean version;
-
     @Option(
             names = "--debug",
             hidden = true,

@@ -2,8 +2,7 @@ package tepor.viewer.export;
 
 import java.awt.Dimension;
 import java.io.IOException;
-import java.io.OutputStreamWriter;
-import java.io.Writer;
+import java.io.StringWriter;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import org.apache.batik.dom.GenericDOMImplementation;
@@ -35,10 +34,19 @@ public final class SvgWriter {
         Element title = document.createElementNS(NAMESPACE, "title");
         title.appendChild(document.createTextNode(picture.description()));
         root.insertBefore(title, root.getFirstChild());
-        WholeFile.write(file, out -> {
-            Writer writer = new OutputStreamWriter(out, StandardCharsets.UTF_8);
-            g.stream(root, writer, true, false);
-            writer.flush();
-        });
+        StringWriter text = new StringWriter();
+        g.stream(root, text, true, false);
+        byte[] bytes = finish(text.toString()).getBytes(StandardCharsets.UTF_8);
+        WholeFile.write(file, out -> out.write(bytes));
+    }
+
+    /**
+     * Leaves out the document type, for which some readers would go to the network, and names a substitute where the font
+     * of the pictures is not at hand.
+     */
+    private static String finish(String svg) {
+        return "<?xml version=\"1.0\" encoding=\"UTF-8\"?>\n"
+                + svg.substring(svg.indexOf("<svg"))
+                        .replace("font-family:'DejaVu Sans';", "font-family:'DejaVu Sans', sans-serif;");
     }
 }

@@ -126,6 +126,15 @@ final class AskMarkers {
         return new Ellipse2D.Double(x - a, y - a, 2 * a, 2 * a);
     }
 
+    private double widestTag() {
+        return Ink.tagWidth(String.valueOf(asks.size()), font);
+    }
+
+    /** Room for a tag and a marker. */
+    private double indent() {
+        return widestTag() + 1.8 * font.getSize2D();
+    }
+
     /** The list of all asks. */
     EntryList list() {
         List<EntryList.Entry> entries = new ArrayList<>();
@@ -141,15 +150,15 @@ final class AskMarkers {
             }
             entries.add(new EntryList.Entry(
                     (g, x, y) -> {
-                        Ink.tag(g, number, x - (answer.where() == null ? 0 : 0.62 * font.getSize2D()), y, font, false);
+                        Ink.tag(g, number, x - (indent() - widestTag()) / 2 + 0.1 * font.getSize2D(), y, font, false);
                         if (answer.where() != null) {
-                            paintMarker(g, answer.ask(), x + 0.78 * font.getSize2D(), y);
+                            paintMarker(g, answer.ask(), x + indent() / 2 - 0.75 * font.getSize2D(), y);
                         }
                     },
                     answer.ask().name(),
                     details,
                     bad ? verdict : ""));
         }
-        return new EntryList("", entries, font, 3.1 * font.getSize2D());
+        return new EntryList("", entries, font, indent());
     }
 }

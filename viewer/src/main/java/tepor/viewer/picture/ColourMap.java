@@ -21,9 +21,12 @@ public final class ColourMap {
         return new Color(channel(RED, t), channel(GREEN, t), channel(BLUE, t));
     }
 
+    /** Bands begin here: the map's darkest blues leave neither lines nor ink room to show. */
+    private static final double COLDEST = 0.16;
+
     /** Colour of a band among so many. */
     public static Color ofBand(int band, int bandCount) {
-        return at(bandCount == 1 ? 0.75 : band / (bandCount - 1.0));
+        return at(bandCount == 1 ? 0.75 : COLDEST + (1 - COLDEST) * band / (bandCount - 1.0));
     }
 
     /** CIELAB lightness L* of a colour (sRGB, white D65), 0 to 100. CIE 15:2004, 8.2.1; IEC 61966-2-1. */

@@ -34,7 +34,10 @@ public final class FigureText {
 
     /** A unit as it is printed: {@code W/(m2.K)} becomes W/(m²·K). */
     public static String unit(String unit) {
-        return unit.replace("deg", "°").replace('.', '·').replace("m2", "m²").replace("m3", "m³");
+        return unit.replace("deg", "°")
+                .replaceAll("\\.(?=[A-Za-z(])", "·")
+                .replace("m2", "m²")
+                .replace("m3", "m³");
     }
 
     /** Value, mesh error and unit of an answer: "96.37 ± 0.05 °C". */
@@ -42,8 +45,8 @@ public final class FigureText {
         double value = Units.fromSi(answer.value(), answer.unit(), answer.dimension());
         double error = halfWidth(answer);
         String unit = answer.unit().isEmpty() ? "" : " " + unit(answer.unit());
-        if (!Double.isFinite(error)) {
-            return significant(value, 4) + unit;
+        if (!Double.isFinite(error) || error == 0) {
+            return significant(value, 6) + unit;
         }
         int decimals = decimals(error, value);
         double shown = Math.ceil(error * Math.pow(10, decimals) - 1e-9) / Math.pow(10, decimals);
@@ -79,14 +82,11 @@ public final class FigureText {
         return Double.isFinite(si) ? Math.abs(Units.fromSi(si, answer.unit(), dimension)) : si;
     }
 
-    /** Two significant digits of an error that begins with 1 or 2, else one; at most seven digits of the value. */
+    /** Two significant digits of an error (JCGM 100:2008, 7.2.6); at most nine digits of the value. */
     private static int decimals(double error, double value) {
-        int most = 6 - (int) Math.floor(Math.log10(Math.max(Math.abs(value), 1e-6)));
-        if (error == 0) {
-            return Math.max(0, Math.min(most, 4));
-        }
+        int most = 8 - (int) Math.floor(Math.log10(Math.max(Math.abs(value), 1e-6)));
         int magnitude = (int) Math.floor(Math.log10(error));
-        boolean smallLead = error / Math.pow(10, magnitude) < 3;
-        return Math.max(0, Math.min(most, (smallLead ? 1 : 0) - magnitude));
+
+        return Math.max(0, Math.min(most, 1 - magnitude));
     }
 }

@@ -21,7 +21,7 @@ final class FluxArrows {
 
     private final List<Arrow> arrows = new ArrayList<>();
     private final double spacing;
-    private final double greatest;
+    private double greatest;
 
     /** @param spacing of the arrows, px */
     FluxArrows(TemperatureField field, Case subject, SectionView view, double spacing) {
@@ -130,21 +130,28 @@ final class FluxArrows {
         return true;
     }
 
-    void paint(Graphics2D g) {
+    /** The same arrows at the scale of others, whose values stand in the key. */
+    FluxArrows atScaleOf(FluxArrows others) {
+        greatest = others.greatest;
+        return this;
+    }
+
+    /** Draws the arrows but for those that would cross a figure. */
+    void paint(Graphics2D g, List<LineLabels.Label> labels) {
         Path2D path = new Path2D.Double();
         for (Arrow a : arrows) {
             double q = Math.hypot(a.qx(), a.qy());
             double length = length(q);
-            if (length > 0.08 * spacing) {
+            if (length > 0.12 * spacing && labels.stream().noneMatch(l -> l.covers(a.x(), a.y(), 0.35 * spacing))) {
                 append(path, a.x(), a.y(), a.qx() / q, -a.qy() / q, length);
             }
         }
-        Ink.draw(g, path, Ink.PAPER, 0.085 * spacing);
+        Ink.draw(g, path, Ink.PAPER, 0.09 * spacing);
         Ink.draw(g, path, Ink.DARK, 0.042 * spacing);
     }
 
     private double length(double q) {
-        return greatest == 0 ? 0 : 0.92 * spacing * Math.sqrt(q / greatest);
+        return greatest == 0 ? 0 : 1.1 * spacing * Math.sqrt(q / greatest);
     }
 
     /** An arrow about its middle. */

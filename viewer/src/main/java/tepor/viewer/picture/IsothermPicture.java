@@ -8,6 +8,7 @@ import java.awt.geom.Path2D;
 import java.util.ArrayList;
 import java.util.List;
 import tepor.solver.answer.Answer;
+import tepor.solver.field.TemperatureField;
 import tepor.viewer.picture.LineLabels.Label;
 import tepor.viewer.picture.PictureOptions.Layer;
 import tepor.viewer.picture.contour.Isotherm;
@@ -57,11 +58,11 @@ public final class IsothermPicture implements Picture {
         double aspect = (box[2] - box[0]) / (box[3] - box[1]);
         Sheet draft = sheet(aspect, keys(new KeyRow(font), null, 1e3, unit));
         SectionView draftView = new SectionView(answer.subject().section(), draft.view, unit);
-        arrows =
-                options.has(Layer.FLUX) ? new FluxArrows(answer.field(), answer.subject(), draftView, 46 * unit) : null;
-        keys = keys(new KeyRow(font), arrows, draftView.scale(), unit);
+        FluxArrows draftArrows = arrows(draftView, unit);
+        keys = keys(new KeyRow(font), draftArrows, draftView.scale(), unit);
         sheet = sheet(aspect, keys);
         view = new SectionView(answer.subject().section(), sheet.view, unit);
+        arrows = draftArrows == null ? null : arrows(view, unit).atScaleOf(draftArrows);
 
         isotherms = Isotherms.of(answer.field(), scale, TOLERANCE / view.scale());
         for (Isotherm line : isotherms.lines()) {
@@ -69,6 +70,10 @@ public final class IsothermPicture implements Picture {
         }
         markers.place(view, sheet.frame);
         labels = options.has(Layer.LINES) ? placeLabels(scale, font, unit) : List.of();
+    }
+
+    private FluxArrows arrows(SectionView in, double unit) {
+        return options.has(Layer.FLUX) ? new FluxArrows(answer.field(), answer.subject(), in, 50 * unit) : null;
     }
 
     private Sheet sheet(double aspect, KeyRow row) {
@@ -123,7 +128,7 @@ public final class IsothermPicture implements Picture {
         view.paintOutline(g);
         paintBands(g);
         if (options.has(Layer.MESH)) {
-            view.paintMesh(g, answer.field().mesh());
+            paintMesh(g);
         }
         if (options.has(Layer.LINES)) {
             paintLines(g);
@@ -131,7 +136,7 @@ public final class IsothermPicture implements Picture {
         view.paintBorders(g);
         view.paintInsulated(g, answer.insulated().pieces());
         if (arrows != null) {
-            arrows.paint(g);
+            arrows.paint(g, labels);
         }
         markers.paint(g);
         if (sheet.beside) {
@@ -150,6 +155,19 @@ public final class IsothermPicture implements Picture {
         for (int i = 0; filled && i < isotherms.areas().size(); i++) {
             Ink.fill(g, view.shape(isotherms.areas().get(i)), ColourMap.ofBand(i + 1, bands));
         }
+    }
+
+    /** In the ink that stands out from the bands. */
+    private void paintMesh(Graphics2D g) {
+        TemperatureScale scale = isotherms.scale();
+        double switching = Double.NEGATIVE_INFINITY;
+        for (int i = 0; i < scale.count() && ink(i).equals(Ink.LIGHT); i++) {
+            switching = scale.kelvin(i);
+        }
+        double from = switching;
+        TemperatureField field = answer.field();
+        view.paintMesh(g, field.mesh(), Ink.LIGHT, (a, b) -> field.at(a) + field.at(b) < 2 * from);
+        view.paintMesh(g, field.mesh(), Ink.DARK, (a, b) -> field.at(a) + field.at(b) >= 2 * from);
     }
 
     private void paintLines(Graphics2D g) {

@@ -26,7 +26,14 @@ final class LineLabels {
      * @param y centre
      * @param angle to be read at, radians, clockwise on the page, within ±90°
      */
-    record Label(int line, int level, String text, double from, double to, double x, double y, double angle) {}
+    record Label(int line, int level, String text, double from, double to, double x, double y, double angle) {
+        /** Whether a point is nearer to the figure than a distance. */
+        boolean covers(double px, double py, double distance) {
+            double along = (px - x) * Math.cos(angle) + (py - y) * Math.sin(angle);
+            double across = (py - y) * Math.cos(angle) - (px - x) * Math.sin(angle);
+            return Math.abs(along) < 0.5 * (to - from) + distance && Math.abs(across) < 0.25 * (to - from) + distance;
+        }
+    }
 
     /** Farthest that a line may stray from the middle of its figure, as part of the figure's height. */
     private static final double STRAY = 0.16;

@@ -161,6 +161,9 @@ final class SectionView {
             for (Chain chain : SegmentChains.lines(section, segments)) {
                 Ink.append(path, points(chain), chain.closed());
             }
+            if (thinner > 14 * unit) { // a pale seam makes the line stand out from dark bands
+                Ink.draw(g, path, new Color(0xF4, 0xF1, 0xE6, 110), width + 2.2 * unit);
+            }
             Ink.draw(g, path, Ink.DARK, width);
         });
     }
@@ -222,21 +225,30 @@ final class SectionView {
                 false);
     }
 
-    /** Draws every side of a mesh once. */
-    void paintMesh(Graphics2D g, Mesh mesh) {
+    /** Chooses sides of a mesh by the nodes at their ends. */
+    @FunctionalInterface
+    interface Sides {
+        boolean has(int nodeA, int nodeB);
+    }
+
+    /** Draws the chosen sides of a mesh, each once. */
+    void paintMesh(Graphics2D g, Mesh mesh, Color colour, Sides chosen) {
         Path2D path = new Path2D.Double();
         for (int t = 0; t < mesh.triangleCount(); t++) {
             for (int i = 0; i < 3; i++) {
                 if (mesh.neighbour(t, i) < t) {
                     int a = mesh.node(t, (i + 1) % 3);
                     int b = mesh.node(t, (i + 2) % 3);
-                    path.moveTo(x(mesh.x(a)), y(mesh.y(a)));
-                    path.lineTo(x(mesh.x(b)), y(mesh.y(b)));
+                    if (chosen.has(a, b)) {
+                        path.moveTo(x(mesh.x(a)), y(mesh.y(a)));
+                        path.lineTo(x(mesh.x(b)), y(mesh.y(b)));
+                    }
                 }
             }
         }
         double typical = Math.sqrt(2 * area() / Math.max(1, mesh.triangleCount()));
-        Ink.draw(g, path, new Color(0x1F, 0x24, 0x2B, 120), Math.min(0.9 * unit, 0.06 * typical));
+        Color pale = new Color(colour.getRed(), colour.getGreen(), colour.getBlue(), 105);
+        Ink.draw(g, path, pale, Math.min(0.9 * unit, 0.06 * typical));
     }
 
     /** Of the material, px². */

@@ -41,13 +41,18 @@ final class SegmentChains {
         return join(section, from, to, segment, count, true);
     }
 
-    /** Lines along these segments, in their own direction; they end where more than two meet. */
+    /**
+     * Lines along these segments; they end where more than two meet. Material lies on their left, on a border the region of
+     * the lower number.
+     */
     static List<Chain> lines(Section section, int[] segments) {
         int[] from = new int[segments.length];
         int[] to = new int[segments.length];
         for (int i = 0; i < segments.length; i++) {
-            from[i] = section.start(segments[i]);
-            to[i] = section.end(segments[i]);
+            int s = segments[i];
+            boolean kept = section.isBoundary(s) ? section.solidLeft(s) : section.left(s) < section.right(s);
+            from[i] = kept ? section.start(s) : section.end(s);
+            to[i] = kept ? section.end(s) : section.start(s);
         }
         return join(section, from, to, segments, segments.length, false);
     }

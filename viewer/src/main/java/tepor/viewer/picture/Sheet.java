@@ -19,6 +19,7 @@ final class Sheet {
     private static final double PAD = 46;
 
     private static final double LIST_COLUMN = 400;
+    private static final double LONGEST_LIST = 800;
     private static final double TALLEST_VIEW = 1320;
 
     final double unit;
@@ -64,11 +65,14 @@ final class Sheet {
         this.title = EntryList.wrap(title, titleFont, inner, 2);
         double top = margin + this.title.size() * 42 * unit + 14 * unit;
 
-        double side = LIST_COLUMN * unit;
+        double pad = PAD * unit;
+        double narrow = TALLEST_VIEW * unit * aspect + 2 * pad + 2.5 * pad; // all that a tall section needs, with tags
+        double side = Math.max(LIST_COLUMN * unit, Math.min(LONGEST_LIST * unit, inner - GAP * unit - narrow));
         double listBeside = list.height(side, 1);
         double sideHeight = legendUpright + (listBeside > 0 && legendUpright > 0 ? GAP * unit : 0) + listBeside;
         double viewBeside = inner - side - GAP * unit;
-        beside = aspect < 2.1 && sideHeight < 1250 * unit && sideHeight > 0;
+        double natural = Math.min((viewBeside - 2 * pad) / aspect, TALLEST_VIEW * unit) + 2 * pad;
+        beside = aspect < 2.1 && sideHeight < Math.max(1.35 * natural, 640 * unit) && sideHeight > 0;
         double viewWidth = beside ? viewBeside : inner;
         double keysHeight = keys.height(viewWidth);
 
@@ -78,14 +82,11 @@ final class Sheet {
                 ? 0
                 : (legendFlat > 0 ? legendFlat + GAP * unit : 0)
                         + (list.isEmpty() ? 0 : list.height(listWidth, listColumns) + GAP * unit);
-        double pad = PAD * unit;
         double wanted = Math.min((viewWidth - 2 * pad) / aspect, TALLEST_VIEW * unit) + 2 * pad;
-        if (beside) {
-            wanted = Math.max(wanted, Math.min(sideHeight, 1250 * unit) - keysHeight);
-        }
         double around = top + keysHeight + below + margin;
         double viewHeight = options.height() == 0 ? wanted : Math.max(140 * unit, options.height() - around);
-        height = options.height() == 0 ? (int) Math.ceil(around + viewHeight) : options.height();
+        double tallest = Math.max(around + viewHeight, beside ? top + sideHeight + margin : 0);
+        height = options.height() == 0 ? (int) Math.ceil(tallest) : options.height();
 
         frame = new Rectangle2D.Double(margin, top, viewWidth, viewHeight);
         view = new Rectangle2D.Double(margin + pad, top + pad, viewWidth - 2 * pad, viewHeight - 2 * pad);

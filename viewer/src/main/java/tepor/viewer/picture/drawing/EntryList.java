@@ -90,7 +90,7 @@ public final class EntryList {
             if (g != null) {
                 double left = x + column * (columnWidth + gap);
                 double at = y + top + used;
-                entry.symbol().paint(g, left + indent / 2 - 0.15 * font.getSize2D(), at + 0.64 * font.getSize2D());
+                entry.symbol().paint(g, left + indent / 2, at + 0.64 * font.getSize2D());
                 for (String[] text : lines) {
                     at += line;
                     Ink.text(

@@ -30,6 +30,17 @@ public final class OccupancyGrid {
         state = new int[columns * rows];
     }
 
+    private OccupancyGrid(OccupancyGrid other) {
+        cell = other.cell;
+        columns = other.columns;
+        rows = other.rows;
+        state = other.state.clone();
+    }
+
+    public OccupancyGrid copy() {
+        return new OccupancyGrid(this);
+    }
+
     /** Takes everything outside a shape. */
     public void takeOutside(Shape shape) {
         BufferedImage image = new BufferedImage(columns, rows, BufferedImage.TYPE_BYTE_GRAY);
@@ -96,6 +107,11 @@ public final class OccupancyGrid {
      */
     public boolean isFree(double x, double y, double halfWidth, double halfHeight, double angle, int owner) {
         return visit(x, y, halfWidth, halfHeight, angle, owner + 1, false);
+    }
+
+    /** Whether a turned rectangle is free for anyone. */
+    public boolean isFree(double x, double y, double halfWidth, double halfHeight, double angle) {
+        return visit(x, y, halfWidth, halfHeight, angle, FREE, false);
     }
 
     /** Takes a turned rectangle. */
