@@ -252,7 +252,11 @@ public final class OutlinePicture implements Picture {
             for (Chain chain : SegmentChains.lines(subject.section(), segments)) {
                 Ink.append(path, view.points(chain), chain.closed());
             }
-            EdgeStyle.draw(g, path, e, (onBoundary ? 2 : 0.8) * EDGE * sheet.unit);
+            if (onBoundary) {
+                EdgeStyle.drawHalf(g, path, e, EDGE * sheet.unit);
+            } else {
+                EdgeStyle.draw(g, path, e, 0.8 * EDGE * sheet.unit);
+            }
         }
     }
 
