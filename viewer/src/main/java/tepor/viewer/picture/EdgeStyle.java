@@ -31,7 +31,9 @@ final class EdgeStyle {
     }
 
     private static void draw(Graphics2D g, Shape line, int i, double width, double dashUnit) {
-        Ink.draw(g, line, Ink.PAPER, 1.7 * width);
+        g.setColor(Ink.PAPER);
+        g.setStroke(new BasicStroke((float) (1.7 * width), BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND));
+        g.draw(line);
         float[] dash = DASHES[i % DASHES.length].clone();
         for (int k = 0; k < dash.length; k++) {
             dash[k] *= (float) dashUnit;
