@@ -1,21 +1,34 @@
 package tepor.mesher.mesh;
 
 import java.util.function.BooleanSupplier;
+import tepor.mesher.refinement.RefinementOptions;
+import tepor.mesher.refinement.RefinementReport;
+import tepor.mesher.refinement.SectionRefiner;
 import tepor.mesher.section.Section;
+import tepor.mesher.triangulation.Predicates;
+import tepor.mesher.triangulation.SectionTriangulator;
+import tepor.mesher.triangulation.Triangulation;
 
 /** Makes the mesh of a section. */
 public final class Mesher {
     private Mesher() {}
 
     /**
-     * Meshes a section.
+     * Meshes a section. The same section and options give the same mesh to the last bit.
      *
      * @param section the section
      * @param options what is asked of the mesh
      * @param stopped asked now and then whether to stop
+     * @throws IllegalArgumentException if the section breaks its contract, or the options make no sense
      * @throws java.util.concurrent.CancellationException if told to stop
      */
     public static MeshResult mesh(Section section, MeshOptions options, BooleanSupplier stopped) {
-        throw new IllegalStateException("not joined yet");
+        RefinementOptions refinement =
+                new RefinementOptions(options.smallestAngle(), options.size(), options.trianglesAtMost());
+        Predicates predicates = new Predicates();
+        Triangulation triangulation = SectionTriangulator.triangulate(section, predicates);
+        RefinementReport report = SectionRefiner.refine(triangulation, section, refinement, predicates, stopped);
+        Mesh mesh = MeshAssembler.assemble(triangulation, section, options.nodesPerTriangle());
+        return new MeshResult(mesh, QualityMeasure.measure(mesh, section), report);
     }
 }

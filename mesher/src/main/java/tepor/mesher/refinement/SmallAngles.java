@@ -1,0 +1,160 @@
+package tepor.mesher.refinement;
+
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.Comparator;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import tepor.mesher.section.Section;
+
+/**
+ * Where segments of a section meet under less than 60° with material between them.
+ *
+ * <p>There two rules keep refinement from running away: segments are cut at equal distances from the apex, and a sharp
+ * triangle whose shortest side joins both segments at equal distance is left alone. Sources: Ruppert 1995, J. Algorithms
+ * 18:548–585 (shells); Miller, Pav & Walkington 2003, <em>When and why Ruppert's algorithm works</em>, IMR (triangles left
+ * alone). Segments that continue each other straight count as one line.
+ */
+final class SmallAngles {
+    private static final double SMALL = Math.PI / 3 - 1e-9;
+    private static final double STRAIGHT = 1e-6;
+    /** Distances from the apex that differ by less than this part are equal. */
+    private static final double EQUAL = 1e-3;
+
+    private final Section section;
+    private final int[] line;
+    private final int[][] linesAt;
+    private final boolean[] apexAtEnd;
+    private final boolean[] sharpLine;
+    private final Map<Long, Integer> apexOf = new HashMap<>();
+
+    /** A segment as seen from one of its ends. */
+    private record Spoke(int segment, boolean outward, double direction) {}
+
+    SmallAngles(Section section) {
+        this.section = section;
+        int segments = section.segmentCount();
+        line = new int[segments];
+        Arrays.setAll(line, s -> s);
+        apexAtEnd = new boolean[2 * segments];
+        sharpLine = new boolean[segments];
+        linesAt = new int[section.vertexCount()][];
+        List<List<Spoke>> spokes = spokes();
+        spokes.forEach(this::joinStraight);
+        for (int s = 0; s < segments; s++) {
+            line[s] = root(s);
+        }
+        for (int v = 0; v < spokes.size(); v++) {
+            linesAt[v] = spokes.get(v).stream()
+                    .mapToInt(s -> line[s.segment()])
+                    .distinct()
+                    .toArray();
+            findApex(v, spokes.get(v));
+        }
+    }
+
+    /** Whether the segment meets another under a small angle at this vertex of the section. */
+    boolean isApex(int segment, int vertex) {
+        return (section.start(segment) == vertex && apexAtEnd[2 * segment])
+                || (section.end(segment) == vertex && apexAtEnd[2 * segment + 1]);
+    }
+
+    /** Whether the segment, or one that continues it straight, meets another under a small angle at any end. */
+    boolean isSharp(int segment) {
+        return sharpLine[line[segment]];
+    }
+
+    /**
+     * Whether a side joins two lines that meet under a small angle, at equal distances from their apex.
+     *
+     * @param p vertex at one end, pCarrier the segment whose inside it lies on, negative if none
+     */
+    boolean joinsShells(Vertices vertices, int p, int q) {
+        int pSegment = vertices.carrier(p);
+        int qSegment = vertices.carrier(q);
+        if (pSegment == Vertices.FREE || qSegment == Vertices.FREE || apexOf.isEmpty()) {
+            return false;
+        }
+        int pCount = pSegment >= 0 ? 1 : linesAt[p].length;
+        int qCount = qSegment >= 0 ? 1 : linesAt[q].length;
+        for (int i = 0; i < pCount; i++) {
+            int pLine = pSegment >= 0 ? line[pSegment] : linesAt[p][i];
+            for (int j = 0; j < qCount; j++) {
+                int qLine = qSegment >= 0 ? line[qSegment] : linesAt[q][j];
+                Integer apex = pLine == qLine ? null : apexOf.get(pair(pLine, qLine));
+                if (apex != null && apex != p && apex != q && isEqual(vertices, apex, p, q)) {
+                    return true;
+                }
+            }
+        }
+        return false;
+    }
+
+    private static boolean isEqual(Vertices vertices, int apex, int p, int q) {
+        double toP = vertices.distance(apex, p);
+        double toQ = vertices.distance(apex, q);
+        return Math.abs(toP - toQ) <= EQUAL * Math.max(toP, toQ);
+    }
+
+    private List<List<Spoke>> spokes() {
+        List<List<Spoke>> spokes = new ArrayList<>();
+        for (int v = 0; v < section.vertexCount(); v++) {
+            spokes.add(new ArrayList<>(2));
+        }
+        for (int s = 0; s < section.segmentCount(); s++) {
+            if (section.solidLeft(s) || section.solidRight(s)) {
+                int a = section.start(s);
+                int b = section.end(s);
+                double dx = section.x(b) - section.x(a);
+                double dy = section.y(b) - section.y(a);
+                spokes.get(a).add(new Spoke(s, true, Math.atan2(dy, dx)));
+                spokes.get(b).add(new Spoke(s, false, Math.atan2(-dy, -dx)));
+            }
+        }
+        spokes.forEach(list -> list.sort(Comparator.comparingDouble(Spoke::direction)));
+        return spokes;
+    }
+
+    private void joinStraight(List<Spoke> spokes) {
+        for (int i = 0; i < spokes.size(); i++) {
+            for (int j = i + 1; j < spokes.size(); j++) {
+                double turn = spokes.get(j).direction() - spokes.get(i).direction();
+                if (Math.abs(turn - Math.PI) < STRAIGHT) {
+                    line[root(spokes.get(i).segment())] = root(spokes.get(j).segment());
+                }
+            }
+        }
+    }
+
+    private void findApex(int vertex, List<Spoke> spokes) {
+        for (int i = 0; i < spokes.size() && spokes.size() > 1; i++) {
+            Spoke a = spokes.get(i);
+            Spoke b = spokes.get((i + 1) % spokes.size());
+            double turn = b.direction() - a.direction();
+            double angle = turn < 0 ? turn + 2 * Math.PI : turn;
+            // Between a and b, counter-clockwise, lies what is on the left of a seen outward.
+            boolean solid = a.outward() ? section.solidLeft(a.segment()) : section.solidRight(a.segment());
+            if (angle < SMALL && solid) {
+                apexAtEnd[2 * a.segment() + (a.outward() ? 0 : 1)] = true;
+                apexAtEnd[2 * b.segment() + (b.outward() ? 0 : 1)] = true;
+                sharpLine[line[a.segment()]] = true;
+                sharpLine[line[b.segment()]] = true;
+                apexOf.put(pair(line[a.segment()], line[b.segment()]), vertex);
+            }
+        }
+    }
+
+    private int root(int segment) {
+        int r = segment;
+        while (line[r] != r) {
+            r = line[r];
+        }
+        line[segment] = r;
+        return r;
+    }
+
+    private static long pair(int a, int b) {
+        return (long) Math.max(a, b) << 32 | Math.min(a, b);
+    }
+}

@@ -1,0 +1,58 @@
+package tepor.mesher.refinement;
+
+import java.util.Arrays;
+import tepor.mesher.triangulation.Triangulation;
+
+/** What refinement knows of each vertex beside its place: the size wanted there, and the segment it lies on. */
+final class Vertices {
+    /** Lies inside a region. */
+    static final int FREE = -1;
+    /** Is a vertex of the section. */
+    static final int GIVEN = -2;
+
+    private final Triangulation mesh;
+    private final SizeField field;
+    private double[] size;
+    private int[] carrier;
+
+    Vertices(Triangulation mesh, SizeField field) {
+        this.mesh = mesh;
+        this.field = field;
+        int given = mesh.vertexCount();
+        size = new double[2 * given + 16];
+        carrier = new int[2 * given + 16];
+        for (int v = 0; v < given; v++) {
+            note(v, GIVEN);
+        }
+    }
+
+    /** Adds a vertex. */
+    int add(double x, double y, int onSegment) {
+        int v = mesh.addVertex(x, y);
+        if (v == size.length) {
+            size = Arrays.copyOf(size, v + v / 2);
+            carrier = Arrays.copyOf(carrier, v + v / 2);
+        }
+        note(v, onSegment);
+        return v;
+    }
+
+    private void note(int v, int onSegment) {
+        size[v] = field.at(mesh.x(v), mesh.y(v));
+        carrier[v] = onSegment;
+    }
+
+    /** Size wanted at the vertex, metres. */
+    double size(int v) {
+        return size[v];
+    }
+
+    /** Segment inside which the vertex lies; {@link #FREE} or {@link #GIVEN}. */
+    int carrier(int v) {
+        return carrier[v];
+    }
+
+    double distance(int a, int b) {
+        return Math.hypot(mesh.x(b) - mesh.x(a), mesh.y(b) - mesh.y(a));
+    }
+}
