@@ -41,8 +41,8 @@ public final class CaseText {
         Case subject = read(toml);
         Answer answer = Solver.answer(subject, Progress.NONE);
         Mesh mesh = answer.mesh().mesh();
-        if (!MeshCheck.problems(subject.section(), mesh).isEmpty()) {
-            throw new AssertionError(MeshCheck.problems(subject.section(), mesh));
+        if (!MeshCheck.problems(mesh, subject.section()).isEmpty()) {
+            throw new AssertionError(MeshCheck.problems(mesh, subject.section()));
         }
         return answer;
     }

@@ -82,7 +82,15 @@ final class AskConvergence {
                     ? dimension.unit()
                     : ask.head().limit().quantity().unit();
             answers.add(new AskAnswer(
-                    ask, value.value(), dimension, unit, value.where(), error(i), verdict(ask, value.value()), null));
+                    ask,
+                    value.value(),
+                    dimension,
+                    unit,
+                    value.where(),
+                    error(i),
+                    verdict(ask, value.value()),
+                    HandChecker.check(subject, AskValues.of(subject, ask), ask, value.value())
+                            .orElse(null)));
         }
         return answers;
     }

@@ -17,14 +17,18 @@ import tepor.solver.trust.SizePlanner;
 
 /** Makes the meshes of a case: the first from the section alone, each further one from the solutions on the last. */
 final class MeshFinder {
-    /** Growth of the number of triangles from round to round. */
-    private static final double GROWTH = 3;
+    /** Growth of the number of triangles from round to round: where nothing is known, far from and near the tolerance. */
+    private static final double GROWTH_FIRST = 2;
+
+    private static final double GROWTH_FAR = 4;
+    private static final double GROWTH_MIDDLE = 2.5;
+    private static final double GROWTH_NEAR = 1.8;
 
     /** Growth of the size per distance. */
     private static final double GRADATION = 0.5;
 
     /** The mesher takes a size for the longest side wanted; its triangles' sides come out shorter by this on average. */
-    private static final double LONGEST_TO_MEAN = 1.35;
+    private static final double LONGEST_TO_MEAN = 1.7;
 
     private final Case subject;
     private final BooleanSupplier stopped;
@@ -45,11 +49,12 @@ final class MeshFinder {
      * The next mesh.
      *
      * @param solutions those on the last mesh; each counts the same
+     * @param widest mesh error of the ask that is worst off, relative to its tolerance; NaN where none is known
      * @return null where the element limit leaves no room for a mesh worth having
      */
-    MeshResult next(Mesh last, List<Solution> solutions) {
+    MeshResult next(Mesh last, List<Solution> solutions, double widest) {
         double room = 0.9 * subject.mesh().trianglesAtMost() / last.triangleCount();
-        double growth = Math.min(GROWTH, room);
+        double growth = Math.min(growth(widest), room);
         if (growth < 1.3) {
             return null;
         }
@@ -69,6 +74,13 @@ final class MeshFinder {
             sizes[t] *= LONGEST_TO_MEAN;
         }
         return mesh(new MeshSizes(last, sizes, GRADATION));
+    }
+
+    private static double growth(double widest) {
+        if (Double.isNaN(widest)) {
+            return GROWTH_FIRST;
+        }
+        return widest > 10 ? GROWTH_FAR : widest > 0.5 ? GROWTH_MIDDLE : GROWTH_NEAR;
     }
 
     private MeshResult mesh(SizeField sizes) {

@@ -99,7 +99,7 @@ public final class Solver {
                 break;
             }
             progress.stage("meshing");
-            MeshResult next = meshes.next(mesh.mesh(), solutions.all());
+            MeshResult next = meshes.next(mesh.mesh(), solutions.all(), convergence.widestRelative());
             if (next == null) {
                 break;
             }

@@ -41,9 +41,9 @@ final class AirReader {
             table.missing("temperature", "temperature = \"20 degC\"");
         }
         Optional<Input> temperature = quantities.input(
-                table, "temperature", Paths.of("air", name, "temperature"), Range.ANY, Dimension.TEMPERATURE);
+                table, "temperature", QuantityKeys.path("air", name, "temperature"), Range.ANY, Dimension.TEMPERATURE);
         Optional<Input> film =
-                quantities.input(table, "film", Paths.of("air", name, "film"), Range.POSITIVE, Dimension.FILM);
+                quantities.input(table, "film", QuantityKeys.path("air", name, "film"), Range.POSITIVE, Dimension.FILM);
         boolean statesFilm = table.has("film");
         Optional<Air> air = temperature
                 .filter(t -> !statesFilm || film.isPresent())

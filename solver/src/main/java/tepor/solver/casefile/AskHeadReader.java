@@ -16,6 +16,8 @@ import tepor.solver.model.Limit;
 import tepor.solver.model.Within;
 import tepor.solver.quantity.Dimension;
 import tepor.solver.quantity.Quantity;
+import tepor.solver.quantity.QuantityException;
+import tepor.solver.quantity.QuantityReader;
 
 /** Reads what every ask may have: {@code limit}, {@code within} and {@code with}. */
 final class AskHeadReader {
@@ -65,8 +67,19 @@ final class AskHeadReader {
     }
 
     private Optional<Within> within(Value value, Dimension dimension) {
-        if (value.isText() && Percentage.is((String) value.raw())) {
-            double fraction = Percentage.read(value).orElseThrow();
+        if (value.isText() && ((String) value.raw()).strip().endsWith("%")) {
+            return fraction(value, (String) value.raw());
+        }
+        Dimension tolerance = dimension == Dimension.TEMPERATURE ? Dimension.TEMPERATURE_DIFFERENCE : dimension;
+        return quantities
+                .exact(value, "a tolerance is exact", Range.POSITIVE, tolerance)
+                .map(q -> new Within.Absolute(q.value()));
+    }
+
+    private Optional<Within> fraction(Value value, String text) {
+        String remedy = "write a tolerance such as \"1 %\"";
+        try {
+            double fraction = QuantityReader.readFraction(text);
             if (fraction > 0) {
                 return Optional.of(new Within.Fraction(fraction));
             }
@@ -74,13 +87,11 @@ final class AskHeadReader {
                     "not-positive",
                     value.place(),
                     value.name() + " is " + value.found() + ", but must be greater than zero",
-                    "write a tolerance such as \"1 %\"");
-            return Optional.empty();
+                    remedy);
+        } catch (QuantityException e) {
+            findings.error("quantity", value.place(), value.name() + ": " + e.getMessage(), remedy);
         }
-        Dimension tolerance = dimension == Dimension.TEMPERATURE ? Dimension.TEMPERATURE_DIFFERENCE : dimension;
-        return quantities
-                .exact(value, "a tolerance is exact", Range.POSITIVE, tolerance)
-                .map(q -> new Within.Absolute(q.value()));
+        return Optional.empty();
     }
 
     private static String example(Dimension dimension) {
@@ -113,7 +124,7 @@ final class AskHeadReader {
             if (value.isTable()) {
                 values.putAll(flat(value.table("with", table.label()).orElseThrow(), steps));
             } else {
-                values.put(steps.size() == 1 ? key : Paths.of(steps.toArray(new String[0])), value);
+                values.put(steps.size() == 1 ? key : QuantityKeys.path(steps.toArray(new String[0])), value);
             }
         }
         return values;

@@ -13,6 +13,7 @@ import tepor.solver.casefile.DrawingReader.Drawing;
 import tepor.solver.casefile.KeyTable.Keys;
 import tepor.solver.casefile.KeyTable.Value;
 import tepor.solver.casefile.QuantityKeys.Range;
+import tepor.solver.casefile.TargetReader.Parts;
 import tepor.solver.model.Air;
 import tepor.solver.model.Ask;
 import tepor.solver.model.Edge;
@@ -26,13 +27,13 @@ final class AskReader {
     /** How far off the section a point may lie, as a fraction of the extent. */
     private static final double OFF = 1e-5;
 
-    private final CaseParts parts;
+    private final Parts parts;
     private final Drawing drawing;
     private final QuantityKeys quantities;
     private final Findings findings;
     private final TargetReader targets;
 
-    AskReader(CaseParts parts, Drawing drawing, QuantityKeys quantities, Findings findings) {
+    AskReader(Parts parts, Drawing drawing, QuantityKeys quantities, Findings findings) {
         this.parts = parts;
         this.drawing = drawing;
         this.quantities = quantities;
@@ -147,7 +148,7 @@ final class AskReader {
             return Optional.empty();
         }
         Section section = parts.section().get();
-        double[] nearest = PointOnSection.nearest(section, point.get().x, point.get().y);
+        double[] nearest = nearest(section, point.get().x, point.get().y);
         double distance = nearest[2];
         String off = value.name() + ", " + drawing.unit().point(point.get().x, point.get().y)
                 + ", lies off the section by " + drawing.unit().length(distance);
@@ -178,7 +179,7 @@ final class AskReader {
         List<Ask.Less> less = new ArrayList<>();
         for (int i = 0; i < elements.size(); i++) {
             Value element = elements.get(i);
-            String path = Paths.of("ask", ask.name(), "less", String.valueOf(i + 1));
+            String path = QuantityKeys.path("ask", ask.name(), "less", String.valueOf(i + 1));
             element.table(LESS_EXAMPLE, element.name()).ifPresent(table -> {
                 table.allow(LESS);
                 Optional<Input> u = required(table, "u", path, "0.25 W/(m2.K)", Dimension.FILM);
@@ -196,5 +197,40 @@ final class AskReader {
             table.missing(key, key + " = \"" + example + "\"");
         }
         return quantities.input(table, key, path + "." + key, Range.POSITIVE, dimension);
+    }
+
+    /**
+     * The point of the material that is nearest.
+     *
+     * @param x metres
+     * @param y metres
+     * @return x, y and the distance to it, metres; the point itself, and 0, where it lies in material
+     */
+    private static double[] nearest(Section section, double x, double y) {
+        double[] best = {x, y, Double.POSITIVE_INFINITY};
+        boolean inside = false;
+        for (int s = 0; s < section.segmentCount(); s++) {
+            if (!section.isBoundary(s)) {
+                continue;
+            }
+            double ax = section.x(section.start(s));
+            double ay = section.y(section.start(s));
+            double bx = section.x(section.end(s));
+            double by = section.y(section.end(s));
+            // A ray to the right crosses the boundary an odd number of times from inside (even-odd rule).
+            if ((ay > y) != (by > y) && x < ax + (y - ay) / (by - ay) * (bx - ax)) {
+                inside = !inside;
+            }
+            double along =
+                    ((x - ax) * (bx - ax) + (y - ay) * (by - ay)) / ((bx - ax) * (bx - ax) + (by - ay) * (by - ay));
+            double t = Math.max(0, Math.min(1, along));
+            double px = ax + t * (bx - ax);
+            double py = ay + t * (by - ay);
+            double distance = Math.hypot(px - x, py - y);
+            if (distance < best[2]) {
+                best = new double[] {px, py, distance};
+            }
+        }
+        return inside ? new double[] {x, y, 0} : best;
     }
 }

@@ -13,6 +13,9 @@ import java.util.ArrayList;
 import java.util.HexFormat;
 import java.util.List;
 import java.util.Optional;
+import org.tomlj.Toml;
+import org.tomlj.TomlParseError;
+import org.tomlj.TomlParseResult;
 import tepor.mesher.outline.Findings;
 import tepor.mesher.outline.Place;
 import tepor.solver.model.SourceFile;
@@ -47,9 +50,10 @@ final class CaseFiles {
         return stem.equals("case") && named ? folder.getFileName().toString() : stem;
     }
 
-    /** The text of the case file; empty where it cannot be read. */
-    Optional<String> readCase() {
-        return text(caseFile, caseFile.getFileName().toString(), new Place(caseName(), 0, 0));
+    /** The case file as TOML 1.0; empty where it cannot be read, or is not TOML: keys may then be missing for no other reason. */
+    Optional<KeyTable> readCase() {
+        return text(caseFile, caseFile.getFileName().toString(), new Place(caseName(), 0, 0))
+                .flatMap(this::parse);
     }
 
     /**
@@ -136,5 +140,41 @@ final class CaseFiles {
         } catch (NoSuchAlgorithmException e) {
             throw new IllegalStateException("every Java platform has SHA-256", e);
         }
+    }
+
+    private Optional<KeyTable> parse(String text) {
+        String file = caseName();
+        int nul = text.indexOf('\0');
+        if (nul >= 0) {
+            int line =
+                    (int) text.substring(0, nul).chars().filter(c -> c == '\n').count() + 1;
+            int column = nul - text.lastIndexOf('\n', nul);
+            findings.error(
+                    "toml-syntax",
+                    new Place(file, line, column),
+                    "there is a NUL character in the file",
+                    "a case file is plain text in TOML 1.0");
+            return Optional.empty();
+        }
+        TomlParseResult result = Toml.parse(text);
+        for (TomlParseError error : result.errors()) {
+            Place place =
+                    new Place(file, error.position().line(), error.position().column());
+            String message = error.getMessage();
+            findings.error("toml-syntax", place, "this is not TOML: " + message, remedy(message));
+        }
+        return result.hasErrors()
+                ? Optional.empty()
+                : Optional.of(new KeyTable(result, "the case file", "the case", new Place(file, 1, 1), findings));
+    }
+
+    private static String remedy(String message) {
+        if (message.contains("previously defined")) {
+            return "a key or table stands once; [[region]], [[edge]] and [[ask]] have double brackets";
+        }
+        if (message.contains("expected \"") || message.contains("end of line")) {
+            return "texts stand in \"double quotes\" and end on their line; quantities are texts, too";
+        }
+        return "correct the line; a case file is plain text in TOML 1.0: key = value, texts in \"double quotes\"";
     }
 }

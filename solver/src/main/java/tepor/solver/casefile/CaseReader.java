@@ -18,6 +18,7 @@ import tepor.solver.casefile.AirReader.WrittenAir;
 import tepor.solver.casefile.DrawingReader.Drawing;
 import tepor.solver.casefile.EdgeReader.WrittenEdge;
 import tepor.solver.casefile.RegionReader.WrittenRegion;
+import tepor.solver.casefile.TargetReader.Parts;
 import tepor.solver.model.Accuracy;
 import tepor.solver.model.Air;
 import tepor.solver.model.Ask;
@@ -53,7 +54,7 @@ public final class CaseReader {
     }
 
     private Case read() {
-        Optional<KeyTable> parsed = files.readCase().flatMap(text -> CaseToml.parse(files.caseName(), text, findings));
+        Optional<KeyTable> parsed = files.readCase();
         findings.throwIfFaulty();
         KeyTable root = parsed.orElseThrow();
         boolean readable = HeadReader.readFormat(root);
@@ -83,7 +84,7 @@ public final class CaseReader {
         Map<String, RegionShape> shapes = new LinkedHashMap<>();
         regions.forEach(r -> r.shape().ifPresent(s -> shapes.put(r.name(), s)));
         Optional<Section> section = section(root, regions, shapes, whereReader, drawing);
-        CaseParts parts = parts(names, regions, airs, conditionReader.usedAirs(), edges, section, drawing);
+        Parts parts = parts(names, regions, airs, conditionReader.usedAirs(), edges, section, drawing);
         List<Ask> asks = new AskReader(parts, drawing, quantities, findings).read(root);
         MeshRequest mesh = new MeshReader(parts, shapes, drawing, quantities, findings).read(root);
         warnOfSpreads();
@@ -140,7 +141,7 @@ public final class CaseReader {
                 List.copyOf(shapes.values()), whereReader.splitPoints(), drawing.snap(), drawing.unit(), findings);
     }
 
-    private CaseParts parts(
+    private Parts parts(
             Names names,
             List<WrittenRegion> regions,
             Map<String, WrittenAir> airs,
@@ -165,7 +166,7 @@ public final class CaseReader {
             edges = placer.place(writtenEdges);
             passable = placer.passable(edges);
         }
-        return new CaseParts(names, soundRegions, holes, soundAirs, usedAirs, edges, section, passable);
+        return new Parts(names, soundRegions, holes, soundAirs, usedAirs, edges, section, passable);
     }
 
     private void warnOfSpreads() {

@@ -101,7 +101,7 @@ final class ConditionReader {
     }
 
     private Optional<Input> input(KeyTable edge, String name, String key, Range range, Dimension... dimensions) {
-        return quantities.input(edge, key, Paths.of("edge", name, key), range, dimensions);
+        return quantities.input(edge, key, QuantityKeys.path("edge", name, key), range, dimensions);
     }
 
     private static InflowBasis basis(Dimension dimension) {
@@ -196,7 +196,7 @@ final class ConditionReader {
         }
         if (kind.isEmpty() && NUMBER_FIRST.matcher(text).matches()) {
             return quantities
-                    .input(value, Paths.of("edge", edgeName, "air"), Range.ANY, Dimension.TEMPERATURE)
+                    .input(value, QuantityKeys.path("edge", edgeName, "air"), Range.ANY, Dimension.TEMPERATURE)
                     .map(t -> new Around(t, null));
         }
         names.check(

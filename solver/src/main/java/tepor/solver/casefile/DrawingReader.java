@@ -30,8 +30,8 @@ final class DrawingReader {
      * @param unit of every bare coordinate
      * @param snap metres; NaN where not stated
      * @param stated whether the case names a file, be it right or wrong
-     * @param outline what is in the file; empty where there is none or it cannot be read
-     * @param fileName the file in messages; empty where there is none
+     * @param outline what is in the file; empty where there is none or something in it is wrong
+     * @param fileName the file as the user named it; empty where there is none
      */
     record Drawing(DrawingUnit unit, double snap, boolean stated, Optional<Outline> outline, String fileName) {
         /** A geometry written in the case file, of one of the types wanted; empty, with an error, where it is not. */
@@ -141,7 +141,11 @@ final class DrawingReader {
                             "write the outlines as WKT into a file NAME.wkt");
             return Optional.empty();
         }
-        return files.read(name.get(), value.place())
-                .map(text -> WktReader.read(files.nameInMessages(name.get()), text, unit, value.findings()));
+        Findings inFile = new Findings();
+        Optional<Outline> outline = files.read(name.get(), value.place())
+                .map(text -> WktReader.read(files.nameInMessages(name.get()), text, unit, inFile));
+        inFile.all().forEach(value.findings()::add);
+        // Where a record could not be read, regions would miss it for no other reason.
+        return inFile.hasErrors() ? Optional.empty() : outline;
     }
 }

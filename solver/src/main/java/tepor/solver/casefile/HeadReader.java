@@ -9,6 +9,8 @@ import tepor.solver.casefile.QuantityKeys.Range;
 import tepor.solver.model.Accuracy;
 import tepor.solver.model.Input;
 import tepor.solver.quantity.Dimension;
+import tepor.solver.quantity.QuantityException;
+import tepor.solver.quantity.QuantityReader;
 
 /** Reads what a case says of itself as a whole: format, title, symmetry, depth, {@code [report]}, {@code [accuracy]}. */
 final class HeadReader {
@@ -30,6 +32,7 @@ final class HeadReader {
             "project", "document", "revision", "purpose", "drawing", "standard", "prepared", "checked", "approved");
     private static final Keys ACCURACY = Keys.of("adapt", "confidence");
     private static final double CONFIDENCE = 0.95;
+    private static final String REMEDY = "write confidence = \"95 %\", or a number between 0 and 1";
 
     private HeadReader() {}
 
@@ -107,28 +110,31 @@ final class HeadReader {
     }
 
     private static Optional<Double> confidence(Value value) {
-        Optional<Double> fraction = Percentage.read(value);
-        if (fraction.isEmpty()) {
-            value.findings()
-                    .error(
-                            "wrong-type",
-                            value.place(),
-                            value.name() + " is " + value.found() + ", where a percentage is wanted",
-                            "write a text such as \"95 %\", or a number between 0 and 1");
-            return fraction;
+        double fraction;
+        if (value.raw() instanceof Number number) {
+            fraction = number.doubleValue();
+        } else {
+            Optional<String> text = value.text();
+            if (text.isEmpty()) {
+                return Optional.empty();
+            }
+            try {
+                fraction = QuantityReader.readFraction(text.get());
+            } catch (QuantityException e) {
+                value.findings().error("quantity", value.place(), value.name() + ": " + e.getMessage(), REMEDY);
+                return Optional.empty();
+            }
         }
-        if (!(fraction.get() > 0 && fraction.get() < 1)) {
-            boolean percentMeant = value.isNumber() && fraction.get() > 1 && fraction.get() < 100;
+        if (!(fraction > 0 && fraction < 1)) {
+            boolean percentMeant = value.isNumber() && fraction > 1 && fraction < 100;
             value.findings()
                     .error(
                             "out-of-range",
                             value.place(),
                             value.name() + " is " + value.found() + ", but must lie between 0 and 1 (0 % and 100 %)",
-                            percentMeant
-                                    ? "write \"" + value.raw() + " %\" if percent are meant"
-                                    : "write a text such as \"95 %\"");
+                            percentMeant ? "write \"" + value.raw() + " %\" if percent are meant" : REMEDY);
             return Optional.empty();
         }
-        return fraction;
+        return Optional.of(fraction);
     }
 }

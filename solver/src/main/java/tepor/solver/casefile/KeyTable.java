@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.regex.Pattern;
 import org.tomlj.TomlArray;
 import org.tomlj.TomlPosition;
 import org.tomlj.TomlTable;
@@ -15,6 +16,8 @@ import tepor.mesher.outline.Place;
 
 /** A TOML table with the place of every key, which reports keys it does not know and values of the wrong type. */
 final class KeyTable {
+    private static final Pattern BARE = Pattern.compile("[A-Za-z0-9_-]+");
+
     private final TomlTable toml;
     private final String header;
     private final String label;
@@ -263,7 +266,7 @@ final class KeyTable {
         Map<String, KeyTable> tables = new LinkedHashMap<>();
         table(key).ifPresent(all -> {
             for (String name : all.keys()) {
-                String subheader = "[" + key + "." + (Paths.isBare(name) ? name : "\"" + name + "\"") + "]";
+                String subheader = "[" + key + "." + (isBare(name) ? name : "\"" + name + "\"") + "]";
                 Value value = all.value(name).orElseThrow();
                 if (value.isTable()) {
                     value.table(subheader, key + " '" + name + "'").ifPresent(t -> tables.put(name, t));
@@ -277,6 +280,11 @@ final class KeyTable {
             }
         });
         return tables;
+    }
+
+    /** Whether TOML takes the name as a key without quotes. */
+    static boolean isBare(String name) {
+        return BARE.matcher(name).matches();
     }
 
     /** The tables of a key, written {@code [[key]]}; each labelled with its name, or else its number. */

@@ -46,13 +46,18 @@ final class MaterialReader {
         table.allow(MATERIAL);
         Optional<Conductivity> conductivity = conductivity(name, table);
         Input density = quantities
-                .input(table, "density", Paths.of("material", name, "density"), Range.POSITIVE, Dimension.DENSITY)
+                .input(
+                        table,
+                        "density",
+                        QuantityKeys.path("material", name, "density"),
+                        Range.POSITIVE,
+                        Dimension.DENSITY)
                 .orElse(null);
         Input heatCapacity = quantities
                 .input(
                         table,
                         "heat_capacity",
-                        Paths.of("material", name, "heat_capacity"),
+                        QuantityKeys.path("material", name, "heat_capacity"),
                         Range.POSITIVE,
                         Dimension.HEAT_CAPACITY)
                 .orElse(null);
@@ -74,7 +79,7 @@ final class MaterialReader {
             return directional(name, table, value.get());
         }
         return quantities
-                .input(value.get(), Paths.of("material", name, "k"), Range.POSITIVE, Dimension.CONDUCTIVITY)
+                .input(value.get(), QuantityKeys.path("material", name, "k"), Range.POSITIVE, Dimension.CONDUCTIVITY)
                 .map(Conductivity.Uniform::new);
     }
 
@@ -108,7 +113,7 @@ final class MaterialReader {
             byTemperature(table, value.get());
             return Optional.empty();
         }
-        return quantities.input(value.get(), Paths.of("material", name, "k", key), range, dimension);
+        return quantities.input(value.get(), QuantityKeys.path("material", name, "k", key), range, dimension);
     }
 
     private static void byTemperature(KeyTable table, Value value) {

@@ -14,6 +14,7 @@ import tepor.solver.casefile.KeyTable.Keys;
 import tepor.solver.casefile.KeyTable.Value;
 import tepor.solver.casefile.Names.Kind;
 import tepor.solver.casefile.QuantityKeys.Range;
+import tepor.solver.casefile.TargetReader.Parts;
 import tepor.solver.model.MeshRequest;
 import tepor.solver.model.MeshRequest.Refinement;
 import tepor.solver.model.Target;
@@ -34,18 +35,14 @@ final class MeshReader {
     private static final String NO_SPREAD = "a mesh is made to one value";
     private static final Pattern WKT = Pattern.compile("\\s*[A-Za-z]+(\\s+[ZMzm]{1,2})?\\s*\\(.*", Pattern.DOTALL);
 
-    private final CaseParts parts;
+    private final Parts parts;
     private final Map<String, RegionShape> shapes;
     private final Drawing drawing;
     private final QuantityKeys quantities;
     private final Findings findings;
 
     MeshReader(
-            CaseParts parts,
-            Map<String, RegionShape> shapes,
-            Drawing drawing,
-            QuantityKeys quantities,
-            Findings findings) {
+            Parts parts, Map<String, RegionShape> shapes, Drawing drawing, QuantityKeys quantities, Findings findings) {
         this.parts = parts;
         this.shapes = shapes;
         this.drawing = drawing;

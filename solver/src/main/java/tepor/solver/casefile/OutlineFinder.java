@@ -5,10 +5,8 @@ import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import org.locationtech.jts.geom.Geometry;
-import org.locationtech.jts.geom.GeometryFactory;
 import org.locationtech.jts.geom.Polygon;
 import org.locationtech.jts.geom.util.PolygonExtracter;
-import org.locationtech.jts.operation.overlayng.OverlayNGRobust;
 import tepor.mesher.outline.Outline;
 import tepor.mesher.outline.OutlineElement;
 import tepor.mesher.outline.Place;
@@ -19,8 +17,6 @@ import tepor.solver.casefile.KeyTable.Value;
 
 /** Finds the outline of a region: written in the case, or the records of its name in the drawing's file. */
 final class OutlineFinder {
-    private static final double OVERLAP = 1e-9; // of the area; less is round-off
-
     private final Drawing drawing;
     private final Set<String> usedRecords;
 
@@ -66,11 +62,12 @@ final class OutlineFinder {
         for (OutlineElement record : records) {
             sound &= OutlineCheck.check(name, record.shape(), record.place(), drawing.unit(), table.findings());
         }
-        if (!sound) {
-            return Optional.empty();
+        Place first = records.get(0).place();
+        Geometry shape = records.size() == 1 ? records.get(0).shape() : together(records);
+        if (records.size() > 1 && sound) {
+            sound = OutlineCheck.check(name, shape, first, drawing.unit(), table.findings());
         }
-        Geometry shape = records.size() == 1 ? records.get(0).shape() : joined(name, records, table);
-        return Optional.of(new RegionShape(name, shape, hole, records.get(0).place()));
+        return sound ? Optional.of(new RegionShape(name, shape, hole, first)) : Optional.empty();
     }
 
     private void noRecord(String name, KeyTable table, Outline outline) {
@@ -96,29 +93,14 @@ final class OutlineFinder {
                                         .orElse("its regions are " + NearestWord.list(known)));
     }
 
-    /** Several records of one name are one region, also where they touch along a side or overlap. */
-    private Geometry joined(String name, List<OutlineElement> records, KeyTable table) {
+    /** Several records of one name are one region of several pieces. */
+    private static Geometry together(List<OutlineElement> records) {
         List<Polygon> polygons = new ArrayList<>();
         for (OutlineElement record : records) {
             for (Object polygon : PolygonExtracter.getPolygons(record.shape())) {
                 polygons.add((Polygon) polygon);
             }
         }
-        GeometryFactory factory = records.get(0).shape().getFactory();
-        Geometry together = factory.createMultiPolygon(polygons.toArray(new Polygon[0]));
-        if (together.isValid()) {
-            return together;
-        }
-        Geometry union = OverlayNGRobust.union(
-                polygons.stream().map(Geometry.class::cast).toList());
-        if (together.getArea() - union.getArea() > OVERLAP * together.getArea()) {
-            table.findings()
-                    .warning(
-                            "pieces-overlap",
-                            records.get(1).place(),
-                            "the records of region '" + name + "' overlap each other; they are taken as one area",
-                            "check the outlines");
-        }
-        return union;
+        return records.get(0).shape().getFactory().createMultiPolygon(polygons.toArray(new Polygon[0]));
     }
 }

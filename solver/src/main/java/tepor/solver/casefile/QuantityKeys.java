@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.Collectors;
 import tepor.mesher.outline.Findings;
 import tepor.mesher.outline.Place;
 import tepor.solver.casefile.KeyTable.Value;
@@ -62,6 +63,13 @@ final class QuantityKeys {
         }
         ranges.put(path, range);
         return Optional.of(inputs.add(path, quantity, place));
+    }
+
+    /** The path that these steps make: {@code edge.outer skin.film}; a name with a dot is quoted. */
+    static String path(String... steps) {
+        return List.of(steps).stream()
+                .map(name -> name.contains(".") ? "\"" + name + "\"" : name)
+                .collect(Collectors.joining("."));
     }
 
     /** Notes that an input of this path is stated, but wrongly. */

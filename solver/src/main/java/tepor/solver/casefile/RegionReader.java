@@ -71,15 +71,6 @@ final class RegionReader {
             allNamed &= name.isPresent();
             region(table, name, regions.size()).ifPresent(regions::add);
         }
-        boolean solid = regions.stream().anyMatch(r -> !r.hole());
-        if (!regions.isEmpty() && !solid) {
-            root.findings()
-                    .error(
-                            "no-material",
-                            regions.get(0).table().place(),
-                            "every region is of nothing",
-                            "give at least one region a material");
-        }
         warnOfUnused(root);
         return regions;
     }
@@ -114,7 +105,7 @@ final class RegionReader {
                             NearestWord.to(name, known)
                                     .map(near -> "did you mean '" + near + "'")
                                     .orElse("state its conductivity under [material."
-                                            + (Paths.isBare(name) ? name : "\"" + name + "\"") + "]"));
+                                            + (KeyTable.isBare(name) ? name : "\"" + name + "\"") + "]"));
             return Optional.empty();
         }
         return materials.get(name);
@@ -154,7 +145,7 @@ final class RegionReader {
                             "state depth = \"1 m\" (before the first table), or the heat in W/m or W/m3");
             return Optional.empty();
         }
-        String path = Paths.of("region", name, "heat");
+        String path = QuantityKeys.path("region", name, "heat");
         if (quantity.isEmpty() || name.isEmpty()) {
             quantities.addFaulty(path);
             return Optional.empty();

@@ -1,7 +1,11 @@
 package tepor.solver.casefile;
 
+import java.util.BitSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
+import tepor.mesher.section.Section;
 import tepor.solver.casefile.KeyTable.Value;
 import tepor.solver.casefile.Names.Kind;
 import tepor.solver.model.Air;
@@ -13,9 +17,31 @@ import tepor.solver.model.Target;
 final class TargetReader {
     private static final String EVERYTHING = "everything";
 
-    private final CaseParts parts;
+    private final Parts parts;
 
-    TargetReader(CaseParts parts) {
+    /**
+     * What asks and mesh can refer to, as far as it is sound.
+     *
+     * @param names all names, of sound and faulty things alike
+     * @param regions by name; faulty ones are missing
+     * @param holes names of the regions of nothing
+     * @param airs by name; faulty ones are missing
+     * @param usedAirs names of the airs in which an edge is
+     * @param edges by name; faulty ones are missing
+     * @param section empty where regions are faulty
+     * @param passable segments through which heat may pass
+     */
+    record Parts(
+            Names names,
+            Map<String, Region> regions,
+            Set<String> holes,
+            Map<String, Air> airs,
+            Set<String> usedAirs,
+            Map<String, Edge> edges,
+            Optional<Section> section,
+            BitSet passable) {}
+
+    TargetReader(Parts parts) {
         this.parts = parts;
     }
 
@@ -48,17 +74,7 @@ final class TargetReader {
                             "name an edge on its border: where = { of = \"" + name + "\" }");
             return Optional.empty();
         }
-        Region region = parts.regions().get(name);
-        if (region != null && parts.isCovered(region)) {
-            value.findings()
-                    .error(
-                            "region-covered",
-                            value.place(),
-                            value.name() + " names region '" + name + "', but later regions cover all of it",
-                            "put its [[region]] after those that cover it");
-            return Optional.empty();
-        }
-        return Optional.ofNullable(region).map(Target.OfRegion::new);
+        return Optional.ofNullable(parts.regions().get(name)).map(Target.OfRegion::new);
     }
 
     /** An edge or an air, to take the heat flow through. */

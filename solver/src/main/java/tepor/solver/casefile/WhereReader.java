@@ -7,6 +7,8 @@ import java.util.Map;
 import java.util.Optional;
 import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Geometry;
+import tepor.mesher.outline.Finding;
+import tepor.mesher.outline.Findings;
 import tepor.mesher.section.OutlineCheck;
 import tepor.mesher.section.Where;
 import tepor.solver.casefile.DrawingReader.Drawing;
@@ -31,6 +33,8 @@ final class WhereReader {
     private static final List<String> WORDS_IN_ORDER =
             List.of("left", "right", "bottom", "top", "outside", "holes", "rest");
     private static final String EXAMPLE = "where = \"outside\", or another word or form of the reference";
+
+    private static final String CHECKED = "inside";
 
     private final Names names;
     private final Drawing drawing;
@@ -142,8 +146,19 @@ final class WhereReader {
 
     private Optional<Where> inside(Value form) {
         return drawing.geometry(form, "an area", "POLYGON", "MULTIPOLYGON")
-                .filter(g -> OutlineCheck.check(form.name(), g, form.place(), drawing.unit(), form.findings()))
+                .filter(g -> isSound(g, form))
                 .map(Where.Inside::new);
+    }
+
+    private boolean isSound(Geometry polygon, Value form) {
+        Findings found = new Findings();
+        boolean sound = OutlineCheck.check(CHECKED, polygon, form.place(), drawing.unit(), found);
+        for (Finding f : found.all()) {
+            // The check speaks of a region; this polygon is none.
+            String what = f.what().replace("region '" + CHECKED + "'", form.name());
+            form.findings().add(new Finding(f.severity(), f.code(), f.place(), what, f.remedy()));
+        }
+        return sound;
     }
 
     private Optional<Where> between(Value form) {

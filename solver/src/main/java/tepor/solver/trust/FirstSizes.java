@@ -16,11 +16,14 @@ public final class FirstSizes implements SizeField {
 
     private static final double TRIANGLES_QUADRATIC = 500;
 
+    /** A size is the longest side wanted; the sides of a mesh come out shorter by this on average. */
+    private static final double LONGEST_TO_MEAN = 1.7;
+
     /** Growth of the size with the distance from a singular point. */
-    private static final double GRADATION = 0.4;
+    private static final double GRADATION = 0.5;
 
     /** Size at a singular point, relative to its clearance. */
-    private static final double TIP = 0.1;
+    private static final double TIP = 0.25;
 
     /** Many singular points, as of a grid of bars, are met by the adaptive rounds; the first mesh stays small. */
     private static final int MANY = 300;
@@ -37,9 +40,9 @@ public final class FirstSizes implements SizeField {
             }
         }
         double count = subject.mesh().nodesPerTriangle() == 3 ? TRIANGLES_LINEAR : TRIANGLES_QUADRATIC;
-        base = Math.sqrt(4 / Math.sqrt(3) * area / count);
+        base = LONGEST_TO_MEAN * Math.sqrt(4 / Math.sqrt(3) * area / count);
         List<SingularPoints.Point> points = SingularPoints.of(subject);
-        tip = points.size() > MANY ? 5 * TIP : TIP;
+        tip = points.size() > MANY ? 2 * TIP : TIP;
         for (SingularPoints.Point point : points) {
             double reach = base / GRADATION;
             tree.insert(
