@@ -57,6 +57,7 @@ final class StripBound {
             low[s] = Math.min(a, b);
             high[s] = Math.max(a, b);
         }
+        Sweep.join(low, high, count, frame.tolerance());
         double from = Arrays.stream(low).min().orElse(0);
         double to = Arrays.stream(high).max().orElse(0);
         Sweep.run(low, high, from, to, this::cut);
