@@ -104,58 +104,57 @@ final class AskHeadReader {
 
     private Map<Input, Double> with(KeyTable ask) {
         Map<Input, Double> changed = new LinkedHashMap<>();
-        ask.value("with")
-                .flatMap(v -> v.table("with = { \"PATH\" = \"…\" }", v.name()))
-                .ifPresent(table -> {
-                    for (Map.Entry<String, Value> entry : flat(table, List.of()).entrySet()) {
-                        change(entry.getKey(), entry.getValue(), changed);
-                    }
-                });
+        Optional<KeyTable> table = ask.value("with").flatMap(v -> v.table("with = { \"PATH\" = \"…\" }", v.name()));
+        for (Change change : table.map(t -> flat(t, List.of())).orElse(List.of())) {
+            make(change, "'with' of " + ask.label(), changed);
+        }
         return changed;
     }
 
+    /** One line of a {@code with}. */
+    private record Change(String path, Value value) {}
+
     /** Paths may be one quoted key or TOML's own dotted keys: the latter come as tables in tables. */
-    private static Map<String, Value> flat(KeyTable table, List<String> above) {
-        Map<String, Value> values = new LinkedHashMap<>();
+    private static List<Change> flat(KeyTable table, List<String> above) {
+        List<Change> changes = new ArrayList<>();
         for (String key : table.keys()) {
             List<String> steps = new ArrayList<>(above);
             steps.add(key);
             Value value = table.value(key).orElseThrow();
             if (value.isTable()) {
-                values.putAll(flat(value.table("with", table.label()).orElseThrow(), steps));
+                changes.addAll(flat(value.table("with", table.label()).orElseThrow(), steps));
             } else {
-                values.put(steps.size() == 1 ? key : QuantityKeys.path(steps.toArray(new String[0])), value);
+                String path = steps.size() == 1 ? key : QuantityKeys.path(steps.toArray(new String[0]));
+                changes.add(new Change(path, value));
             }
         }
-        return values;
+        return changes;
     }
 
-    private void change(String path, Value value, Map<Input, Double> changed) {
-        Optional<Input> input = quantities.find(path);
+    private void make(Change change, String with, Map<Input, Double> changed) {
+        Optional<Input> input = quantities.find(change.path());
         if (input.isEmpty()) {
-            if (!quantities.isFaulty(path)) {
+            if (!quantities.isFaulty(change.path())) {
                 findings.error(
                         "unknown-path",
-                        value.place(),
-                        "'with' names the input '" + path + "', but the case has no quantity of that path",
-                        remedy(path));
+                        change.value().place(),
+                        with + " names the input '" + change.path() + "', but the case has no quantity of that path",
+                        remedy(change.path()));
             }
             return;
         }
         Optional<Quantity> quantity = quantities.exact(
-                value,
+                change.value(),
                 "the spread stays that of the input itself",
                 quantities.rangeOf(input.get()),
                 input.get().quantity().dimension());
-        quantity.ifPresent(q -> {
-            if (changed.put(input.get(), q.value()) != null) {
-                findings.error(
-                        "duplicate-path",
-                        value.place(),
-                        "'with' names the input '" + input.get().path() + "' twice",
-                        "state it once");
-            }
-        });
+        if (quantity.isPresent() && changed.put(input.get(), quantity.get().value()) != null) {
+            findings.error(
+                    "duplicate-path",
+                    change.value().place(),
+                    with + " names the input '" + input.get().path() + "' twice",
+                    "state it once");
+        }
     }
 
     private String remedy(String path) {

@@ -61,7 +61,10 @@ final class EdgeReader {
             Optional<Where> where = whereReader.read(table);
             Optional<List<EdgeCondition>> conditions = conditionReader.read(table, name.orElse(""));
             List<String> stated = ConditionReader.stated(table);
-            String insulated = table.has("insulated") ? table.text("insulated").orElse("") : "";
+            String insulated = table.value("insulated")
+                    .filter(KeyTable.Value::isText)
+                    .map(v -> (String) v.raw())
+                    .orElse("");
             name.ifPresent(n -> edges.add(new WrittenEdge(n, where, conditions, stated, insulated, table)));
         }
         return edges;

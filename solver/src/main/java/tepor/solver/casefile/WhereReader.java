@@ -121,9 +121,12 @@ final class WhereReader {
             return Optional.of(where);
         }
         Optional<Kind> kind = names.kindOf(word);
-        String remedy = NearestWord.to(word, WORDS_IN_ORDER)
-                .map(near -> "did you mean \"" + near + "\"")
-                .orElse("the words are " + String.join(", ", WORDS_IN_ORDER));
+        String words = "the words are " + String.join(", ", WORDS_IN_ORDER);
+        String remedy = kind.isPresent()
+                ? words
+                : NearestWord.to(word, WORDS_IN_ORDER)
+                        .map(near -> "did you mean \"" + near + "\"")
+                        .orElse(words);
         if (kind.isPresent() && kind.get() == Kind.REGION) {
             remedy = "write { of = \"" + word + "\" } for the border of the region, or { between = [\"" + word
                     + "\", \"…\"] } for where it meets another";

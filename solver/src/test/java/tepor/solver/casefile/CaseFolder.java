@@ -107,6 +107,24 @@ final class CaseFolder {
         return errors;
     }
 
+    /**
+     * Replaces one text of the sound case and checks that the one error is at the mark in the replacement.
+     *
+     * @param old a text of the sound case; single quotes stand for double ones, here and in the replacement
+     * @param what words of the message, separated by semicolons
+     * @param remedy words of the remedy, separated by semicolons
+     */
+    void fault(String old, String replacement, String what, String remedy) {
+        List<Finding> errors = errors(sound(old.replace('\'', '"'), replacement.replace('\'', '"')));
+        assertThat(errors).hasSize(1);
+        for (String words : what.split(";")) {
+            assertThat(errors.get(0).what()).contains(words.strip());
+        }
+        for (String words : remedy.split(";")) {
+            assertThat(errors.get(0).remedy()).contains(words.strip());
+        }
+    }
+
     /** Reads a sound case and checks that its warnings are exactly those at the marks; gives them in that order. */
     List<Finding> warnings(String marked) {
         List<String> places = new ArrayList<>();

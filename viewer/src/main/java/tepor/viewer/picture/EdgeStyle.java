@@ -22,10 +22,21 @@ final class EdgeStyle {
 
     /** Draws a line in style i. */
     static void draw(Graphics2D g, Shape line, int i, double width) {
-        Ink.draw(g, line, Ink.PAPER, 1.7 * width);
+        draw(g, line, i, width, width);
+    }
+
+    /** Draws a line in style i of which the material will cover the inner half. */
+    static void drawHalf(Graphics2D g, Shape line, int i, double width) {
+        draw(g, line, i, 2 * width, width);
+    }
+
+    private static void draw(Graphics2D g, Shape line, int i, double width, double dashUnit) {
+        g.setColor(Ink.PAPER);
+        g.setStroke(new BasicStroke((float) (1.7 * width), BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND));
+        g.draw(line);
         float[] dash = DASHES[i % DASHES.length].clone();
         for (int k = 0; k < dash.length; k++) {
-            dash[k] *= (float) width;
+            dash[k] *= (float) dashUnit;
         }
         g.setColor(INKS[i % INKS.length]);
         g.setStroke(new BasicStroke(

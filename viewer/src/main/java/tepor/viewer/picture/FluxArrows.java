@@ -72,24 +72,30 @@ final class FluxArrows {
             if (subject.regions().get(r).isHole()) {
                 continue;
             }
-            Conductivity c = subject.regions().get(r).material().conductivity();
-            if (c instanceof Conductivity.Uniform uniform) {
-                k[3 * r] = k[3 * r + 2] = values.of(uniform.k());
-            } else if (c instanceof Conductivity.Directional directional) {
-                double cos = Math.cos(values.of(directional.angle()));
-                double sin = Math.sin(values.of(directional.angle()));
-                double along = values.of(directional.along());
-                double across = values.of(directional.across());
-                k[3 * r] = along * cos * cos + across * sin * sin;
-                k[3 * r + 1] = (along - across) * cos * sin;
-                k[3 * r + 2] = along * sin * sin + across * cos * cos;
-            }
+            System.arraycopy(tensor(subject.regions().get(r).material().conductivity(), values), 0, k, 3 * r, 3);
         }
         return k;
     }
 
+    /** kxx, kxy and kyy, W/(m·K): the diagonal of along and across, turned by the angle. */
+    static double[] tensor(Conductivity conductivity, Values values) {
+        if (conductivity instanceof Conductivity.Directional directional) {
+            double cos = Math.cos(values.of(directional.angle()));
+            double sin = Math.sin(values.of(directional.angle()));
+            double along = values.of(directional.along());
+            double across = values.of(directional.across());
+            return new double[] {
+                along * cos * cos + across * sin * sin,
+                (along - across) * cos * sin,
+                along * sin * sin + across * cos * cos
+            };
+        }
+        double k = values.of(((Conductivity.Uniform) conductivity).k());
+        return new double[] {k, 0, k};
+    }
+
     /** Puts the flux at a point (pixels) of a triangle into q (W/m², y upwards); false if the point is not in it. */
-    private static boolean flux(
+    static boolean flux(
             TemperatureField field,
             int t,
             double[] k,

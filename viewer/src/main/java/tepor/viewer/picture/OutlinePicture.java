@@ -134,6 +134,9 @@ public final class OutlinePicture implements Picture {
                     inside = new Name(region.name(), at[0], at[1], 0, p, false);
                 }
                 names.add(inside);
+                double half = PictureFont.width(region.name(), font) / 2 + 0.5 * font.getSize2D();
+                grid.take(inside.x(), inside.y(), half, 0.8 * font.getSize2D(), inside.angle());
+                placer.keepClear(inside.x(), inside.y());
             }
         }
     }
@@ -252,7 +255,11 @@ public final class OutlinePicture implements Picture {
             for (Chain chain : SegmentChains.lines(subject.section(), segments)) {
                 Ink.append(path, view.points(chain), chain.closed());
             }
-            EdgeStyle.draw(g, path, e, (onBoundary ? 2 : 0.8) * EDGE * sheet.unit);
+            if (onBoundary) {
+                EdgeStyle.drawHalf(g, path, e, EDGE * sheet.unit);
+            } else {
+                EdgeStyle.draw(g, path, e, 0.8 * EDGE * sheet.unit);
+            }
         }
     }
 

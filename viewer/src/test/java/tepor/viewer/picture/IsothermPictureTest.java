@@ -3,8 +3,11 @@ package tepor.viewer.picture;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.awt.image.BufferedImage;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.HashSet;
+import java.util.Set;
 import javax.imageio.ImageIO;
 import org.junit.jupiter.api.Test;
 import tepor.mesher.outline.DrawingUnit;
@@ -23,11 +26,18 @@ class IsothermPictureTest {
         Path file = PICTURES.resolve(name + ".png");
         PngWriter.write(picture, file);
         SvgWriter.write(picture, PICTURES.resolve(name + ".svg"));
-        return ImageIO.read(file.toFile());
+        BufferedImage image = ImageIO.read(file.toFile());
+        assertThat(image.getWidth()).isEqualTo(picture.width());
+        assertThat(image.getHeight()).isEqualTo(picture.height());
+        return image;
+    }
+
+    private static String svg(String name) throws Exception {
+        return Files.readString(PICTURES.resolve(name + ".svg"), StandardCharsets.UTF_8);
     }
 
     private static int coloursIn(BufferedImage image) {
-        java.util.Set<Integer> colours = new java.util.HashSet<>();
+        Set<Integer> colours = new HashSet<>();
         for (int y = 0; y < image.getHeight(); y += 3) {
             for (int x = 0; x < image.getWidth(); x += 3) {
                 colours.add(image.getRGB(x, y));
@@ -74,20 +84,13 @@ class IsothermPictureTest {
     void showsABlockWithABarADuctAndACoat() throws Exception {
         Answer answer = block().answer(6, IsothermPictureTest::warmth);
         assertThat(coloursIn(write("block", answer, PictureOptions.standard()))).isGreaterThan(50);
+        assertThat(svg("block"))
+                .contains(">Bar in a resin block with a duct beside it</text")
+                .contains(">92.310 ± 0.040 °C</text", ">≤ 105 °C: met</text", ">≤ 60 °C: broken</text")
+                .contains(">42.00 ± 0.12 W/m</text", ">nothing stated, taken as insulated: 120 mm</text");
         write("block-mesh", answer, PictureOptions.standard().with(Layer.MESH));
         write("block-flux", answer, PictureOptions.standard().with(Layer.FLUX));
-    }
-
-    @Test
-    void showsTheOutline() throws Exception {
-        Files.createDirectories(PICTURES);
-        OutlinePicture picture = new OutlinePicture(
-                block().edge("skin", (x, y) -> x < 1e-6 || y > 0.16 - 1e-6)
-                        .edge("duct wall", (x, y) -> x > 0.145 && x < 0.195 && y > 0.065 && y < 0.095)
-                        .inspection(),
-                PictureOptions.standard());
-        PngWriter.write(picture, PICTURES.resolve("outline.png"));
-        SvgWriter.write(picture, PICTURES.resolve("outline.svg"));
+        assertThat(svg("block-flux")).contains(" W/m²</text");
     }
 
     @Test
@@ -100,7 +103,8 @@ class IsothermPictureTest {
                 .flow("heat to the cold room", 17.3, 0.05)
                 .unit(new DrawingUnit("m", 1))
                 .answer(6, (x, y) -> 12 + 50 * Math.exp(-x) + 60 * (y - 0.05) * Math.exp(-x / 2));
-        write("long", answer, PictureOptions.standard());
+        BufferedImage image = write("long", answer, PictureOptions.standard());
+        assertThat(image.getHeight()).as("a long section makes a low picture").isLessThan(image.getWidth() / 2);
     }
 
     @Test
@@ -118,6 +122,7 @@ class IsothermPictureTest {
                 .peak("inner wall", 80, 0, Double.NaN, null, 2e-5, 0)
                 .answer(6, (x, y) -> 80 - 60 * Math.log(Math.hypot(x, y) / 2e-5));
         write("tiny", answer, PictureOptions.standard());
+        assertThat(svg("tiny")).contains(" µm</text");
     }
 
     @Test
@@ -129,29 +134,56 @@ class IsothermPictureTest {
             sample.at("point " + (char) ('A' + i % 26) + i, warmth(x, y), 0.02, x, y);
         }
         write("many", sample.answer(6, IsothermPictureTest::warmth), PictureOptions.standard());
+        for (int i = 1; i <= 33; i++) {
+            assertThat(svg("many")).contains(">" + i + "</text");
+        }
+    }
+
+    @Test
+    void keepsToTheSizeAskedFor() throws Exception {
+        Answer answer = block().answer(6, IsothermPictureTest::warmth);
+        BufferedImage image = write(
+                "sized",
+                answer,
+                new PictureOptions(1000, 700, PictureOptions.standard().layers()));
+        assertThat(new int[] {image.getWidth(), image.getHeight()}).containsExactly(1000, 700);
     }
 
     @Test
     void showsAUniformTemperature() throws Exception {
         Answer answer = block().answer(6, (x, y) -> 20.0);
         write("uniform", answer, PictureOptions.standard());
+        assertThat(svg("uniform")).contains(">uniform 20.0 °C</text");
     }
 
     @Test
-    void showsAFineMesh() throws Exception {
-        PatternedGrid grid = PatternedGrid.ring(0.03, 0.06, 200, 50);
-        Answer answer = new SampleAnswers("Ring", grid)
-                .answer(6, (x, y) -> 80 - 60 * Math.log(Math.hypot(x, y) / 0.03) / Math.log(2));
-        for (int i = 0; i < 6; i++) {
-            long t0 = System.nanoTime();
-            IsothermPicture p = new IsothermPicture(answer, PictureOptions.standard());
-            long t1 = System.nanoTime();
-            PngWriter.write(p, PICTURES.resolve("fine.png"));
-            long t2 = System.nanoTime();
-            SvgWriter.write(p, PICTURES.resolve("fine.svg"));
-            long t3 = System.nanoTime();
-            System.out.printf("lay out %.0f png %.0f svg %.0f ms%n", (t1 - t0) / 1e6, (t2 - t1) / 1e6, (t3 - t2) / 1e6);
+    void bandsReadInGreyscale() throws Exception {
+        Answer answer = block().answer(6, (x, y) -> 20 + 300 * x);
+        BufferedImage image = write("grey", answer, new PictureOptions(1600, 0, Set.of(Layer.BANDS)));
+        SectionBox box = SectionBox.of(image);
+        double before = 0;
+        for (int k = 1; k < 20; k++) {
+            int x = box.left() + k * (box.right() - box.left()) / 20;
+            double lightness = ColourMap.lightness(new java.awt.Color(image.getRGB(x, box.bottom() - 40)));
+            assertThat(lightness).as("at %d of 20 from cold to warm", k).isGreaterThan(before - 1);
+            before = Math.max(before, lightness);
         }
-        write("fine-mesh", answer, PictureOptions.standard().with(Layer.MESH));
+        assertThat(before).isGreaterThan(80);
+    }
+
+    /** Where the first coloured pixels of a picture lie, seen along the row in the middle of its upper half. */
+    private record SectionBox(int left, int right, int bottom) {
+        static SectionBox of(BufferedImage image) {
+            int y = image.getHeight() / 3;
+            int left = 0;
+            while (image.getRGB(left, y) == 0xffffffff) {
+                left++;
+            }
+            int right = left;
+            while (right < image.getWidth() - 1 && image.getRGB(right, y) != 0xffffffff) {
+                right++;
+            }
+            return new SectionBox(left + 8, right - 8, y + 40);
+        }
     }
 }
