@@ -173,7 +173,7 @@ final class Working {
             sum.add(number(ring.resistance()));
         }
         if (left > 0) {
-            lines.add(left + " ring(s) across several regions, ∫ dr/(r ∫ k d(angle)): " + perLength(rest));
+            lines.add("rings across several regions, ∫ dr/(r ∫ k d(angle)): " + perLength(rest));
             sum.add(number(rest));
         }
         surface(lines, sum, 1 - bound.inner, bound.films[1]);

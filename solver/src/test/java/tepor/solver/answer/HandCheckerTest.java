@@ -10,6 +10,8 @@ import java.util.Locale;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 import tepor.solver.casefile.CaseReader;
 import tepor.solver.model.Case;
 
@@ -291,10 +293,12 @@ class HandCheckerTest {
     }
 
     /** A quarter of a tube, cut along its planes of symmetry: the centre is found from the arcs. */
-    @Test
-    void aQuarterOfATubeHasTheSameCentre() {
-        String outer = polygon(0.3, 0.2, 0.10, 90, 0, Math.PI / 2);
-        String inner = polygon(0.3, 0.2, 0.05, 90, Math.PI / 2, 0);
+    @ParameterizedTest
+    @ValueSource(doubles = {0, 30, 135, 170, 300})
+    void aQuarterOfATubeHasTheSameCentre(double turnDeg) {
+        double turn = Math.toRadians(turnDeg);
+        String outer = polygon(0.3, 0.2, 0.10, 90, turn, turn + Math.PI / 2);
+        String inner = polygon(0.3, 0.2, 0.05, 90, turn + Math.PI / 2, turn);
         String first = outer.substring(0, outer.indexOf(','));
         String text = "[outline]\nunit = \"m\"\n"
                 + region("lagging", "POLYGON ((" + outer + inner + first + "))")
@@ -302,11 +306,9 @@ class HandCheckerTest {
                 + """
                 [[edge]]
                 name = "inner"
-                where = { inside = "POLYGON ((0.299 0.199, 0.36 0.199, 0.36 0.26, 0.299 0.26, 0.299 0.199))" }
+                where = { line = "LINESTRING (%s)" }
                 temperature = "80 degC"
-                """.replace(
-                                "POLYGON ((0.299 0.199, 0.36 0.199, 0.36 0.26, 0.299 0.26, 0.299 0.199))",
-                                circle(0.3, 0.2, 0.052, 90))
+                """.formatted(inner.substring(0, inner.length() - 2))
                 + """
                 [[edge]]
                 name = "outer"
@@ -349,6 +351,35 @@ class HandCheckerTest {
         HandCheck check = check(text, 10.2341).orElseThrow();
         assertThat(check.inside()).isTrue();
         assertThat(check.low()).isGreaterThan(4.0);
+    }
+
+    /** With a part that conducts perfectly a film alone resists: by rays, too, all of its length counts once. */
+    @Test
+    void aFilmOnAnObliqueBorderCountsByItsLength() {
+        String text = "[outline]\nunit = \"m\"\n"
+                + region("brick", box(-1, -1, 1, 1))
+                + "[[region]]\nname = \"flue\"\nmaterial = \"nothing\"\noutline = \"" + box(-0.5, -0.5, 0.5, 0.5)
+                + "\"\n"
+                + material("brick", 1e9)
+                + """
+                [air.hall]
+                temperature = "0 degC"
+                film = "3 W/(m2.K)"
+                [[edge]]
+                name = "in"
+                where = "holes"
+                temperature = "1 degC"
+                [[edge]]
+                name = "out"
+                where = "outside"
+                air = "hall"
+                [[ask]]
+                name = "a"
+                flow = "out"
+                """;
+        HandCheck check = check(text, 24).orElseThrow();
+        assertThat(check.low()).isCloseTo(3 * 8.0, within(1e-6));
+        assertThat(check.high()).isCloseTo(3 * 8.0, within(1e-6));
     }
 
     /** A slab through a wall: the inner air is not on one side alone, but all of it lies beyond the wall. */
@@ -403,6 +434,9 @@ class HandCheckerTest {
         assertThat(check(part + ask, 1)).isEmpty();
         assertThat(check(part + "[[ask]]\nname = \"a\"\nflow = \"outdoors\"\n", 1))
                 .isPresent();
+        String half = WALL.replace("where = \"left\"", "where = { line = \"LINESTRING (0 0, 0 400)\" }")
+                + "[[edge]]\nname = \"more\"\nwhere = { line = \"LINESTRING (0 400, 0 1000)\" }\nair = \"room\"\n";
+        assertThat(check(half + "[[ask]]\nname = \"a\"\nflow = \"inner\"\n", 1)).isEmpty();
         String alike = WALL.replace("-5 degC", "20 degC");
         assertThat(check(alike + ask, 0)).isEmpty();
     }
