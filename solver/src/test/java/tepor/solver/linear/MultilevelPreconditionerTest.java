@@ -103,6 +103,7 @@ class MultilevelPreconditionerTest {
                 ModelProblem.quadratic(CELLS, ModelProblem.constant(1)).solver().preconditioner();
         assertThat(b.unknowns(0)).isEqualTo((2 * CELLS + 1) * (2 * CELLS + 1));
         assertThat(b.unknowns(1)).isEqualTo((CELLS + 1) * (CELLS + 1));
+        assertThat(b.unknowns(2)).as("aggregates of five and more").isLessThan(b.unknowns(1) / 5);
         assertThat(b.unknowns(b.levelCount() - 1)).isLessThanOrEqualTo(300);
     }
 
