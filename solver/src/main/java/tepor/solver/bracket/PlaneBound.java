@@ -41,7 +41,7 @@ final class PlaneBound {
     record Layer(double from, double to, List<Part> regions, double atFrom, double atTo) {
         /** ∫ du / ∫ k dv, m·K/W. */
         double resistance() {
-            return Linear.integralOfInverse(to - from, atFrom, atTo);
+            return Integral.ofInverse(to - from, atFrom, atTo);
         }
     }
 

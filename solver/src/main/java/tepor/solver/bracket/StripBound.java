@@ -36,7 +36,7 @@ final class StripBound {
     record Strip(double from, double to, List<Layer> layers, double[] films, double atFrom, double atTo) {
         /** ∫ dv / R(v) with R linear, W/(m·K). */
         double conductance() {
-            return Linear.integralOfInverse(to - from, atFrom, atTo);
+            return Integral.ofInverse(to - from, atFrom, atTo);
         }
     }
 
