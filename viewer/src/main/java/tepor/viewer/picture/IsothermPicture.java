@@ -12,6 +12,7 @@ import tepor.solver.field.TemperatureField;
 import tepor.viewer.picture.LineLabels.Label;
 import tepor.viewer.picture.PictureOptions.Layer;
 import tepor.viewer.picture.contour.Isotherm;
+import tepor.viewer.picture.contour.IsothermTracer;
 import tepor.viewer.picture.contour.Isotherms;
 import tepor.viewer.picture.contour.TemperatureRange;
 import tepor.viewer.picture.contour.TemperatureScale;
@@ -64,7 +65,7 @@ public final class IsothermPicture implements Picture {
         view = new SectionView(answer.subject().section(), sheet.view, unit);
         arrows = draftArrows == null ? null : arrows(view, unit).atScaleOf(draftArrows);
 
-        isotherms = Isotherms.of(answer.field(), scale, TOLERANCE / view.scale());
+        isotherms = IsothermTracer.trace(answer.field(), scale, TOLERANCE / view.scale());
         for (Isotherm line : isotherms.lines()) {
             lines.add(new Isotherm(line.level(), view.toPixels(line.xy()), line.closed()));
         }
