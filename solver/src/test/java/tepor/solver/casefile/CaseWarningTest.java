@@ -71,7 +71,8 @@ class CaseWarningTest {
 
     @Test
     void pointsOnBordersAndCornersAreOnTheSection() {
-        for (String point : List.of("100 50", "0 0", "50 50", "20 10", "60 20", "0 25", "50 10", "10 30")) {
+        for (String point :
+                List.of("100 50", "0 0", "50 50", "20 10", "60 20", "0 25", "50 10", "10 30", "30 20", "21 11")) {
             assertThat(folder.warnings(CaseFolder.sound("peak = \"bar\"", "at = \"POINT (" + point + ")\"")))
                     .as(point)
                     .isEmpty();

@@ -324,4 +324,10 @@ class FaultyRegionAndEdgeTest {
                 """;
         assertThat(new CaseFolder(temp).errors(CaseFolder.SOUND + more)).hasSize(1);
     }
+
+    @Test
+    void aRegionWithoutMaterialMayHaveMeantAnyOfThem() {
+        List<Finding> found = new CaseFolder(temp).all(CaseFolder.sound("material = \"steel\"\n", ""));
+        assertThat(found).extracting(Finding::code).containsExactly("missing-key");
+    }
 }

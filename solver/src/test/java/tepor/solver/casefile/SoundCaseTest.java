@@ -3,7 +3,6 @@ package tepor.solver.casefile;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.security.MessageDigest;
@@ -38,195 +37,17 @@ import tepor.solver.quantity.Spread.Distribution;
 /** One case with all that the format has in this version, compared field by field. */
 class SoundCaseTest {
     private static final Offset<Double> EXACT = within(1e-12);
-    private static final String OUTLINE = """
-            # the duct, mm
-            resin: POLYGON ((0 0, 200 0, 200 100, 0 100, 0 0))
-            bars: POLYGON ((20 40, 60 40, 60 60, 20 60, 20 40))
-            bars: POLYGON ((80 40, 120 40, 120 60, 80 60, 80 40))
-            """;
-    private static final String CASE = """
-            format   = 1
-            title    = "Busbar duct in a pump house"
-            symmetry = "planar"
-            depth    = "2.5 m"
-
-            [report]
-            project  = "Pump house 3"
-            document = "C-17"
-            revision = "B"
-            purpose  = "check of the hottest bar"
-            drawing  = "D-4"
-            standard = "none"
-            prepared = "first"
-            checked  = "second"
-            approved = "third"
-
-            [outline]
-            file = "duct.wkt"
-            unit = "mm"
-            snap = "0.01 mm"
-
-            [[region]]
-            name     = "resin"
-            material = "resin"
-
-            [[region]]
-            name     = "bars"
-            material = "copper"
-            heat     = "42 ± 3 W/m"
-
-            [[region]]
-            name     = "shim"
-            outline  = "POLYGON ((140 0, 160 0, 160 20, 140 20, 140 0))"
-            material = "v1.2 wood"
-            heat     = "1.2e6 W/m3"
-
-            [[region]]
-            name     = "wire"
-            outline  = "POLYGON ((150 70, 154 70, 154 74, 150 74, 150 70))"
-            material = "copper"
-            heat     = "90 W"
-
-            [[region]]
-            name     = "void"
-            outline  = "POLYGON ((170 40, 190 40, 190 60, 170 60, 170 40))"
-            material = "nothing"
-
-            [material.resin]
-            k             = "0.65 W/(m.K) ± 10 %"
-            density       = "1700 kg/m3"
-            heat_capacity = "1000 J/(kg.K)"
-            source        = "supplier's data sheet, nominal"
-
-            [material.copper]
-            k = "380 W/(m.K)"
-
-            [material."v1.2 wood"]
-            k = { along = "0.9 W/(m.K)", across = "0.25 W/(m.K)", angle = "30 deg" }
-
-            [air.room]
-            temperature = "35 ± 3 degC"
-            film        = "8 W/(m2.K) ± 20 %"
-
-            [air.cellar]
-            temperature = "283.15 K"
-
-            [[edge]]
-            name  = "lid"
-            where = "top"
-            air   = "room"
-
-            [[edge]]
-            name  = "sole"
-            where = { line = "LINESTRING (0 0, 100 0)" }
-            air   = "cellar"
-            resistance = "0.04 m2.K/W"
-            inflow = "12 W/m2"
-
-            [[edge]]
-            name  = "flank"
-            where = ["left"]
-            air   = "18 degC"
-            film  = "5 W/(m2.K)"
-
-            [[edge]]
-            name  = "right"
-            where = "right"
-            insulated = "symmetry plane"
-
-            [[edge]]
-            name  = "duct"
-            where = "holes"
-            temperature = "60 degC"
-
-            [[edge]]
-            name  = "outside"
-            where = "rest"
-            inflow = "4 W/m"
-
-            [[edge]]
-            name  = "bar skin"
-            where = { between = ["bars", "resin"] }
-
-            [[ask]]
-            name   = "hottest bar"
-            peak   = "bars"
-            limit  = "<= 105 degC"
-            within = "0.2 K"
-
-            [[ask]]
-            name = "coldest"
-            lowest = "everything"
-
-            [[ask]]
-            name = "mean of skin"
-            mean = "bar skin"
-            limit = ">= 12.6 degC"
-            within = "2 %"
-
-            [[ask]]
-            name = "spot"
-            at = "POINT (70 50)"
-
-            [[ask]]
-            name = "to the room"
-            flow = "room"
-            with = { "edge.flank.film" = "10 W/(m2.K)", air.room.temperature = "30 degC" }
-
-            [[ask]]
-            name = "through the sole"
-            flow = "sole"
-
-            [[ask]]
-            name = "L2D"
-            coupling = ["room", "cellar"]
-
-            [[ask]]
-            name = "psi"
-            transmittance = ["room", "cellar"]
-            less = [{ u = "0.25 W/(m2.K) ± 5 %", length = "1.2 m" }, { u = "0.3 W/(m2.K)", length = "40 cm" }]
-
-            [[ask]]
-            name = "f"
-            factor = "lid"
-            inner = "room"
-            outer = "cellar"
-            limit = ">= 0.7"
-            within = 0.005
-
-            [[ask]]
-            name = "drop"
-            difference = ["hottest bar", "coldest"]
-            limit = "<= 30 K"
-
-            [mesh]
-            element = "linear"
-            angle   = "25 deg"
-            size    = "15 mm"
-            refine  = [
-              { near = "bars", size = "1 mm" },
-              { near = "lid", size = "2 mm" },
-              { near = "POINT (70 50)", size = "0.5 mm" },
-              { near = "void", size = "3 mm" },
-            ]
-            elements_at_most = 50000
-
-            [accuracy]
-            adapt      = false
-            confidence = "99 %"
-            """;
 
     @TempDir
     Path folder;
 
+    private Path file;
     private Case subject;
 
     @BeforeEach
     void read() throws Exception {
-        Path sub = Files.createDirectory(folder.resolve("busbar-duct"));
-        Files.writeString(sub.resolve("duct.wkt"), OUTLINE);
-        Files.writeString(sub.resolve("case.toml"), CASE);
-        subject = CaseReader.read(sub.resolve("case.toml"));
+        file = Path.of(SoundCaseTest.class.getResource("busbar-duct/case.toml").toURI());
+        subject = CaseReader.read(file);
     }
 
     @Test
@@ -256,7 +77,8 @@ class SoundCaseTest {
     @Test
     void theFilesWithTheirDigests() throws Exception {
         assertThat(subject.files()).extracting("name").containsExactly("case.toml", "duct.wkt");
-        byte[] digest = MessageDigest.getInstance("SHA-256").digest(OUTLINE.getBytes(StandardCharsets.UTF_8));
+        byte[] digest =
+                MessageDigest.getInstance("SHA-256").digest(Files.readAllBytes(file.resolveSibling("duct.wkt")));
         assertThat(subject.files().get(1).sha256()).isEqualTo(HexFormat.of().formatHex(digest));
     }
 
