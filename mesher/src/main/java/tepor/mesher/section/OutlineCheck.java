@@ -119,7 +119,7 @@ public final class OutlineCheck {
                 check.spikes(),
                 "take the spike's point out: it encloses nothing");
         if (check.spikes().isEmpty()) {
-            faults("self-overlap", "runs over its own line at ", check.overlaps(), "draw each side once");
+            faults("self-overlap", "runs over its own line between ", check.overlaps(), "draw each side once");
             faults(
                     "self-touching",
                     "touches itself at ",

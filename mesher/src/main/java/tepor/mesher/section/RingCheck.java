@@ -17,6 +17,9 @@ final class RingCheck {
     /** An area below this share of the square of the ring's diameter is round-off. */
     private static final double NO_AREA = 1e-13;
 
+    /** Directions that differ by less, radians, differ by round-off. */
+    private static final double SAME_DIRECTION = 1e-12;
+
     private final Coordinate[] points; // closed, without repeated points
     private final List<Coordinate> repeated = new ArrayList<>();
     private final Set<Coordinate> crossings = new LinkedHashSet<>();
@@ -40,6 +43,7 @@ final class RingCheck {
         if (points.length >= 4) {
             findSpikes();
             findMeetings();
+            touches.removeAll(overlaps);
         }
         // A figure of eight may have lobes that cancel; its fault is the crossing.
         flat = enclosesNothing && crossings.isEmpty();
@@ -70,7 +74,7 @@ final class RingCheck {
         return spikes;
     }
 
-    /** Where the ring begins to run over a part of itself that is not its neighbour. */
+    /** Between which points the ring runs over a part of itself that is not its neighbour. */
     Set<Coordinate> overlaps() {
         return overlaps;
     }
@@ -115,6 +119,7 @@ final class RingCheck {
         Coordinate at = intersector.getIntersection(0).copy();
         if (intersector.getIntersectionNum() == 2) {
             overlaps.add(at);
+            overlaps.add(intersector.getIntersection(1).copy());
         } else if (intersector.isProper() || crossesAt(at)) {
             crossings.add(at);
         } else {
@@ -139,7 +144,8 @@ final class RingCheck {
         }
         for (int a = 0; a < passes.size(); a++) {
             for (int b = a + 1; b < passes.size(); b++) {
-                if (isBetween(passes.get(b)[0], passes.get(a)) != isBetween(passes.get(b)[1], passes.get(a))) {
+                if (!runTogether(passes.get(a), passes.get(b))
+                        && isBetween(passes.get(b)[0], passes.get(a)) != isBetween(passes.get(b)[1], passes.get(a))) {
                     return true;
                 }
             }
@@ -149,6 +155,18 @@ final class RingCheck {
 
     private static double angle(Coordinate from, Coordinate to) {
         return Math.atan2(to.y - from.y, to.x - from.x);
+    }
+
+    /** Whether two passes have a direction in common: then the ring runs over itself, which is another fault. */
+    private static boolean runTogether(double[] pass, double[] other) {
+        for (double angle : pass) {
+            for (double otherAngle : other) {
+                if (Math.abs(Math.IEEEremainder(angle - otherAngle, 2 * Math.PI)) < SAME_DIRECTION) {
+                    return true;
+                }
+            }
+        }
+        return false;
     }
 
     private static boolean isBetween(double angle, double[] pass) {

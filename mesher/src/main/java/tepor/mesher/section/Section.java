@@ -127,7 +127,10 @@ public final class Section {
         return hole[region];
     }
 
-    /** What is left of the region once later ones lie over it, m². By the boundary integral over its segments. */
+    /**
+     * What is left of the region once later ones lie over it, m². By the boundary integral over its segments; for a region
+     * of nothing it holds only where material lies all around, as nothing separates it from emptiness elsewhere.
+     */
     public double area(int region) {
         // Coordinates are taken relative to one vertex, so that a section far from the origin loses no digits.
         double x0 = x(0);

@@ -1,6 +1,7 @@
 package tepor.mesher.section;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.fail;
 
 import java.util.ArrayList;
 import java.util.HashSet;
@@ -61,16 +62,16 @@ final class SectionAudit {
         Coordinate[] d = ends(section, t);
         Set<Integer> common = new HashSet<>(List.of(section.start(s), section.end(s)));
         common.retainAll(Set.of(section.start(t), section.end(t)));
+        double distance;
         if (common.isEmpty()) {
-            assertThat(Distance.segmentToSegment(c[0], c[1], d[0], d[1]))
-                    .as("distance of segments %d and %d", s, t)
-                    .isGreaterThan(0.5 * section.snap());
+            distance = Distance.segmentToSegment(c[0], c[1], d[0], d[1]);
         } else {
             int farOfT = common.contains(section.start(t)) ? section.end(t) : section.start(t);
             Coordinate far = new Coordinate(section.x(farOfT), section.y(farOfT));
-            assertThat(Distance.pointToSegment(far, c[0], c[1]))
-                    .as("distance of vertex %d from segment %d", farOfT, s)
-                    .isGreaterThan(0.5 * section.snap());
+            distance = Distance.pointToSegment(far, c[0], c[1]);
+        }
+        if (distance <= 0.5 * section.snap()) {
+            fail("segments %d and %d are %s apart, and are not joined".formatted(s, t, distance));
         }
     }
 

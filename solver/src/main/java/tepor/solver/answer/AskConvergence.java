@@ -89,10 +89,20 @@ final class AskConvergence {
                     value.where(),
                     error(i),
                     verdict(ask, value.value()),
-                    HandChecker.check(subject, AskValues.of(subject, ask), ask, value.value())
-                            .orElse(null)));
+                    handCheck(ask, value.value(), convergences.get(i).error())));
         }
         return answers;
+    }
+
+    /** A bracket narrower than the mesh error is not left by a value that is off by no more than that. */
+    private HandCheck handCheck(Ask ask, double value, double error) {
+        HandCheck check = HandChecker.check(subject, AskValues.of(subject, ask), ask, value)
+                .orElse(null);
+        if (check == null || check.inside()) {
+            return check;
+        }
+        boolean inside = value + error >= check.low() && value - error <= check.high();
+        return new HandCheck(check.low(), check.high(), inside, check.working());
     }
 
     /**

@@ -5,10 +5,15 @@ import java.util.function.BooleanSupplier;
 import no.uib.cipr.matrix.DenseVector;
 import no.uib.cipr.matrix.sparse.CG;
 import no.uib.cipr.matrix.sparse.IterativeSolverNotConvergedException;
+import tepor.solver.linear.SolveReport.Reason;
 
 /**
  * Solves A x = b by conjugate gradients (MTJ's) with a {@link MultilevelPreconditioner}, which is built once and serves
  * every right-hand side. All its decisions are relative: scaling A or b changes nothing but the scale of x.
+ *
+ * <p>The solution is refined in steps, each of which solves for the correction that the residual asks for, the residual
+ * being computed in doubled precision (Wilkinson 1963, "Rounding Errors in Algebraic Processes", ch. 3). So the digits of x
+ * do not suffer where conductivities differ by orders of magnitude, and the residual reported is the true one.
  *
  * <p>Not for use by several threads at once: the workspace is its own.
  */
@@ -17,16 +22,23 @@ public final class LinearSolver {
     public static final double TOLERANCE = 1e-12;
 
     private static final int ITERATION_LIMIT = 1000;
-    private static final int RESTARTS = 2;
+    /** The first solution and at most two corrections. */
+    private static final int RUNS = 3;
+    /** Each run reduces the residual to this share of itself: what one run can do for certain in double precision. */
+    private static final double RUN_REDUCTION = 1e-7;
     /** Up to so many times the estimated rounding of b − Ax, a residual is called rounding. */
     private static final double ROUNDING_MARGIN = 8;
-    /** A relative residual above this is no solution, even where rounding explains it: the matrix is as good as singular. */
-    private static final double LARGEST_ROUNDING = 1e-3;
+    /**
+     * A residual is no rounding where so much of the right-hand side's sum stays unbalanced: heat put into a part that
+     * nothing ties to a temperature drives the solution up until rounding hides it.
+     */
+    private static final double UNBALANCED = 1e-3;
 
     private final SymmetricMatrix a;
     private final MultilevelPreconditioner preconditioner;
     private final CG conjugateGradients;
     private final double[] residual;
+    private final double[] correction;
 
     /**
      * For matrices of three-node triangles, or any other near M-matrix.
@@ -51,6 +63,7 @@ public final class LinearSolver {
         this.a = a;
         this.preconditioner = preconditioner;
         residual = new double[a.numRows()];
+        correction = new double[a.numRows()];
         conjugateGradients = new CG(new DenseVector(residual, false));
         conjugateGradients.setPreconditioner(preconditioner);
     }
@@ -74,48 +87,70 @@ public final class LinearSolver {
         double bNorm = norm(b);
         if (bNorm == 0) {
             Arrays.fill(x, 0);
-            return new SolveReport(0, 0, SolveReport.Reason.CONVERGED);
+            return new SolveReport(0, 0, Reason.CONVERGED);
         }
         double target = tolerance * bNorm;
+        Residual.compute(a.rows(), b, x, residual);
+        double now = norm(residual);
         int iterations = 0;
-        double before = Double.POSITIVE_INFINITY;
-        for (int run = 0; ; run++) {
-            SolveMonitor monitor = new SolveMonitor(target, ITERATION_LIMIT - iterations, stop);
-            boolean positive = run(b, x, monitor);
+        Reason reason = now <= target ? Reason.CONVERGED : null;
+        for (int run = 1; reason == null; run++) {
+            // Half the target, for the recurrence's residual and the true one part a little.
+            double runTarget = Math.max(0.5 * target, RUN_REDUCTION * now);
+            SolveMonitor monitor = new SolveMonitor(runTarget, ITERATION_LIMIT - iterations, stop);
+            boolean positive = correct(x, monitor);
             iterations += monitor.iterations();
-            double now = residualNorm(b, x);
-            boolean rounding = now <= Math.min(ROUNDING_MARGIN * roundingOfResidual(b, x), LARGEST_ROUNDING * bNorm);
-            SolveReport.Reason reason;
+            double before = now;
+            Residual.compute(a.rows(), b, x, residual);
+            now = norm(residual);
             if (!positive) {
-                reason = SolveReport.Reason.NOT_POSITIVE_DEFINITE;
+                reason = Reason.NOT_POSITIVE_DEFINITE;
             } else if (now <= target) {
-                reason = SolveReport.Reason.CONVERGED;
-            } else if (rounding) {
-                reason = SolveReport.Reason.ROUND_OFF;
+                reason = Reason.CONVERGED;
             } else if (iterations >= ITERATION_LIMIT) {
-                reason = SolveReport.Reason.ITERATION_LIMIT;
-            } else if (monitor.stagnated() || run == RESTARTS || now > before / 2) {
-                reason = SolveReport.Reason.STAGNATED;
-            } else {
-                before = now; // the residual that the recurrence carries has drifted from the true one: start over from
-                // it
-                continue;
+                reason = Reason.ITERATION_LIMIT;
+            } else if (run == RUNS || run > 1 && (isRounding(b, x, now) || now > before / 2)) {
+                // The second run is made even where the residual is rounding already: it sets the digits of x right.
+                reason = isRounding(b, x, now) ? Reason.ROUND_OFF : Reason.STAGNATED;
+            } else if (monitor.stagnated()) {
+                reason = Reason.STAGNATED;
             }
-            return new SolveReport(iterations, now / bNorm, reason);
         }
+        return new SolveReport(iterations, now / bNorm, reason);
     }
 
-    /** @return whether every direction met had pᵀAp > 0 */
-    private boolean run(double[] b, double[] x, SolveMonitor monitor) {
+    /**
+     * Adds to x the solution of A e = residual.
+     *
+     * @return whether every direction met had pᵀAp > 0
+     */
+    private boolean correct(double[] x, SolveMonitor monitor) {
+        Arrays.fill(correction, 0);
         conjugateGradients.setIterationMonitor(monitor);
+        boolean positive = true;
         try {
-            conjugateGradients.solve(new CurvatureProbe(a), new DenseVector(b, false), new DenseVector(x, false));
-            return true;
+            conjugateGradients.solve(
+                    new CurvatureProbe(a), new DenseVector(residual, false), new DenseVector(correction, false));
         } catch (CurvatureProbe.NotPositiveException e) {
-            return false;
+            positive = false;
         } catch (IterativeSolverNotConvergedException e) {
             throw new IllegalStateException("SolveMonitor reports by its state, never by this", e);
         }
+        for (int i = 0; i < x.length; i++) {
+            x[i] += correction[i];
+        }
+        return positive;
+    }
+
+    private boolean isRounding(double[] b, double[] x, double residualNorm) {
+        double unbalanced = 0;
+        double all = 0;
+        for (int i = 0; i < b.length; i++) {
+            unbalanced += residual[i];
+            all += Math.abs(b[i]);
+        }
+        return residualNorm <= ROUNDING_MARGIN * Residual.rounding(a.rows(), b, x)
+                && Math.abs(unbalanced) <= UNBALANCED * all;
     }
 
     private void check(double[] vector, String what) {
@@ -128,26 +163,6 @@ public final class LinearSolver {
                 throw new IllegalArgumentException("entry " + i + " of the " + what + " is " + vector[i]);
             }
         }
-    }
-
-    private double residualNorm(double[] b, double[] x) {
-        System.arraycopy(b, 0, residual, 0, b.length);
-        a.rows().multiplyAdd(-1, x, residual);
-        return norm(residual);
-    }
-
-    /** Euclidean norm of ε (|b| + |A| |x|): what storing x to double precision does to b − Ax, about. */
-    private double roundingOfResidual(double[] b, double[] x) {
-        CompressedRows rows = a.rows();
-        double sum = 0;
-        for (int i = 0; i < b.length; i++) {
-            double size = Math.abs(b[i]);
-            for (int k = rows.rowStart[i]; k < rows.rowStart[i + 1]; k++) {
-                size += Math.abs(rows.value[k] * x[rows.column[k]]);
-            }
-            sum += size * size;
-        }
-        return 0x1p-53 * Math.sqrt(sum);
     }
 
     private static double norm(double[] v) {

@@ -7,12 +7,16 @@ import java.util.List;
  * Judges from the movement of one figure over the rounds of refinement how far off the mesh may be. An estimate, not a
  * bound.
  *
- * <p>A figure is settled once it moved by less than a quarter of its tolerance twice running; three times its last movement
- * is its error.
+ * <p>A figure is settled once it moved by no more than a quarter of its tolerance twice running. Three times its last
+ * movement is its error, or three times half the movement before where that is more: a single small movement may be chance,
+ * as at corners, where the last one alone was measured to fall short.
  */
 public final class Convergence {
     private static final double SETTLED = 0.25;
     private static final double SAFETY = 3;
+
+    /** The equations are not solved more closely than this, relative to the figure. */
+    private static final double ROUND_OFF = 1e-9;
 
     private final List<Double> values = new ArrayList<>();
     private double within = Double.NaN;
@@ -30,12 +34,16 @@ public final class Convergence {
 
     /** Half-width of the error interval; infinite after a single round. */
     public double error() {
-        return values.size() < 2 ? Double.POSITIVE_INFINITY : SAFETY * movement(0);
+        if (values.size() < 2) {
+            return Double.POSITIVE_INFINITY;
+        }
+        double moved = values.size() < 3 ? movement(0) : Math.max(movement(0), 0.5 * movement(1));
+        return Math.max(SAFETY * moved, ROUND_OFF * Math.abs(values.get(values.size() - 1)));
     }
 
-    /** Whether the figure moved by less than a quarter of its tolerance twice running. */
+    /** Whether the figure moved by no more than a quarter of its tolerance twice running. */
     public boolean settled() {
-        return values.size() >= 3 && movement(0) < SETTLED * within && movement(1) < SETTLED * within;
+        return values.size() >= 3 && movement(0) <= SETTLED * within && movement(1) <= SETTLED * within;
     }
 
     /** Movement in the last round (back = 0) or the one before (back = 1). */

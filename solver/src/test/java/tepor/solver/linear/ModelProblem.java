@@ -4,13 +4,14 @@ import java.util.Arrays;
 import java.util.Random;
 
 /**
- * Conduction in the unit square on a perturbed mesh of n × n cells, each of two triangles with a diagonal drawn by lot;
+ * Conduction in the unit square on a perturbed mesh of n × n cells, each of two triangles with a diagonal drawn by lot (graded: cells shrink towards x = 0 and y = 0 to e⁻⁴ of the largest, and are
+ * stretched up to e⁴ : 1);
  * films of coefficient 1 at the left end (surroundings at 1) and the right end (at 0) unless stated otherwise.
  */
 final class ModelProblem {
-    /** Conductivity along x and y at a point. */
+    /** Conductivities kxx, kyy and kxy at a point. */
     interface Conductivity {
-        void at(double x, double y, double[] kxy);
+        void at(double x, double y, double[] k);
     }
 
     final SparsityPattern pattern;
@@ -26,10 +27,10 @@ final class ModelProblem {
     private final int[] unknown;
 
     private ModelProblem(
-            int n, boolean quadratic, boolean fixedEnds, Conductivity conductivity, double scale, long seed) {
+            int n, boolean quadratic, boolean fixedEnds, Conductivity conductivity, double scale, double grading) {
         this.n = n;
         nodesPerElement = quadratic ? 6 : 3;
-        Random random = new Random(seed);
+        Random random = new Random(1);
         int cornerCount = (n + 1) * (n + 1);
         xy = new double[2 * cornerCount];
         for (int j = 0; j <= n; j++) {
@@ -37,8 +38,8 @@ final class ModelProblem {
                 int node = j * (n + 1) + i;
                 double dx = i == 0 || i == n ? 0 : 0.5 * (random.nextDouble() - 0.5);
                 double dy = j == 0 || j == n ? 0 : 0.5 * (random.nextDouble() - 0.5);
-                xy[2 * node] = (i + dx) / n;
-                xy[2 * node + 1] = (j + dy) / n;
+                xy[2 * node] = place((i + dx) / n, grading);
+                xy[2 * node + 1] = place((j + dy) / n, grading);
             }
         }
         risingDiagonal = new boolean[n * n];
@@ -84,30 +85,54 @@ final class ModelProblem {
     }
 
     static ModelProblem linear(int n, Conductivity conductivity) {
-        return new ModelProblem(n, false, false, conductivity, 1, 1);
+        return new ModelProblem(n, false, false, conductivity, 1, 0);
     }
 
     static ModelProblem quadratic(int n, Conductivity conductivity) {
-        return new ModelProblem(n, true, false, conductivity, 1, 1);
+        return new ModelProblem(n, true, false, conductivity, 1, 0);
     }
 
     /** Temperatures fixed at 1 on the left and 0 on the right end, eliminated; three- or six-node triangles. */
     static ModelProblem fixedEnds(int n, boolean quadratic, Conductivity conductivity) {
-        return new ModelProblem(n, quadratic, true, conductivity, 1, 1);
+        return new ModelProblem(n, quadratic, true, conductivity, 1, 0);
+    }
+
+    /**
+     * The problems by name: constant, weak films (conductivity 1e4), checkerboard, strong checkerboard (1 : 1e8),
+     * inclusions, anisotropic, rotated, layers, graded, fixed ends (with layers).
+     */
+    static ModelProblem named(String name, boolean quadratic, int n) {
+        Conductivity conductivity = switch (name) {
+            case "constant", "graded" -> constant(1);
+            case "weak films" -> constant(1e4);
+            case "checkerboard" -> checkerboard(1e4);
+            case "strong checkerboard" -> checkerboard(1e8);
+            case "inclusions" -> inclusions();
+            case "anisotropic" -> anisotropic(100);
+            case "rotated" -> rotated(100);
+            case "layers", "fixed ends" -> thinLayers();
+            default -> throw new IllegalArgumentException(name);
+        };
+        boolean fixed = name.equals("fixed ends");
+        return new ModelProblem(n, quadratic, fixed, conductivity, 1, name.equals("graded") ? 4 : 0);
+    }
+
+    LinearSolver solver() {
+        return corners == null ? new LinearSolver(matrix) : LinearSolver.quadratic(matrix, corners);
     }
 
     /** Everything multiplied by a factor. */
     static ModelProblem scaled(int n, boolean quadratic, Conductivity conductivity, double scale) {
-        return new ModelProblem(n, quadratic, false, conductivity, scale, 1);
+        return new ModelProblem(n, quadratic, false, conductivity, scale, 0);
     }
 
-    static Conductivity constant() {
-        return (x, y, k) -> Arrays.fill(k, 1);
+    static Conductivity constant(double conductivity) {
+        return (x, y, k) -> ground(k, conductivity);
     }
 
     /** 8 × 8 squares, 1 and the contrast in turn. */
     static Conductivity checkerboard(double contrast) {
-        return (x, y, k) -> Arrays.fill(k, ((int) (8 * x) + (int) (8 * y)) % 2 == 0 ? 1 : contrast);
+        return (x, y, k) -> ground(k, ((int) (8 * x) + (int) (8 * y)) % 2 == 0 ? 1 : contrast);
     }
 
     /** 60 discs by lot, of 1e4 and 1e−4 in turn, in a ground of 1. */
@@ -120,10 +145,10 @@ final class ModelProblem {
             disc[3 * d + 2] = 0.02 + 0.04 * random.nextDouble();
         }
         return (x, y, k) -> {
-            Arrays.fill(k, 1);
+            ground(k, 1);
             for (int d = 0; d < 60; d++) {
                 if (Math.hypot(x - disc[3 * d], y - disc[3 * d + 1]) < disc[3 * d + 2]) {
-                    Arrays.fill(k, d % 2 == 0 ? 1e4 : 1e-4);
+                    ground(k, d % 2 == 0 ? 1e4 : 1e-4);
                 }
             }
         };
@@ -134,20 +159,42 @@ final class ModelProblem {
         return (x, y, k) -> {
             k[0] = ratio;
             k[1] = 1;
+            k[2] = 0;
         };
+    }
+
+    /** The ratio along a line that rises by 30°, 1 across it. */
+    static Conductivity rotated(double ratio) {
+        double c = Math.cos(Math.PI / 6);
+        double s = Math.sin(Math.PI / 6);
+        return (x, y, k) -> {
+            k[0] = ratio * c * c + s * s;
+            k[1] = ratio * s * s + c * c;
+            k[2] = (ratio - 1) * c * s;
+        };
+    }
+
+    private static void ground(double[] k, double conductivity) {
+        k[0] = conductivity;
+        k[1] = conductivity;
+        k[2] = 0;
     }
 
     /** Horizontal and vertical foils one to two cells of a mesh of 64 thick, 1e3 and 1e−3, in a ground of 1. */
     static Conductivity thinLayers() {
         return (x, y, k) -> {
-            Arrays.fill(k, 1);
+            ground(k, 1);
             if (Math.abs(y - 0.3) < 0.01 || Math.abs(x - 0.7) < 0.01) {
-                Arrays.fill(k, 1e3);
+                ground(k, 1e3);
             }
             if (Math.abs(y - 0.6) < 0.01) {
-                Arrays.fill(k, 1e-3);
+                ground(k, 1e-3);
             }
         };
+    }
+
+    private static double place(double t, double grading) {
+        return grading == 0 ? t : Math.expm1(grading * t) / Math.expm1(grading);
     }
 
     private boolean atEnd(int node) {
@@ -202,7 +249,7 @@ final class ModelProblem {
             y[c] = xy[2 * nodes[first + c] + 1];
         }
         double twiceArea = (x[1] - x[0]) * (y[2] - y[0]) - (x[2] - x[0]) * (y[1] - y[0]);
-        double[] k = new double[2];
+        double[] k = new double[3];
         int cell = e / 2;
         conductivity.at((cell % n + 0.5) / n, (cell / n + 0.5) / n, k);
         double[] gx = new double[3];
@@ -230,8 +277,11 @@ final class ModelProblem {
             }
             for (int i = 0; i < nodesPerElement; i++) {
                 for (int j = 0; j < nodesPerElement; j++) {
-                    element[i * nodesPerElement + j] +=
-                            twiceArea / 6 * (k[0] * (dx[i] * dx[j]) + k[1] * (dy[i] * dy[j]));
+                    element[i * nodesPerElement + j] += twiceArea
+                            / 6
+                            * (k[0] * (dx[i] * dx[j])
+                                    + k[1] * (dy[i] * dy[j])
+                                    + k[2] * (dx[i] * dy[j] + dy[i] * dx[j]));
                 }
             }
         }

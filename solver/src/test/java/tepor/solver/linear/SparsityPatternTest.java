@@ -22,7 +22,7 @@ class SparsityPatternTest {
 
     @Test
     void elementSlotsAreThoseThatTheSearchFinds() {
-        ModelProblem problem = ModelProblem.fixedEnds(6, true, ModelProblem.constant());
+        ModelProblem problem = ModelProblem.fixedEnds(6, true, ModelProblem.constant(1));
         SparsityPattern pattern = problem.pattern;
         for (int row = 0; row < pattern.unknowns(); row++) {
             for (int slot = pattern.rowStart()[row]; slot < pattern.rowStart()[row + 1]; slot++) {
@@ -76,7 +76,7 @@ class SparsityPatternTest {
         double[] element = random.doubles(9).toArray();
         double[] reused = new double[first.pattern.slotCount()];
         double[] anew = new double[first.pattern.slotCount()];
-        SparsityPattern again = ModelProblem.linear(10, ModelProblem.constant()).pattern;
+        SparsityPattern again = ModelProblem.linear(10, ModelProblem.constant(1)).pattern;
         for (int e = 0; e < 200; e++) {
             first.pattern.add(e, element, reused);
             again.add(e, element, anew);

@@ -8,9 +8,9 @@ import java.util.concurrent.CancellationException;
 import java.util.function.BooleanSupplier;
 import tepor.solver.answer.Answer;
 import tepor.viewer.export.AnswerJson;
-import tepor.viewer.export.AnswerPictures;
 import tepor.viewer.export.OutputFolder;
 import tepor.viewer.export.PictureFile;
+import tepor.viewer.export.PictureFiles;
 import tepor.viewer.picture.PictureOptions;
 import tepor.viewer.report.Report;
 
@@ -34,7 +34,7 @@ final class AnswerFiles {
     List<String> write(Path folder, BooleanSupplier stopped) throws IOException {
         try (OutputFolder output = OutputFolder.begin(folder)) {
             output.write("answers.json", out -> AnswerJson.write(answer, out));
-            PictureFile isotherms = AnswerPictures.write(answer, output, layers);
+            PictureFile isotherms = PictureFiles.isotherms(answer, output, layers);
             output.write("report.html", out -> Report.write(answer, List.of(isotherms), out));
             if (stopped.getAsBoolean()) {
                 throw new CancellationException();

@@ -5,11 +5,15 @@ import java.nio.file.Path;
 import java.util.concurrent.Callable;
 import java.util.function.BooleanSupplier;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
+import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Parameters;
+import picocli.CommandLine.Spec;
 import tepor.solver.answer.Inspection;
 import tepor.solver.model.Case;
 import tepor.viewer.export.InspectionJson;
+import tepor.viewer.export.PictureFiles;
 
 /** {@code tepor inspect}. */
 @Command(
@@ -23,6 +27,16 @@ final class InspectCommand implements Callable<Status> {
 
     @Option(names = "--json", description = "Print one JSON object, and nothing else, on standard output.")
     private boolean json;
+
+    @Option(
+            names = "--out",
+            paramLabel = "PICTURE",
+            description = "Where to draw the named outline, ending in .png or .svg. "
+                    + "Default: ./NAME-outline.png; with --json, none.")
+    private Path out;
+
+    @Spec
+    private CommandSpec spec;
 
     private final Calculation calculation;
     private final Terminal terminal;
@@ -38,6 +52,9 @@ final class InspectCommand implements Callable<Status> {
 
     @Override
     public Status call() {
+        if (out != null && !PictureFiles.isPicture(out)) {
+            throw new ParameterException(spec.commandLine(), "--out " + out + " must end in .png or .svg");
+        }
         try {
             Inspection inspection = inspect(calculation.read(CasePath.file(argument)));
             AnswerText.warnings(inspection.warnings(), terminal.err());
@@ -46,10 +63,25 @@ final class InspectCommand implements Callable<Status> {
             } else {
                 new InspectionText(inspection, terminal.out()).print();
             }
+            draw(inspection);
             terminal.out().flush();
             return Status.ANSWERED;
         } catch (IOException | RuntimeException | OutOfMemoryError | StackOverflowError e) {
             return failures.of(argument.toString(), e);
+        }
+    }
+
+    private void draw(Inspection inspection) throws IOException {
+        Path picture = out;
+        if (picture == null && !json) {
+            picture = Path.of(inspection.subject().name() + "-outline.png");
+        }
+        if (picture != null) {
+            PictureFiles.outline(inspection, picture);
+        }
+        if (picture != null && !json) {
+            terminal.out().println();
+            terminal.out().println("Drawn in " + picture);
         }
     }
 

@@ -42,7 +42,7 @@ final class InputTable {
             for (Edge edge : subject.edges()) {
                 row(
                         edge.name(),
-                        ConditionWords.of(edge),
+                        UnitWords.pretty(ConditionWords.of(edge)),
                         "",
                         Rounding.significant(edge.pieces().length(subject.section()), 5));
             }

@@ -16,13 +16,14 @@ public final class Rounding {
         return fixed(value, decimals(value, error));
     }
 
-    /** An error with two significant digits, rounded up: it is never said to be smaller than it is. */
+    /** An error with its two significant digits, rounded up: it is never said to be smaller than it is. */
     public static String error(double error) {
         if (!Double.isFinite(error)) {
             return "unknown";
         }
-        BigDecimal up = new BigDecimal(Math.abs(error)).round(new MathContext(2, RoundingMode.UP));
-        return plainOrPower(up);
+        // What conversion did to the last bits is not to be rounded up.
+        BigDecimal figure = new BigDecimal(Math.abs(error)).round(new MathContext(MOST_DIGITS));
+        return plainOrPower(figure.setScale(figure.scale() + MOST_DIGITS).round(new MathContext(2, RoundingMode.UP)));
     }
 
     /** A figure with at most so many significant digits and no idle zeros. */
@@ -30,7 +31,9 @@ public final class Rounding {
         if (!Double.isFinite(value)) {
             return "unknown";
         }
-        return plainOrPower(new BigDecimal(value).round(new MathContext(digits, RoundingMode.HALF_EVEN)));
+        return plainOrPower(new BigDecimal(value)
+                .round(new MathContext(digits, RoundingMode.HALF_EVEN))
+                .stripTrailingZeros());
     }
 
     /** Decimals that a value of this error is shown with. */
@@ -62,11 +65,10 @@ public final class Rounding {
         if (value.signum() == 0) {
             return "0";
         }
-        BigDecimal bare = value.stripTrailingZeros();
-        int exponent = bare.precision() - bare.scale() - 1;
+        int exponent = value.precision() - value.scale() - 1;
         if (exponent >= -4 && exponent <= 9) {
-            return bare.toPlainString();
+            return value.toPlainString();
         }
-        return bare.scaleByPowerOfTen(-exponent).toPlainString() + "e" + exponent;
+        return value.scaleByPowerOfTen(-exponent).toPlainString() + "e" + exponent;
     }
 }

@@ -13,7 +13,7 @@ public final class UnitWords {
     public static String pretty(String text) {
         return text.replace("degC", "°C")
                 .replace("degF", "°F")
-                .replaceAll("(?<=[A-Za-z)])\\.(?=[A-Za-z(])", "·")
+                .replaceAll("(?<=[A-Za-z0-9)])\\.(?=[A-Za-z(])", "·")
                 .replaceAll("\\bm\\^?2\\b", "m²")
                 .replaceAll("\\bm\\^?3\\b", "m³")
                 .replace("<=", "≤")

@@ -1,0 +1,156 @@
+package tepor.viewer;
+
+import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.classes;
+import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.noClasses;
+import static com.tngtech.archunit.library.dependencies.SlicesRuleDefinition.slices;
+
+import com.tngtech.archunit.core.domain.Dependency;
+import com.tngtech.archunit.core.domain.JavaClass;
+import com.tngtech.archunit.core.importer.ImportOption;
+import com.tngtech.archunit.junit.AnalyzeClasses;
+import com.tngtech.archunit.junit.ArchTest;
+import com.tngtech.archunit.lang.ArchCondition;
+import com.tngtech.archunit.lang.ArchRule;
+import com.tngtech.archunit.lang.ConditionEvents;
+import com.tngtech.archunit.lang.SimpleConditionEvent;
+import com.tngtech.archunit.library.GeneralCodingRules;
+import com.tngtech.archunit.library.dependencies.SliceAssignment;
+import com.tngtech.archunit.library.dependencies.SliceIdentifier;
+import java.util.List;
+
+/** The arrows between modules and packages, and what only certain packages may do. */
+@AnalyzeClasses(packages = "tepor", importOptions = ImportOption.DoNotIncludeTests.class)
+class ArchitectureTest {
+    /** From the bottom to the top: a package uses itself and what stands before it. */
+    private static final List<String> LAYERS = List.of(
+            "tepor.mesher.outline",
+            "tepor.mesher.section",
+            "tepor.mesher.triangulation",
+            "tepor.mesher.refinement",
+            "tepor.mesher.mesh",
+            "tepor.solver.quantity",
+            "tepor.solver.model",
+            "tepor.solver.casefile",
+            "tepor.solver.element",
+            "tepor.solver.assembly",
+            "tepor.solver.linear",
+            "tepor.solver.field",
+            "tepor.solver.bracket",
+            "tepor.solver.trust",
+            "tepor.solver.answer",
+            "tepor.viewer.picture",
+            "tepor.viewer.export",
+            "tepor.viewer.report",
+            "tepor.viewer.window",
+            "tepor.viewer.command");
+
+    @ArchTest
+    static final ArchRule packagesUseOnlyWhatStandsBelow =
+            classes().that().resideInAPackage("tepor..").should(useOnlyWhatStandsBelow());
+
+    @ArchTest
+    static final ArchRule noCirclesBetweenPackages = slices().assignedFrom(new SliceAssignment() {
+                @Override
+                public SliceIdentifier getIdentifierOf(JavaClass one) {
+                    return SliceIdentifier.of(one.getPackageName());
+                }
+
+                @Override
+                public String getDescription() {
+                    return "packages";
+                }
+            })
+            .should()
+            .beFreeOfCycles();
+
+    @ArchTest
+    static final ArchRule noCirclesBetweenFiles = slices().assignedFrom(new SliceAssignment() {
+                @Override
+                public SliceIdentifier getIdentifierOf(JavaClass one) {
+                    return SliceIdentifier.of(outermost(one).getName());
+                }
+
+                @Override
+                public String getDescription() {
+                    return "files";
+                }
+            })
+            .should()
+            .beFreeOfCycles();
+
+    @ArchTest
+    static final ArchRule onlyTheCommandLinePrints = noClasses()
+            .that()
+            .resideOutsideOfPackage("tepor.viewer.command..")
+            .should(GeneralCodingRules.ACCESS_STANDARD_STREAMS);
+
+    @ArchTest
+    static final ArchRule onlyMainEndsTheProcess = noClasses()
+            .that()
+            .doNotHaveFullyQualifiedName("tepor.viewer.command.Main")
+            .should()
+            .callMethod(System.class, "exit", int.class)
+            .orShould()
+            .callMethod(Runtime.class, "exit", int.class)
+            .orShould()
+            .callMethod(Runtime.class, "halt", int.class);
+
+    @ArchTest
+    static final ArchRule onlyQuantityAndCaseFileKnowUnits = noClasses()
+            .that()
+            .resideOutsideOfPackages("tepor.solver.quantity..", "tepor.solver.casefile..")
+            .should()
+            .dependOnClassesThat()
+            .resideInAnyPackage("javax.measure..", "tech.units..", "systems.uom..", "si.uom..", "tech.uom..");
+
+    @ArchTest
+    static final ArchRule onlyTheWindowKnowsJavaFx = noClasses()
+            .that()
+            .resideOutsideOfPackage("tepor.viewer.window..")
+            .should()
+            .dependOnClassesThat()
+            .resideInAnyPackage("javafx..");
+
+    @ArchTest
+    static final ArchRule onlyTheCommandLineKnowsItsLibraries = noClasses()
+            .that()
+            .resideOutsideOfPackage("tepor.viewer.command..")
+            .should()
+            .dependOnClassesThat()
+            .resideInAnyPackage("picocli..", "me.tongfei..");
+
+    @ArchTest
+    static final ArchRule nobodyThrowsGenericExceptions = GeneralCodingRules.NO_CLASSES_SHOULD_THROW_GENERIC_EXCEPTIONS;
+
+    private static JavaClass outermost(JavaClass one) {
+        return one.getEnclosingClass().map(ArchitectureTest::outermost).orElse(one);
+    }
+
+    private static int layer(JavaClass one) {
+        String name = one.getPackageName() + ".";
+        for (int i = 0; i < LAYERS.size(); i++) {
+            if (name.startsWith(LAYERS.get(i) + ".")) {
+                return i;
+            }
+        }
+        return -1;
+    }
+
+    private static ArchCondition<JavaClass> useOnlyWhatStandsBelow() {
+        return new ArchCondition<>("use only packages that stand below their own") {
+            @Override
+            public void check(JavaClass one, ConditionEvents events) {
+                int own = layer(one);
+                if (own < 0) {
+                    events.add(SimpleConditionEvent.violated(one, one.getName() + " is in no known package"));
+                }
+                for (Dependency dependency : one.getDirectDependenciesFromSelf()) {
+                    JavaClass target = dependency.getTargetClass().getBaseComponentType();
+                    if (target.getPackageName().startsWith("tepor.") && layer(target) > own) {
+                        events.add(SimpleConditionEvent.violated(dependency, dependency.getDescription()));
+                    }
+                }
+            }
+        };
+    }
+}
