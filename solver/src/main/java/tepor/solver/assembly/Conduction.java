@@ -6,6 +6,7 @@ import tepor.mesher.mesh.Mesh;
 import tepor.solver.element.TriangleGeometry;
 import tepor.solver.element.TriangleQuadrature;
 import tepor.solver.element.TriangleShape;
+import tepor.solver.element.TriangleShapes;
 import tepor.solver.model.Input;
 import tepor.solver.model.Region;
 import tepor.solver.model.Values;
@@ -28,7 +29,7 @@ public final class Conduction implements Contribution {
             tensor[region.index()] =
                     region.isHole() ? null : Tensor.of(region.material().conductivity(), values);
         }
-        shape = TriangleShape.of(mesh.nodesPerTriangle());
+        shape = TriangleShapes.of(mesh.nodesPerTriangle());
         quadrature = TriangleQuadrature.ofDegree(shape.stiffnessDegree());
     }
 

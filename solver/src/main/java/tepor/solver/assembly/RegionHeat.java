@@ -3,6 +3,7 @@ package tepor.solver.assembly;
 import tepor.mesher.mesh.Mesh;
 import tepor.solver.element.TriangleQuadrature;
 import tepor.solver.element.TriangleShape;
+import tepor.solver.element.TriangleShapes;
 import tepor.solver.model.Input;
 import tepor.solver.model.Region;
 
@@ -30,7 +31,7 @@ public final class RegionHeat implements Contribution {
         this.densityPerAmount = densityPerAmount;
         this.depth = depth;
         this.depthValue = depthValue;
-        TriangleShape shape = TriangleShape.of(mesh.nodesPerTriangle());
+        TriangleShape shape = TriangleShapes.of(mesh.nodesPerTriangle());
         TriangleQuadrature quadrature = TriangleQuadrature.ofDegree(shape.stiffnessDegree());
         share = new double[shape.nodeCount()];
         double[] value = new double[share.length];

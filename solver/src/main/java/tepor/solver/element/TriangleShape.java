@@ -21,9 +21,4 @@ public interface TriangleShape {
 
     /** Lowest quadrature degree that integrates the stiffness of a straight triangle of constant conductivity exactly. */
     int stiffnessDegree();
-
-    /** The shape for a number of nodes. */
-    static TriangleShape of(int nodesPerTriangle) {
-        return nodesPerTriangle == 3 ? LinearTriangle.SHAPE : QuadraticTriangle.SHAPE;
-    }
 }

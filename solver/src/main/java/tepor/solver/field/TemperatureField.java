@@ -4,6 +4,7 @@ import tepor.mesher.mesh.Mesh;
 import tepor.mesher.mesh.TriangleFinder;
 import tepor.solver.element.TriangleGeometry;
 import tepor.solver.element.TriangleShape;
+import tepor.solver.element.TriangleShapes;
 
 /**
  * A temperature for each node of a mesh. Immutable.
@@ -52,7 +53,7 @@ public final class TemperatureField {
 
     /** Temperature at barycentric coordinates of a triangle, K. */
     public double inside(int triangle, double l0, double l1, double l2) {
-        TriangleShape shape = TriangleShape.of(mesh.nodesPerTriangle());
+        TriangleShape shape = TriangleShapes.of(mesh.nodesPerTriangle());
         double[] value = new double[shape.nodeCount()];
         shape.values(l0, l1, l2, value);
         double level = kelvin[mesh.node(triangle, 0)];
@@ -69,7 +70,7 @@ public final class TemperatureField {
      * @param out two entries, overwritten
      */
     public void gradient(int triangle, double l0, double l1, double l2, double[] out) {
-        TriangleShape shape = TriangleShape.of(mesh.nodesPerTriangle());
+        TriangleShape shape = TriangleShapes.of(mesh.nodesPerTriangle());
         int n = shape.nodeCount();
         double[] slopes = new double[3 * n];
         double[] gx = new double[n];

@@ -43,7 +43,8 @@ final class UnitExpression {
     static UnitExpression of(String text) throws QuantityException {
         UnitExpression known = PARSED.get(text);
         if (known == null) {
-            known = new UnitParser(text).parse();
+            UnitParser.Parsed parsed = new UnitParser(text).parse();
+            known = new UnitExpression(parsed.spelling(), parsed.unit(), parsed.zero(), parsed.angle());
             known.prepare();
             PARSED.put(text, known);
         }

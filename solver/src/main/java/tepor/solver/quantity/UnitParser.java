@@ -34,10 +34,20 @@ final class UnitParser {
     /** A part of the text: its unit and its one spelling. */
     private record Part(Unit<?> unit, String spelling) {}
 
-    UnitExpression parse() throws QuantityException {
+    /**
+     * What a unit text means.
+     *
+     * @param spelling its one spelling; empty for pure numbers
+     * @param unit a temperature in it is a difference
+     * @param zero as of {@link UnitSymbol}
+     * @param angle whether it is an angle on its own
+     */
+    record Parsed(String spelling, Unit<?> unit, double zero, boolean angle) {}
+
+    Parsed parse() throws QuantityException {
         skipSpaces();
         if (at == text.length()) {
-            return new UnitExpression("", AbstractUnit.ONE, 0, false);
+            return new Parsed("", AbstractUnit.ONE, 0, false);
         }
         Part whole = product(false, 0);
         if (at < text.length()) {
@@ -46,7 +56,7 @@ final class UnitParser {
                     "end the unit before it, or write a product with a point and a quotient with a slash: W/(m2.K)");
         }
         boolean alone = factors == 1 && single != null;
-        return new UnitExpression(whole.spelling(), whole.unit(), alone ? single.zero() : 0, alone && single.angle());
+        return new Parsed(whole.spelling(), whole.unit(), alone ? single.zero() : 0, alone && single.angle());
     }
 
     private Part product(boolean below, int depth) throws QuantityException {

@@ -7,6 +7,7 @@ import tepor.mesher.mesh.Mesh;
 import tepor.solver.element.TriangleGeometry;
 import tepor.solver.element.TriangleQuadrature;
 import tepor.solver.element.TriangleShape;
+import tepor.solver.element.TriangleShapes;
 import tepor.solver.field.Solution;
 import tepor.solver.field.SteadySolver;
 import tepor.solver.field.TemperatureField;
@@ -85,7 +86,7 @@ record TestProblem(
 
         @Override
         public void addResidual(double[] kelvin, double[] residual) {
-            TriangleShape shape = TriangleShape.of(mesh.nodesPerTriangle());
+            TriangleShape shape = TriangleShapes.of(mesh.nodesPerTriangle());
             TriangleQuadrature rule = TriangleQuadrature.ofDegree(4);
             TriangleGeometry geometry = new TriangleGeometry(mesh);
             int n = shape.nodeCount();

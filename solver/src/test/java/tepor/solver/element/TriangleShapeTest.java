@@ -14,7 +14,7 @@ class TriangleShapeTest {
     @ParameterizedTest
     @ValueSource(ints = {3, 6})
     void isOneAtItsNodeAndZeroAtTheOthers(int n) {
-        TriangleShape shape = TriangleShape.of(n);
+        TriangleShape shape = TriangleShapes.of(n);
         double[] value = new double[n];
         for (int j = 0; j < n; j++) {
             shape.values(NODES[j][0], NODES[j][1], NODES[j][2], value);
@@ -27,7 +27,7 @@ class TriangleShapeTest {
     @ParameterizedTest
     @ValueSource(ints = {3, 6})
     void slopesAreTheDerivativesOfTheValues(int n) {
-        TriangleShape shape = TriangleShape.of(n);
+        TriangleShape shape = TriangleShapes.of(n);
         double[] l = {0.2, 0.3, 0.5};
         double[] slopes = new double[3 * n];
         shape.slopes(l[0], l[1], l[2], slopes);

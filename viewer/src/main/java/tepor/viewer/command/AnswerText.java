@@ -33,13 +33,13 @@ final class AnswerText {
         out.println(subject.title().isEmpty() ? subject.name() : subject.name() + ": " + subject.title());
         out.println();
         answers(shown);
+        verdicts(shown);
         handChecks(shown);
         ledger();
         insulated(answer.insulated(), subject, out);
     }
 
     private void answers(List<ShownAnswer> shown) {
-        VerdictWords words = new VerdictWords(subject);
         TextTable table = new TextTable("answer", "#value", "#mesh error", "unit", "limit", "verdict");
         for (ShownAnswer one : shown) {
             double half = one.deviation() == null ? Double.NaN : one.deviation().halfWidth();
@@ -51,7 +51,9 @@ final class AnswerText {
                     "± " + Rounding.error(half) + (missed ? " (!)" : ""),
                     one.unit(),
                     AskWords.limit(one.ask()),
-                    words.of(one));
+                    one.limit() == null || one.limit().verdict() == null
+                            ? ""
+                            : one.limit().verdict().word());
             if (one.forDepth() != null) {
                 String depth = "  for " + subject.depth().quantity().text();
                 table.row(depth, Rounding.significant(one.forDepth(), DIGITS), "", "W", "", "");
@@ -61,6 +63,21 @@ final class AnswerText {
         if (shown.stream()
                 .anyMatch(s -> s.deviation() != null && !s.source().meshError().reached())) {
             out.println("  (!) not as close as was asked for");
+        }
+    }
+
+    private void verdicts(List<ShownAnswer> shown) {
+        VerdictWords words = new VerdictWords(subject);
+        boolean first = true;
+        for (ShownAnswer one : shown) {
+            String verdict = words.of(one);
+            if (!verdict.isEmpty()) {
+                if (first) {
+                    out.println();
+                }
+                out.println("  " + one.name() + ": " + verdict);
+                first = false;
+            }
         }
     }
 

@@ -8,6 +8,7 @@ import java.util.List;
 import tepor.mesher.section.Section;
 import tepor.solver.answer.Answer;
 import tepor.viewer.picture.PictureOptions.Layer;
+import tepor.viewer.picture.contour.IsothermTracer;
 import tepor.viewer.picture.contour.Isotherms;
 import tepor.viewer.picture.contour.TemperatureRange;
 import tepor.viewer.picture.contour.TemperatureScale;
@@ -63,7 +64,7 @@ public final class IsothermPicture implements Picture {
 
         closeUp = CloseUp.of(view, markers.places(), unit);
         SectionView near = closeUp == null ? view : new SectionView(section, closeUp.window(), closeUp.frame(), unit);
-        Isotherms isotherms = Isotherms.of(answer.field(), scale, TOLERANCE / near.scale());
+        Isotherms isotherms = IsothermTracer.trace(answer.field(), scale, TOLERANCE / near.scale());
         markers.place(near, closeUp == null ? sheet.frame : closeUp.frame());
         OccupancyGrid taken = new OccupancyGrid(sheet.width, sheet.height, 4 * unit);
         if (closeUp == null) {

@@ -35,7 +35,7 @@ final class AnswerTable {
             html.element(
                     "div",
                     List.of("class", "scroll"),
-                    () -> html.element("table", () -> {
+                    () -> html.element("table", List.of("class", "answers"), () -> {
                         html.tableHead(List.of("Asked", "#Value", "#Mesh error", "Limit", "Verdict"));
                         html.element("tbody", () -> {
                             for (ShownAnswer one : shown) {
@@ -86,7 +86,7 @@ final class AnswerTable {
                                 + Rounding.significant(deviation.within(), 2));
             }
         });
-        html.element("td", UnitWords.pretty(AskWords.limit(one.ask())));
+        html.element("td", "keep", UnitWords.pretty(AskWords.limit(one.ask())));
         html.element("td", () -> {
             String words = verdicts.of(one);
             int end = words.isEmpty() ? 0 : one.limit().verdict().word().length();

@@ -42,7 +42,7 @@ final class InputTable {
             for (Edge edge : subject.edges()) {
                 row(
                         edge.name(),
-                        UnitWords.pretty(ConditionWords.of(edge)),
+                        ConditionWords.of(edge),
                         "",
                         Rounding.significant(edge.pieces().length(subject.section()), 5));
             }

@@ -7,7 +7,8 @@ import java.math.RoundingMode;
 /** Figures as text, with as many digits as their error deserves. */
 public final class Rounding {
     private static final int DIGITS_WITHOUT_ERROR = 6;
-    private static final int MOST_DIGITS = 9;
+    private static final int SURE_DIGITS = 9;
+    private static final int MOST_DIGITS = 7;
 
     private Rounding() {}
 
@@ -22,8 +23,8 @@ public final class Rounding {
             return "unknown";
         }
         // What conversion did to the last bits is not to be rounded up.
-        BigDecimal figure = new BigDecimal(Math.abs(error)).round(new MathContext(MOST_DIGITS));
-        return plainOrPower(figure.setScale(figure.scale() + MOST_DIGITS).round(new MathContext(2, RoundingMode.UP)));
+        BigDecimal figure = new BigDecimal(Math.abs(error)).round(new MathContext(SURE_DIGITS));
+        return plainOrPower(figure.setScale(figure.scale() + SURE_DIGITS).round(new MathContext(2, RoundingMode.UP)));
     }
 
     /** A figure with at most so many significant digits and no idle zeros. */

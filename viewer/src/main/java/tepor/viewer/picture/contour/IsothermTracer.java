@@ -3,6 +3,7 @@ package tepor.viewer.picture.contour;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import tepor.solver.field.TemperatureField;
 
 /**
  * Walks along isotherms from edge to edge of a lattice, and joins them with the boundary to the loops around the areas that
@@ -11,7 +12,10 @@ import java.util.List;
  * <p>A point exactly at an isotherm's temperature counts as above it (simulation of simplicity, Edelsbrunner and Mücke
  * 1990), so that every small triangle is crossed not at all or through exactly two edges.
  */
-final class IsothermTracer {
+public final class IsothermTracer {
+    /** Triangles into which six-node triangles may be divided altogether; more is finer than a picture shows. */
+    private static final int SMALL_TRIANGLES = 400_000;
+
     private static final int NONE = -1;
 
     private final FieldLattice lattice;
@@ -47,7 +51,25 @@ final class IsothermTracer {
         findBoundary();
     }
 
-    Isotherms trace() {
+    /**
+     * Traces the isotherms of a field.
+     *
+     * @param tolerance points nearer to the line through their neighbours are left out, m; 0 keeps all
+     */
+    public static Isotherms trace(TemperatureField field, TemperatureScale scale, double tolerance) {
+        FieldLattice lattice = new FieldLattice(field, division(field));
+        return new IsothermTracer(lattice, scale, tolerance).trace();
+    }
+
+    private static int division(TemperatureField field) {
+        if (field.mesh().nodesPerTriangle() == 3) {
+            return 1;
+        }
+        double n = Math.sqrt(SMALL_TRIANGLES / (double) Math.max(1, field.mesh().triangleCount()));
+        return (int) Math.max(2, Math.min(12, n));
+    }
+
+    private Isotherms trace() {
         List<Isotherm> lines = new ArrayList<>();
         List<List<double[]>> areas = new ArrayList<>();
         int[][] crossed = crossedTriangles();

@@ -1,7 +1,6 @@
 package tepor.viewer.picture.contour;
 
 import java.util.List;
-import tepor.solver.field.TemperatureField;
 
 /**
  * Isotherms of a field as lines, and the areas they bound.
@@ -13,31 +12,10 @@ import tepor.solver.field.TemperatureField;
  */
 public record Isotherms(
         TemperatureScale scale, List<Isotherm> lines, List<List<double[]>> areas, List<double[]> section) {
-    /** Triangles into which six-node triangles may be divided altogether; more is finer than a picture shows. */
-    private static final int SMALL_TRIANGLES = 400_000;
-
     public Isotherms {
         lines = List.copyOf(lines);
         areas = areas.stream().map(List::copyOf).toList();
         section = List.copyOf(section);
-    }
-
-    /**
-     * Traces the isotherms of a field.
-     *
-     * @param tolerance points nearer to the line through their neighbours are left out, m; 0 keeps all
-     */
-    public static Isotherms of(TemperatureField field, TemperatureScale scale, double tolerance) {
-        FieldLattice lattice = new FieldLattice(field, division(field));
-        return new IsothermTracer(lattice, scale, tolerance).trace();
-    }
-
-    private static int division(TemperatureField field) {
-        if (field.mesh().nodesPerTriangle() == 3) {
-            return 1;
-        }
-        double n = Math.sqrt(SMALL_TRIANGLES / (double) Math.max(1, field.mesh().triangleCount()));
-        return (int) Math.max(2, Math.min(12, n));
     }
 
     /** Area on the left of loops, m²: by the boundary integral about their first point. */

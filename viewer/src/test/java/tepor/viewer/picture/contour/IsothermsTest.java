@@ -25,7 +25,7 @@ class IsothermsTest {
     }
 
     private static Isotherms isotherms(TemperatureField field) {
-        return Isotherms.of(field, TemperatureScale.of(TemperatureRange.of(field), 16), 0);
+        return IsothermTracer.trace(field, TemperatureScale.of(TemperatureRange.of(field), 16), 0);
     }
 
     private static Isotherms ring(int nodesPerTriangle, int columns, int rows) {
@@ -158,8 +158,8 @@ class IsothermsTest {
         TemperatureField field = PatternedGrid.field(mesh, IsothermsTest::ringTemperature);
         TemperatureScale scale = TemperatureScale.of(TemperatureRange.of(field), 16);
         double tolerance = 2e-5;
-        Isotherms all = Isotherms.of(field, scale, 0);
-        Isotherms few = Isotherms.of(field, scale, tolerance);
+        Isotherms all = IsothermTracer.trace(field, scale, 0);
+        Isotherms few = IsothermTracer.trace(field, scale, tolerance);
         for (int i = 0; i < all.lines().size(); i++) {
             assertThat(few.lines().get(i).pointCount())
                     .isLessThan(all.lines().get(i).pointCount() / 4);
