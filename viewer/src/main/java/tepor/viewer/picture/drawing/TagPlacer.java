@@ -13,6 +13,9 @@ public final class TagPlacer {
     private static final int DIRECTIONS = 24;
     private static final double[] DISTANCES = {1.5, 2.1, 2.9, 3.9, 5.2, 7, 9.5, 13, 18, 25};
 
+    /** Points nearer than so many heights of a tag make a crowd. */
+    private static final double CROWD = 3;
+
     private final Rectangle2D frame;
     private final double size;
     private final List<Rectangle2D> taken = new ArrayList<>();
@@ -45,7 +48,7 @@ public final class TagPlacer {
     public double[] place(double x, double y, double width, double away) {
         double[] best = null;
         double least = Double.POSITIVE_INFINITY;
-        double first = Double.isNaN(away) ? -Math.PI / 4 : away;
+        double first = Double.isNaN(away) ? outward(x, y) : away;
         for (double distance : DISTANCES) {
             for (int i = 0; i < DIRECTIONS; i++) {
                 double turn = 2 * Math.PI * ((i + 1) / 2) / DIRECTIONS * (i % 2 == 0 ? 1 : -1);
@@ -64,6 +67,21 @@ public final class TagPlacer {
         taken.add(box(best[0], best[1], width));
         leaders.add(new Line2D.Double(x, y, best[0], best[1]));
         return best;
+    }
+
+    /** Upwards to the right; in a crowd away from its middle, so that leaders fan out. */
+    private double outward(double x, double y) {
+        double sumX = 0;
+        double sumY = 0;
+        int crowd = 0;
+        for (double[] p : points) {
+            if (Math.hypot(p[0] - x, p[1] - y) < CROWD * size) {
+                sumX += p[0] - x;
+                sumY += p[1] - y;
+                crowd++;
+            }
+        }
+        return crowd < 4 || Math.hypot(sumX, sumY) < 1e-9 * size ? -Math.PI / 4 : Math.atan2(-sumY, -sumX);
     }
 
     private Rectangle2D box(double cx, double cy, double width) {

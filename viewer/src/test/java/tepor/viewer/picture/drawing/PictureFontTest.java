@@ -39,6 +39,7 @@ class PictureFontTest {
         List<String> command = new ArrayList<>(List.of(
                 Path.of(System.getProperty("java.home"), "bin", "java").toString(),
                 "-Djava.awt.headless=true",
+                "-Duser.home=" + folder, // where the JDK keeps what it found out about fonts
                 "-cp",
                 System.getProperty("java.class.path"),
                 Drawing.class.getName()));

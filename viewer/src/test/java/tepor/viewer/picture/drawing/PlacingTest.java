@@ -14,8 +14,8 @@ class PlacingTest {
     void tagsAndLeadersKeepClearOfEachOther() {
         TagPlacer placer = new TagPlacer(new Rectangle2D.Double(0, 0, 1000, 700), 28);
         List<double[]> points = new ArrayList<>();
-        for (int i = 0; i < 28; i++) {
-            points.add(new double[] {320 + 52 * (i % 7), 220 + 60 * (i / 7)});
+        for (int i = 0; i < 12; i++) {
+            points.add(new double[] {400 + 33 * (i % 4), 300 + 36 * (i / 4)});
         }
         points.forEach(p -> placer.keepClear(p[0], p[1]));
         List<Rectangle2D> tags = new ArrayList<>();
@@ -46,6 +46,8 @@ class PlacingTest {
         assertThat(grid.isFree(100, 50, 20, 8, 0)).isFalse();
         grid.takeLine(100, 0, 100, 100, 4);
         assertThat(grid.isFree(100, 50, 20, 8, 0, 3)).as("where two cross").isFalse();
+        assertThat(grid.isFree(100, 50, 20, 8, 0, 4)).as("where two cross").isFalse();
+        assertThat(grid.isFree(102, 50, 0.5, 0.5, 0, 4)).as("where two cross").isFalse();
         assertThat(grid.isFree(50, 20, 20, 8, 0)).isTrue();
         grid.take(50, 20, 20, 8, 0.3);
         assertThat(grid.isFree(55, 22, 2, 2, 0)).isFalse();
