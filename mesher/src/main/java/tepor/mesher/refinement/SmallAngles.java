@@ -68,7 +68,8 @@ final class SmallAngles {
     /**
      * Whether a side joins two lines that meet under a small angle, at equal distances from their apex.
      *
-     * @param p vertex at one end, pCarrier the segment whose inside it lies on, negative if none
+     * @param p vertex at one end of the side
+     * @param q vertex at the other end
      */
     boolean joinsShells(Vertices vertices, int p, int q) {
         int pSegment = vertices.carrier(p);

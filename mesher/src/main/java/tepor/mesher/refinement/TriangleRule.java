@@ -13,7 +13,7 @@ final class TriangleRule {
     /** Part of the greatest distance at which an off-centre still gives the angle wanted: keeps clear of round-off. */
     private static final double OFF_CENTRE = 0.95;
     /** Side of the triangle which a vertex put in for the sake of size aims at, as a part of the size wanted. */
-    private static final double AIM = 0.9;
+    private static final double AIM = 0.8;
 
     private final Triangulation mesh;
     private final Vertices vertices;
@@ -130,8 +130,9 @@ final class TriangleRule {
         double distance = ((uy - 0.5 * dy) * dx - (ux - 0.5 * dx) * dy) / length;
         double wanted = reach * length;
         if (large) {
-            double aim = AIM * Math.min(vertices.size(p), vertices.size(q));
-            if (length < aim) {
+            double size = Math.min(vertices.size(p), vertices.size(q));
+            double aim = AIM * size;
+            if (length <= COARSER * size) {
                 wanted = Math.min(wanted, Math.sqrt(aim * aim - 0.25 * dd));
             }
         }

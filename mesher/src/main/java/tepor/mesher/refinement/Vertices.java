@@ -53,6 +53,8 @@ final class Vertices {
     }
 
     double distance(int a, int b) {
-        return Math.hypot(mesh.x(b) - mesh.x(a), mesh.y(b) - mesh.y(a));
+        double dx = mesh.x(b) - mesh.x(a);
+        double dy = mesh.y(b) - mesh.y(a);
+        return Math.sqrt(dx * dx + dy * dy);
     }
 }

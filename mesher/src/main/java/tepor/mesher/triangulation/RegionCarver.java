@@ -44,7 +44,7 @@ final class RegionCarver {
         }
         boolean[] keep = new boolean[count];
         for (int t = 0; t < count; t++) {
-            keep[t] = !mesh.isGhost(t) && region[t] >= 0 && !section.isHole(region[t]);
+            keep[t] = !mesh.isGhost(t) && region[t] >= 0;
         }
         mesh.retain(keep);
     }
@@ -57,7 +57,9 @@ final class RegionCarver {
             if (code < 0) {
                 continue;
             }
-            int says = code % 2 == 0 ? section.left(code / 2) : section.right(code / 2);
+            int beside = code % 2 == 0 ? section.left(code / 2) : section.right(code / 2);
+            // All emptiness is one: a section has no segments between a region of nothing and the outside.
+            int says = beside >= 0 && section.isHole(beside) ? Triangulation.NONE : beside;
             if (stated != UNKNOWN && stated != says) {
                 throw contradiction(mesh, side, stated, says);
             }

@@ -5,8 +5,12 @@ import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Random;
 import java.util.function.ToIntBiFunction;
 import tepor.mesher.section.Section;
+import tepor.mesher.triangulation.DelaunayBuilder;
+import tepor.mesher.triangulation.Predicates;
+import tepor.mesher.triangulation.Triangulation;
 
 /** Sections for tests, made from rings of points. */
 public final class SampleSections {
@@ -74,6 +78,7 @@ public final class SampleSections {
     public Section build() {
         List<List<Integer>> kept = segments.stream()
                 .filter(s -> sidesOf.get(s)[0] != sidesOf.get(s)[1])
+                .filter(s -> isSolid(sidesOf.get(s)[0]) || isSolid(sidesOf.get(s)[1]))
                 .toList();
         int[] ends = kept.stream().flatMap(List::stream).mapToInt(i -> i).toArray();
         int[] sides =
@@ -88,6 +93,10 @@ public final class SampleSections {
         }
         double[] coordinates = xy.stream().mapToDouble(d -> d).toArray();
         return new Section(coordinates, ends, sides, outer, names, hole, 1e-9);
+    }
+
+    private boolean isSolid(int region) {
+        return region != Section.NONE && !holes.get(region);
     }
 
     /** The same section with each vertex moved to scale·R(turn)·(x, y) + (dx, dy), rounded. */
@@ -241,5 +250,25 @@ public final class SampleSections {
                 .ring(right, rectangle(0.3, 0, 1, 1))
                 .ring(top, 0, 1, 0.3, 1, 1, 1, 1, 1.5, 0, 1.5)
                 .build();
+    }
+
+    /** The Delaunay triangles of random points, each given one of three regions by chance: angles of every size. */
+    public static Section patchwork(int points, long seed) {
+        Random random = new Random(seed);
+        double[] xy = random.doubles(2L * points).toArray();
+        Triangulation triangles = DelaunayBuilder.build(xy, new Predicates());
+        SampleSections s = new SampleSections();
+        int[] regions = {s.region("red"), s.region("green"), s.nothing("hole"), s.region("blue")};
+        for (int t = 0; t < triangles.triangleCount(); t++) {
+            if (!triangles.isGhost(t)) {
+                double[] ring = new double[6];
+                for (int i = 0; i < 3; i++) {
+                    ring[2 * i] = xy[2 * triangles.apex(3 * t + i)];
+                    ring[2 * i + 1] = xy[2 * triangles.apex(3 * t + i) + 1];
+                }
+                s.ring(regions[random.nextInt(4)], ring);
+            }
+        }
+        return s.build();
     }
 }

@@ -103,6 +103,10 @@ class EdgeFinderTest {
         for (int i = 0; i < thin.segments().length; i++) {
             assertThat(thin.signs()[i]).isEqualTo(WALL.left(thin.segments()[i]) == 0 ? 1 : -1);
         }
+        EdgePieces thick = find(new Where.OfRegion(1));
+        for (int i = 0; i < thick.segments().length; i++) {
+            assertThat(thick.signs()[i]).isEqualTo(WALL.left(thick.segments()[i]) == 1 ? 1 : -1);
+        }
         EdgePieces duct = find(new Where.OfRegion(2));
         assertThat(duct.segments()).containsExactly(find(new Where.Holes()).segments());
         assertThat(duct.signs()).containsExactly(find(new Where.Holes()).signs());

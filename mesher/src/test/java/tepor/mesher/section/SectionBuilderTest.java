@@ -102,11 +102,17 @@ class SectionBuilderTest {
     void aVertexNearAnotherSideLiesOnIt() {
         Section section = new Drawn()
                 .region("a", box(0, 0, 4, 1))
-                .region("b", "POLYGON ((1 1.0004, 3 1.0004, 2 2, 1 1.0004))")
+                .region("b", "POLYGON ((1 1.00095, 3 1.00095, 2 2, 1 1.00095))")
                 .snap(1e-3)
                 .build();
         assertThat(length(section, s -> !section.isBoundary(s))).isCloseTo(2, within(1e-6));
-        assertThat(vertexAt(section, 1, 1.0004)).isNotNegative();
+        assertThat(vertexAt(section, 1, 1.00095)).isNotNegative();
+        Section apart = new Drawn()
+                .region("a", box(0, 0, 4, 1))
+                .region("b", "POLYGON ((1 1.00105, 3 1.00105, 2 2, 1 1.00105))")
+                .snap(1e-3)
+                .build();
+        assertThat(length(apart, s -> !apart.isBoundary(s))).isZero();
     }
 
     @Test
@@ -226,10 +232,45 @@ class SectionBuilderTest {
                 .split(3, 0)
                 .split(2, 0.5)
                 .split(4.0005, 0)
+                .split(0.0005, 0)
                 .build();
         assertThat(section.segmentCount()).isEqualTo(6);
         assertThat(vertexAt(section, 1, 0)).isNotNegative();
         assertThat(vertexAt(section, 3, 0)).isNotNegative();
+    }
+
+    @Test
+    void aSplitPointWithinTheBoxOfASlopingSideButOffItSplitsNothing() {
+        Drawn drawn = new Drawn().region("a", "POLYGON ((0 0, 4 0, 0 3, 0 0))").snap(1e-3);
+        assertThat(drawn.split(2, 1.6).build().segmentCount()).isEqualTo(3);
+        Section split = drawn.split(2, 1.5).build();
+        assertThat(split.segmentCount()).isEqualTo(4);
+        assertThat(vertexAt(split, 2, 1.5)).isNotNegative();
+    }
+
+    @Test
+    void aSnapBelowRoundOffIsRaisedToIt() {
+        double turn = Math.sin(0.3);
+        double along = Math.cos(0.3);
+        double far = 1e6;
+        Drawn drawn = new Drawn().snap(0);
+        for (int i = 0; i < 30; i++) {
+            for (int j = 0; j < 4; j++) {
+                StringBuilder text = new StringBuilder("POLYGON ((");
+                for (int[] corner : new int[][] {{i, j}, {i + 1, j}, {i + 1, j + 1}, {i, j + 1}, {i, j}}) {
+                    double u = corner[0] / 7.0;
+                    double v = corner[1] / 7.0 + 1e-10 * ((i * 31 + j * 17) % 3);
+                    text.append(far + along * u - turn * v)
+                            .append(' ')
+                            .append(turn * u + along * v)
+                            .append(", ");
+                }
+                drawn.region(i + "," + j, text.substring(0, text.length() - 2) + "))");
+            }
+        }
+        Section section = drawn.build();
+        assertThat(section.snap()).isBetween(1e-9, 1e-8);
+        assertThat(section.segmentCount()).isEqualTo(30 * 5 + 31 * 4);
     }
 
     @Test
@@ -266,12 +307,14 @@ class SectionBuilderTest {
         Drawn drawn = new Drawn()
                 .nothing("too early", box(0, 0, 1, 1))
                 .region("a", box(0, 0, 4, 4))
-                .nothing("cuts", box(2, 2, 3, 3));
+                .nothing("cuts", box(2, 2, 3, 3))
+                .nothing("cuts nothing more", box(2.5, 2.5, 3, 3))
+                .nothing("aside", box(9, 9, 10, 10));
         assertThat(drawn.build().area(1)).isCloseTo(15, within(1e-12));
-        assertThat(drawn.findings.all()).singleElement().satisfies(f -> {
-            assertThat(f.severity()).isEqualTo(Finding.Severity.WARNING);
-            assertThat(f.what()).contains("'too early'");
-        });
+        assertThat(drawn.findings.all())
+                .allSatisfy(f -> assertThat(f.severity()).isEqualTo(Finding.Severity.WARNING))
+                .extracting(f -> f.what().split("'")[1])
+                .containsExactly("too early", "cuts nothing more", "aside");
     }
 
     @Test

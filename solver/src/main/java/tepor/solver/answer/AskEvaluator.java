@@ -12,6 +12,7 @@ import tepor.mesher.outline.FaultyInputException;
 import tepor.mesher.outline.Finding;
 import tepor.solver.assembly.FacetEffect;
 import tepor.solver.assembly.FilmExchange;
+import tepor.solver.assembly.Tensor;
 import tepor.solver.field.Extreme;
 import tepor.solver.field.ExtremeFinder;
 import tepor.solver.field.FacetFlows;
@@ -22,6 +23,7 @@ import tepor.solver.model.Air;
 import tepor.solver.model.Ask;
 import tepor.solver.model.Case;
 import tepor.solver.model.Edge;
+import tepor.solver.model.Region;
 import tepor.solver.model.Target;
 import tepor.solver.model.Values;
 
@@ -159,11 +161,24 @@ final class AskEvaluator {
 
     private AskValue flowValue(double out, Values values) {
         double passing = LedgerBuilder.build(solutions, values).rows().stream()
-                        .filter(row -> !row.dependsOnMesh())
                         .mapToDouble(row -> Math.abs(row.in()))
                         .sum()
                 / 2;
-        return new AskValue(out, null, Math.max(Math.abs(out), LEAST_FLOW * passing));
+        double reference = Math.max(Math.abs(out), LEAST_FLOW * passing);
+        return new AskValue(out, null, Math.max(reference, roundOff(values)));
+    }
+
+    /** What rounding alone may make of a flow where nothing flows, W/m. */
+    private double roundOff(Values values) {
+        Solution solution = solutions.solution(values);
+        double largest = 0;
+        for (Region region : subject.regions()) {
+            if (!region.isHole()) {
+                Tensor k = solution.balance().conduction().tensor(region.index());
+                largest = Math.max(largest, Math.max(k.xx(), k.yy()));
+            }
+        }
+        return 1e-10 * largest * Math.abs(solution.field().at(0));
     }
 
     private double intoAir(Air air, Values values) {

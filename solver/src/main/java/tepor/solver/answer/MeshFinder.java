@@ -28,7 +28,7 @@ final class MeshFinder {
     private static final double GRADATION = 0.5;
 
     /** The mesher takes a size for the longest side wanted; its triangles' sides come out shorter by this on average. */
-    private static final double LONGEST_TO_MEAN = 1.7;
+    private static final double LONGEST_TO_MEAN = 1.95;
 
     private final Case subject;
     private final BooleanSupplier stopped;

@@ -49,7 +49,7 @@ public final class BracketFinder {
             PlaneBound.of(frame, surroundings, conduction).ifPresent(this::take);
         }
         if (conduction.isUniform()) {
-            double[] lengths = filmLengths();
+            double[] lengths = {surroundings.filmLength(section, 0), surroundings.filmLength(section, 1)};
             for (int side = 0; side < 2; side++) {
                 centre(side).flatMap(c -> Polar.of(section, c[0], c[1])).ifPresent(polar -> {
                     take(polar, new RayBound(polar, surroundings, conduction));
@@ -97,16 +97,6 @@ public final class BracketFinder {
         }
     }
 
-    private double[] filmLengths() {
-        double[] sum = new double[2];
-        for (int s = 0; s < section.segmentCount(); s++) {
-            if (surroundings.side(s) != Surroundings.NEITHER) {
-                sum[surroundings.side(s)] += surroundings.film(s) * section.length(s);
-            }
-        }
-        return sum;
-    }
-
     /**
      * Centre of the circle that fits the corners of a surrounding's segments best: the least squares of x² + y² + Dx + Ey +
      * F (Kåsa 1976). A centre that fits badly costs sharpness, never validity. Empty where the corners lie on a line.
@@ -149,8 +139,10 @@ public final class BracketFinder {
         if (!(determinant > 1e-12 * (xx + yy) * (xx + yy))) {
             return Optional.empty();
         }
-        return Optional.of(new double[] {
-            meanX + 0.5 * (xz * yy - yz * xy) / determinant, meanY + 0.5 * (yz * xx - xz * xy) / determinant
-        });
+        double x = meanX + 0.5 * (xz * yy - yz * xy) / determinant;
+        double y = meanY + 0.5 * (yz * xx - xz * xy) / determinant;
+        // A centre at the origin would show its rounding.
+        double nothing = 1e-12 * section.extent();
+        return Optional.of(new double[] {Math.abs(x) < nothing ? 0 : x, Math.abs(y) < nothing ? 0 : y});
     }
 }

@@ -94,7 +94,7 @@ final class CircleBound {
             return;
         }
         int[] pieces = Arrays.copyOf(active, count);
-        double resistance = GaussRule.integralWithRoots(from, to, r -> 1 / (r * around(pieces, r)));
+        double resistance = Integral.withRoots(from, to, r -> 1 / (r * around(pieces, r)));
         rings.add(new Ring(from, to, -1, resistance));
     }
 

@@ -36,7 +36,7 @@ record Frame(Section section, boolean upright) {
     double uAt(int segment, double v) {
         int a = section.start(segment);
         int b = section.end(segment);
-        double t = (v - v(a)) / (v(b) - v(a));
+        double t = within((v - v(a)) / (v(b) - v(a)));
         return (1 - t) * u(a) + t * u(b);
     }
 
@@ -44,8 +44,17 @@ record Frame(Section section, boolean upright) {
     double vAt(int segment, double u) {
         int a = section.start(segment);
         int b = section.end(segment);
-        double t = (u - u(a)) / (u(b) - u(a));
+        double t = within((u - u(a)) / (u(b) - u(a)));
         return (1 - t) * v(a) + t * v(b);
+    }
+
+    private static double within(double t) {
+        return Math.max(0, Math.min(1, t));
+    }
+
+    /** Distance below which two coordinates are one, m: far below what a drawing means. */
+    double tolerance() {
+        return 1e-9 * section.extent();
     }
 
     /** |n·e|, n being the normal of a segment and e the direction along. */

@@ -27,7 +27,6 @@ final class PlaneBound {
     final double[] films;
 
     private final Frame frame;
-    private final Section section;
     private final RegionConduction conduction;
 
     /**
@@ -42,19 +41,23 @@ final class PlaneBound {
     record Layer(double from, double to, List<Part> regions, double atFrom, double atTo) {
         /** ∫ du / ∫ k dv, m·K/W. */
         double resistance() {
-            return Linear.integralOfInverse(to - from, atFrom, atTo);
+            return Integral.ofInverse(to - from, atFrom, atTo);
         }
     }
 
     /** A region's share of a layer: its width at the two planes (m) and its conductivity W/(m·K) along. */
     record Part(int region, double atFrom, double atTo, double conductivity) {}
 
-    private PlaneBound(Frame frame, RegionConduction conduction, int first, double[] films, double from, double to) {
+    private PlaneBound(Frame frame, RegionConduction conduction, int first, double[] films) {
         this.frame = frame;
-        this.section = frame.section();
         this.conduction = conduction;
         this.first = first;
         this.films = films;
+    }
+
+    /** Empty where the surroundings do not lie apart along the axis. */
+    static Optional<PlaneBound> of(Frame frame, Surroundings surroundings, RegionConduction conduction) {
+        Section section = frame.section();
         int count = section.segmentCount();
         double[] low = new double[count];
         double[] high = new double[count];
@@ -64,32 +67,25 @@ final class PlaneBound {
             low[s] = Math.min(a, b);
             high[s] = Math.max(a, b);
         }
-        if (to > from) {
-            Sweep.run(low, high, from, to, this::slice);
-        }
-    }
-
-    /** Empty where the surroundings do not lie apart along the axis. */
-    static Optional<PlaneBound> of(Frame frame, Surroundings surroundings, RegionConduction conduction) {
-        Section section = frame.section();
+        Sweep.join(low, high, count, frame.tolerance());
         double[] least = {Double.POSITIVE_INFINITY, Double.POSITIVE_INFINITY};
         double[] greatest = {Double.NEGATIVE_INFINITY, Double.NEGATIVE_INFINITY};
-        double[] films = new double[2];
-        for (int s = 0; s < section.segmentCount(); s++) {
+        for (int s = 0; s < count; s++) {
             int side = surroundings.side(s);
             if (side != Surroundings.NEITHER) {
-                double a = frame.u(section.start(s));
-                double b = frame.u(section.end(s));
-                least[side] = Math.min(least[side], Math.min(a, b));
-                greatest[side] = Math.max(greatest[side], Math.max(a, b));
-                films[side] += surroundings.film(s) * section.length(s);
+                least[side] = Math.min(least[side], low[s]);
+                greatest[side] = Math.max(greatest[side], high[s]);
             }
         }
         for (int first = 0; first < 2; first++) {
             int second = 1 - first;
             if (greatest[first] <= least[second]) {
-                double[] inOrder = {films[first], films[second]};
-                return Optional.of(new PlaneBound(frame, conduction, first, inOrder, greatest[first], least[second]));
+                double[] films = {surroundings.filmLength(section, first), surroundings.filmLength(section, second)};
+                PlaneBound bound = new PlaneBound(frame, conduction, first, films);
+                if (greatest[first] < least[second]) {
+                    Sweep.run(low, high, greatest[first], least[second], bound::slice);
+                }
+                return Optional.of(bound);
             }
         }
         return Optional.empty();

@@ -60,6 +60,8 @@ final class Polar {
             }
         }
         count = n;
+        Sweep.join(lowV, highV, count, 1e-10);
+        Sweep.join(lowR, highR, count, 1e-9 * section.extent());
     }
 
     /** The section seen from a point; empty where a segment comes so near to it that angles mean nothing. */

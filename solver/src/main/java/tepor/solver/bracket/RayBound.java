@@ -79,7 +79,7 @@ final class RayBound {
             return;
         }
         widest += to - from;
-        conductance += GaussRule.integral(from, to, v -> {
+        conductance += Integral.of(from, to, v -> {
             double resistance = resistance(crossed, v);
             least = Math.min(least, resistance);
             greatest = Math.max(greatest, resistance);

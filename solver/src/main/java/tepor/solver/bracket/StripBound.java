@@ -36,7 +36,7 @@ final class StripBound {
     record Strip(double from, double to, List<Layer> layers, double[] films, double atFrom, double atTo) {
         /** ∫ dv / R(v) with R linear, W/(m·K). */
         double conductance() {
-            return Linear.integralOfInverse(to - from, atFrom, atTo);
+            return Integral.ofInverse(to - from, atFrom, atTo);
         }
     }
 
@@ -57,6 +57,7 @@ final class StripBound {
             low[s] = Math.min(a, b);
             high[s] = Math.max(a, b);
         }
+        Sweep.join(low, high, count, frame.tolerance());
         double from = Arrays.stream(low).min().orElse(0);
         double to = Arrays.stream(high).max().orElse(0);
         Sweep.run(low, high, from, to, this::cut);

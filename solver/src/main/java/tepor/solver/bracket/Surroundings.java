@@ -157,6 +157,17 @@ public final class Surroundings {
         return film[segment];
     }
 
+    /** Σ film · length of all that a surrounding holds, W/(m·K); infinite where a temperature is fixed. */
+    double filmLength(Section section, int which) {
+        double sum = 0;
+        for (int s = 0; s < side.length; s++) {
+            if (side[s] == which) {
+                sum += film[s] * section.length(s);
+            }
+        }
+        return sum;
+    }
+
     /** Kelvin; NaN where a surrounding has none of its own here. */
     public double temperature(int which) {
         return temperature[which];

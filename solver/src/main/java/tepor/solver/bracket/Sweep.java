@@ -9,6 +9,35 @@ import java.util.stream.IntStream;
 final class Sweep {
     private Sweep() {}
 
+    /**
+     * Makes ends that lie closer together than a tolerance one and the same, so that rounding leaves no slivers of intervals
+     * to stop at.
+     *
+     * @param low changed in place
+     * @param high changed in place
+     * @param count how many entries of both to look at
+     */
+    static void join(double[] low, double[] high, int count, double tolerance) {
+        double[] ends = DoubleStream.concat(Arrays.stream(low, 0, count), Arrays.stream(high, 0, count))
+                .sorted()
+                .toArray();
+        int kept = 0;
+        for (double end : ends) {
+            if (kept == 0 || end - ends[kept - 1] > tolerance) {
+                ends[kept++] = end;
+            }
+        }
+        for (int i = 0; i < count; i++) {
+            low[i] = atOrBelow(ends, kept, low[i]);
+            high[i] = atOrBelow(ends, kept, high[i]);
+        }
+    }
+
+    private static double atOrBelow(double[] ends, int count, double end) {
+        int found = Arrays.binarySearch(ends, 0, count, end);
+        return ends[found >= 0 ? found : -found - 2];
+    }
+
     /** Told of each interval between two stops. */
     interface Visitor {
         /**

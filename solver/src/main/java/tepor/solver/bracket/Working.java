@@ -1,6 +1,7 @@
 package tepor.solver.bracket;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -35,7 +36,7 @@ final class Working {
             Group group = groups.computeIfAbsent(layers(strip), key -> new Group());
             double from = frame.upright() ? strip.from() : -strip.to();
             double to = frame.upright() ? strip.to() : -strip.from();
-            extend(group.spans, from, to);
+            group.spans.add(new double[] {from, to});
             group.width += to - from;
             group.conductance += strip.conductance();
         }
@@ -96,7 +97,7 @@ final class Working {
         Map<String, Group> groups = new LinkedHashMap<>();
         for (PlaneBound.Layer layer : bound.layers) {
             Group group = groups.computeIfAbsent(parts(layer), key -> new Group());
-            extend(group.spans, layer.from(), layer.to());
+            group.spans.add(new double[] {layer.from(), layer.to()});
             group.width += layer.to() - layer.from();
             group.conductance += layer.resistance();
         }
@@ -172,8 +173,7 @@ final class Working {
             sum.add(number(ring.resistance()));
         }
         if (left > 0) {
-            lines.add(left + " rings that pass several regions or none all round, ∫ dr/(r ∫ k d(angle)): "
-                    + perLength(rest));
+            lines.add("rings across several regions, ∫ dr/(r ∫ k d(angle)): " + perLength(rest));
             sum.add(number(rest));
         }
         surface(lines, sum, 1 - bound.inner, bound.films[1]);
@@ -182,28 +182,23 @@ final class Working {
         return lines;
     }
 
-    /** Adds a span, joined to the last where they touch. */
-    private static void extend(List<double[]> spans, double from, double to) {
-        if (!spans.isEmpty()) {
-            double[] last = spans.get(spans.size() - 1);
-            if (last[1] == from) {
-                last[1] = to;
-                return;
-            }
-            if (last[0] == to) {
-                last[0] = from;
-                return;
+    /** Coordinates of spans in their order, joined where they touch. */
+    private static String spans(DrawingUnit unit, String coordinate, List<double[]> spans) {
+        spans.sort(Comparator.comparingDouble(span -> span[0]));
+        List<double[]> joined = new ArrayList<>();
+        for (double[] span : spans) {
+            double[] last = joined.isEmpty() ? null : joined.get(joined.size() - 1);
+            if (last != null && last[1] == span[0]) {
+                last[1] = span[1];
+            } else {
+                joined.add(span.clone());
             }
         }
-        spans.add(new double[] {from, to});
-    }
-
-    private static String spans(DrawingUnit unit, String coordinate, List<double[]> spans) {
         List<String> words = new ArrayList<>();
-        for (double[] span : spans.subList(0, Math.min(spans.size(), MOST_LINES))) {
+        for (double[] span : joined.subList(0, Math.min(joined.size(), MOST_LINES))) {
             words.add(unit.length(span[0]).replace(" " + unit.symbol(), "") + " to " + unit.length(span[1]));
         }
-        String more = spans.size() > MOST_LINES ? " and " + (spans.size() - MOST_LINES) + " more" : "";
+        String more = joined.size() > MOST_LINES ? " and " + (joined.size() - MOST_LINES) + " more" : "";
         return coordinate + " = " + String.join(", ", words) + more;
     }
 

@@ -37,11 +37,15 @@ final class AskHeadReader {
      *
      * @param ask the ask's table
      * @param name its name
-     * @param dimension of its answer
+     * @param dimension of its answer; empty where it is not known, and limit and tolerance cannot be read
      */
-    Ask.Head read(KeyTable ask, String name, Dimension dimension) {
-        Limit limit = ask.value("limit").flatMap(v -> limit(v, dimension)).orElse(null);
-        Within within = ask.value("within").flatMap(v -> within(v, dimension)).orElse(DEFAULT_WITHIN);
+    Ask.Head read(KeyTable ask, String name, Optional<Dimension> dimension) {
+        Limit limit = dimension
+                .flatMap(d -> ask.value("limit").flatMap(v -> limit(v, d)))
+                .orElse(null);
+        Within within = dimension
+                .flatMap(d -> ask.value("within").flatMap(v -> within(v, d)))
+                .orElse(DEFAULT_WITHIN);
         return new Ask.Head(name, limit, within, with(ask), ask.place());
     }
 

@@ -58,18 +58,23 @@ final class AskKindReader {
     /**
      * An ask as it is written.
      *
-     * @param name its name
-     * @param kind the key that says what is asked
+     * @param name its name; where it has none of its own, something that no name can be
+     * @param kind the key that says what is asked; empty where that is wrong
      * @param table where it is written
      */
-    record WrittenAsk(String name, String kind, KeyTable table) {
+    record WrittenAsk(String name, Optional<String> kind, KeyTable table) {
         /** What the key that says what is asked says. */
         Value subject() {
-            return table.value(kind).orElseThrow();
+            return kind.flatMap(table::value).orElseThrow();
+        }
+
+        /** Whether it is of this kind. */
+        boolean is(String wanted) {
+            return kind.filter(wanted::equals).isPresent();
         }
     }
 
-    /** All asks with a name of their own and a kind, in the order written. */
+    /** All asks, in the order written. */
     List<WrittenAsk> read(KeyTable root) {
         List<WrittenAsk> asks = new ArrayList<>();
         if (!root.has("ask")) {
@@ -82,20 +87,10 @@ final class AskKindReader {
         for (KeyTable table : root.arrayTables("ask")) {
             table.allow(ASK);
             Optional<String> kind = kind(table);
-            Optional<String> name = table.requiredText("name", "name = \"…\"");
-            if (name.isEmpty()) {
-                continue;
-            }
-            Place first = places.putIfAbsent(name.get(), table.place("name"));
-            if (first != null) {
-                findings.error(
-                        "duplicate-name",
-                        table.place("name"),
-                        "the name '" + name.get() + "' is taken: an ask has it at " + first,
-                        "give this ask another");
-                continue;
-            }
-            kind.ifPresent(k -> asks.add(new WrittenAsk(name.get(), k, table)));
+            Optional<String> name = table.requiredText("name", "name = \"…\"").filter(n -> isFirst(n, table));
+            // One without a name of its own is read all the same, for what else is wrong in it.
+            String key = name.orElse("\0" + asks.size());
+            asks.add(new WrittenAsk(key, kind, table));
         }
         return asks;
     }
@@ -103,6 +98,18 @@ final class AskKindReader {
     /** The names of all asks read, sound or not. */
     Set<String> names() {
         return places.keySet();
+    }
+
+    private boolean isFirst(String name, KeyTable table) {
+        Place first = places.putIfAbsent(name, table.place("name"));
+        if (first != null) {
+            findings.error(
+                    "duplicate-name",
+                    table.place("name"),
+                    "the name '" + name + "' is taken: an ask has it at " + first,
+                    "give this ask another");
+        }
+        return first == null;
     }
 
     private Optional<String> kind(KeyTable table) {

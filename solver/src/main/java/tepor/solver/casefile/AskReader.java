@@ -48,7 +48,7 @@ final class AskReader {
         // Every input must be there before a `with` may name it.
         Map<String, Optional<List<Ask.Less>>> less = new HashMap<>();
         for (WrittenAsk ask : written) {
-            if (ask.kind().equals("transmittance")) {
+            if (ask.is("transmittance")) {
                 less.put(ask.name(), less(ask));
             }
         }
@@ -57,11 +57,11 @@ final class AskReader {
         Map<String, Ask> asks = new HashMap<>();
         for (WrittenAsk ask : order.inOrder()) {
             Optional<Dimension> dimension = order.dimension(ask.name());
+            Ask.Head head = headReader.read(ask.table(), ask.name(), dimension);
             if (dimension.isEmpty()) {
                 continue;
             }
-            Ask.Head head = headReader.read(ask.table(), ask.name(), dimension.get());
-            Optional<Ask> made = ask.kind().equals("difference")
+            Optional<Ask> made = ask.is("difference")
                     ? difference(head, order.operands(ask.name()), asks)
                     : ask(ask, head, less.getOrDefault(ask.name(), Optional.empty()));
             made.ifPresent(a -> asks.put(ask.name(), a));
@@ -83,7 +83,7 @@ final class AskReader {
 
     private Optional<Ask> ask(WrittenAsk ask, Ask.Head head, Optional<List<Ask.Less>> less) {
         Value subject = ask.subject();
-        return switch (ask.kind()) {
+        return switch (ask.kind().orElseThrow()) {
             case "peak" -> targets.ofTemperature(subject).map(t -> new Ask.Peak(head, t));
             case "lowest" -> targets.ofTemperature(subject).map(t -> new Ask.Lowest(head, t));
             case "mean" -> targets.ofTemperature(subject).map(t -> new Ask.Mean(head, t));

@@ -42,7 +42,7 @@ final class CaseFiles {
 
     /** The stem of the case file, or the name of its folder when the stem is {@code case}. */
     String stem() {
-        String file = caseFile.getFileName().toString();
+        String file = String.valueOf(caseFile.getFileName());
         int dot = file.lastIndexOf('.');
         String stem = dot > 0 ? file.substring(0, dot) : file;
         Path folder = caseFile.toAbsolutePath().normalize().getParent();
@@ -52,7 +52,7 @@ final class CaseFiles {
 
     /** The case file as TOML 1.0; empty where it cannot be read, or is not TOML: keys may then be missing for no other reason. */
     Optional<KeyTable> readCase() {
-        return text(caseFile, caseFile.getFileName().toString(), new Place(caseName(), 0, 0))
+        return text(caseFile, String.valueOf(caseFile.getFileName()), new Place(caseName(), 0, 0))
                 .flatMap(this::parse);
     }
 

@@ -24,8 +24,8 @@ final class DifferenceOrder {
     private final Set<String> inCircle = new HashSet<>();
 
     /**
-     * @param written the asks with a kind
-     * @param names the names of all asks, sound or not
+     * @param written all asks
+     * @param names the names among them
      * @param findings takes what is wrong
      */
     DifferenceOrder(List<WrittenAsk> written, Set<String> names, Findings findings) {
@@ -63,7 +63,8 @@ final class DifferenceOrder {
             return Optional.empty();
         }
         open.add(name);
-        Optional<Dimension> dimension = switch (ask.kind()) {
+        Optional<Dimension> dimension = switch (ask.kind().orElse("")) {
+            case "" -> Optional.empty();
             case "peak", "lowest", "mean", "at" -> Optional.of(Dimension.TEMPERATURE);
             case "flow" -> Optional.of(Dimension.HEAT_PER_LENGTH);
             case "coupling", "transmittance" -> Optional.of(Dimension.COUPLING);

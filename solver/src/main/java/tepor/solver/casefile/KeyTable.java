@@ -18,6 +18,9 @@ import tepor.mesher.outline.Place;
 final class KeyTable {
     private static final Pattern BARE = Pattern.compile("[A-Za-z0-9_-]+");
 
+    /** Keys of the case itself, which TOML takes for keys of the table above them when they stand too late. */
+    private static final Set<String> BEFORE_TABLES = Set.of("format", "title", "symmetry", "depth");
+
     private final TomlTable toml;
     private final String header;
     private final String label;
@@ -195,9 +198,11 @@ final class KeyTable {
                     "unknown-key",
                     place(key),
                     "unknown key '" + key + "' in " + header,
-                    NearestWord.to(key, known)
-                            .map(near -> "did you mean '" + near + "'")
-                            .orElse("keys of " + header + " are " + NearestWord.list(allowed.now())));
+                    BEFORE_TABLES.contains(key)
+                            ? "'" + key + "' stands before the first table of the case"
+                            : NearestWord.to(key, known)
+                                    .map(near -> "did you mean '" + near + "'")
+                                    .orElse("keys of " + header + " are " + NearestWord.list(allowed.now())));
         }
     }
 

@@ -1,7 +1,9 @@
 package tepor.solver.casefile;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.Comparator;
+import java.util.EnumSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -35,7 +37,8 @@ final class Names {
         }
     }
 
-    private record Entry(Kind kind, Place place) {}
+    /** The first thing of a name, and what other kinds of thing wrongly share it. */
+    private record Entry(Kind kind, Place place, Set<Kind> all) {}
 
     private final Map<String, Entry> entries = new LinkedHashMap<>();
     private final Findings findings;
@@ -70,8 +73,9 @@ final class Names {
     }
 
     private void declare(String name, Kind kind, Place place) {
-        Entry first = entries.putIfAbsent(name, new Entry(kind, place));
+        Entry first = entries.putIfAbsent(name, new Entry(kind, place, EnumSet.of(kind)));
         if (first != null) {
+            first.all().add(kind);
             findings.error(
                     "duplicate-name",
                     place,
@@ -105,7 +109,7 @@ final class Names {
      */
     boolean check(String name, Place place, String what, String otherKind, Kind... wanted) {
         Optional<Kind> kind = kindOf(name);
-        if (kind.isPresent() && List.of(wanted).contains(kind.get())) {
+        if (kind.isPresent() && !Collections.disjoint(entries.get(name).all(), List.of(wanted))) {
             return true;
         }
         String words =

@@ -123,6 +123,7 @@ final class QuantityKeys {
             return read(String.valueOf(value.raw()), value, range, dimensions);
         }
         Dimension first = dimensions[0];
+        boolean number = value.raw() instanceof Number n && Double.isFinite(n.doubleValue());
         findings.error(
                 value.isNumber() ? "unit-missing" : "wrong-type",
                 value.place(),
@@ -130,8 +131,7 @@ final class QuantityKeys {
                         + (first == Dimension.NUMBER ? "" : " with its unit") + " is wanted",
                 first == Dimension.NUMBER
                         ? "write a number"
-                        : "write a text such as \"" + (value.isNumber() ? value.raw() : "1") + " " + first.unit()
-                                + "\"");
+                        : "write a text such as \"" + (number ? value.raw() : "1") + " " + first.unit() + "\"");
         return Optional.empty();
     }
 

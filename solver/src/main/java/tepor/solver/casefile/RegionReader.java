@@ -30,7 +30,7 @@ final class RegionReader {
     private final boolean depthStated;
     private final Set<String> usedMaterials = new HashSet<>();
     private final Set<String> usedRecords = new HashSet<>();
-    private boolean allNamed = true;
+    private boolean complete = true;
 
     /**
      * @param drawing the drawing
@@ -68,7 +68,7 @@ final class RegionReader {
         for (KeyTable table : tables) {
             table.allow(REGION);
             Optional<String> name = table.requiredText("name", "name = \"…\"");
-            allNamed &= name.isPresent();
+            complete &= name.isPresent() && table.has("material");
             region(table, name, regions.size()).ifPresent(regions::add);
         }
         warnOfUnused(root);
@@ -80,11 +80,12 @@ final class RegionReader {
         boolean hole = materialName.filter(MaterialReader.NOTHING::equals).isPresent();
         Optional<Material> material = materialName.filter(m -> !hole).flatMap(m -> material(table, m));
         Optional<HeatSource> heat = heat(table, name.orElse(""), hole);
+        OutlineFinder finder = new OutlineFinder(drawing, usedRecords);
+        Optional<RegionShape> shape =
+                name.isPresent() || table.has("outline") ? finder.find(name.orElse(""), hole, table) : Optional.empty();
         if (name.isEmpty()) {
             return Optional.empty();
         }
-        OutlineFinder finder = new OutlineFinder(drawing, usedRecords);
-        Optional<RegionShape> shape = finder.find(name.get(), hole, table);
         boolean sound = hole || material.isPresent() && heat.isPresent() == table.has("heat");
         Optional<Region> region = sound
                 ? Optional.of(new Region(name.get(), index, material.orElse(null), heat.orElse(null), table.place()))
@@ -164,8 +165,8 @@ final class RegionReader {
     }
 
     private void warnOfUnused(KeyTable root) {
-        // Without its name a region may have meant any of them.
-        if (!allNamed) {
+        // A region without its name or material may have meant any of them.
+        if (!complete) {
             return;
         }
         root.reportingTo(new Findings()).namedTables("material").forEach((name, table) -> {

@@ -8,6 +8,9 @@ import tepor.mesher.mesh.Mesh;
  * field has its extremes where its gradient vanishes.
  */
 public final class ExtremeFinder {
+    /** Curvatures of a smaller ratio than this are round-off along a ridge. */
+    private static final double FLAT = 1e-9;
+
     private final TemperatureField field;
     private final Mesh mesh;
     private final double sign;
@@ -122,8 +125,9 @@ public final class ExtremeFinder {
         double cyy = 2 * u2 - 4 * m20;
         double cxy = 4 * m12 - 2 * bx - 2 * by - cxx - cyy;
         double det = 4 * cxx * cyy - cxy * cxy;
-        if (det <= 0 || cxx >= 0) {
-            return;
+        double trace = 2 * (cxx + cyy);
+        if (det <= FLAT * trace * trace || cxx >= 0) {
+            return; // no peak, or a ridge: that is as high where it leaves the triangle
         }
         double xi = (-2 * cyy * bx + cxy * by) / det;
         double eta = (-2 * cxx * by + cxy * bx) / det;

@@ -13,8 +13,8 @@ import no.uib.cipr.matrix.sparse.Preconditioner;
  * coarse-level correction. For a symmetric positive definite matrix this is a fixed linear map that is symmetric positive
  * definite itself, as conjugate gradients need.
  *
- * <p>Every coarse level but the finest's is visited twice (a W-cycle): a single visit degrades where good conductors meet
- * in points only.
+ * <p>Every coarse level that is not solved directly is visited twice (a W-cycle): a single visit degrades where good
+ * conductors meet in points only.
  *
  * <p>Matrices of six-node triangles are first coarsened to the linear functions on the same triangles
  * ({@link #quadratic}).
@@ -77,9 +77,6 @@ public final class MultilevelPreconditioner implements Preconditioner {
                 if (prolongation.columnCount > STALLED * a.rowCount) {
                     prolongation = null;
                 }
-            }
-            if (prolongation != null && prolongation.columnCount == 0) {
-                prolongation = null;
             }
             levels.add(new Level(a, diagonalSlot, prolongation));
             a = prolongation == null ? null : a.galerkin(prolongation);

@@ -7,7 +7,7 @@ import java.util.List;
  * Judges from the movement of one figure over the rounds of refinement how far off the mesh may be. An estimate, not a
  * bound.
  *
- * <p>A figure is settled once it moved by less than a quarter of its tolerance twice running; three times its last movement
+ * <p>A figure is settled once it moved by no more than a quarter of its tolerance twice running; three times its last movement
  * is its error.
  */
 public final class Convergence {
@@ -33,9 +33,9 @@ public final class Convergence {
         return values.size() < 2 ? Double.POSITIVE_INFINITY : SAFETY * movement(0);
     }
 
-    /** Whether the figure moved by less than a quarter of its tolerance twice running. */
+    /** Whether the figure moved by no more than a quarter of its tolerance twice running. */
     public boolean settled() {
-        return values.size() >= 3 && movement(0) < SETTLED * within && movement(1) < SETTLED * within;
+        return values.size() >= 3 && movement(0) <= SETTLED * within && movement(1) <= SETTLED * within;
     }
 
     /** Movement in the last round (back = 0) or the one before (back = 1). */

@@ -282,4 +282,17 @@ class FaultyAskAndMeshTest {
                         """);
         assertThat(errors).hasSize(4);
     }
+
+    @Test
+    void anAskWithoutNameOrKindIsReadAllTheSame() {
+        String asks = """
+                «[[ask]]
+                «lowest = "bra"
+                «limit = ">= 5"
+                «[[ask]]
+                name = "what"
+                with = { «"air.room.fil" = "3 W/(m2.K)" }
+                """;
+        assertThat(new CaseFolder(temp).errors(CaseFolder.SOUND + asks)).hasSize(5);
+    }
 }

@@ -2,6 +2,7 @@ package tepor.solver.casefile;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.catchThrowableOfType;
+import static org.assertj.core.api.Assertions.within;
 
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
@@ -156,10 +157,10 @@ class FaultyFileTest {
 
     @Test
     void recordsOfOneNameThatOverlap() {
-        folder().write(
-                        "duct.wkt",
-                        "plate: POLYGON ((0 0, 100 0, 100 50, 0 50, 0 0))\n"
-                                + "plate: POLYGON ((90 0, 120 0, 120 50, 90 50, 90 0))\n");
+        folder().write("duct.wkt", """
+                        plate: POLYGON ((0 0, 100 0, 100 50, 0 50, 0 0))
+                        plate: POLYGON ((90 0, 120 0, 120 50, 90 50, 90 0))
+                        """);
         List<Finding> errors = folder().all(WITH_FILE);
         assertThat(errors).hasSize(1);
         assertThat(errors.get(0).what()).contains("'plate'", "overlap");
@@ -167,13 +168,12 @@ class FaultyFileTest {
 
     @Test
     void recordsOfOneNameThatMeetAreOneRegion() {
-        folder().write(
-                        "duct.wkt",
-                        "plate: POLYGON ((0 0, 100 0, 100 50, 0 50, 0 0))\n"
-                                + "plate: MULTIPOLYGON (((100 0, 120 0, 120 50, 100 50, 100 0)))\n");
+        folder().write("duct.wkt", """
+                        plate: POLYGON ((0 0, 100 0, 100 50, 0 50, 0 0))
+                        plate: MULTIPOLYGON (((100 0, 120 0, 120 50, 100 50, 100 0)))
+                        """);
         Case subject = folder().read(WITH_FILE);
-        assertThat(subject.section().area(0))
-                .isCloseTo((120 * 50 - 800) * 1e-6, org.assertj.core.api.Assertions.within(1e-12));
+        assertThat(subject.section().area(0)).isCloseTo((120 * 50 - 800) * 1e-6, within(1e-12));
     }
 
     @Test

@@ -26,6 +26,9 @@ class FaultyKeyTest {
                 fault("title =", "«symmetry = 'axial' #", "axial;does not do it yet", "planar"),
                 fault("title =", "«symmetry = 'round' #", "\"round\"", "planar"),
                 fault("title =", "«depth = '0 m' #", "'depth' of the case;greater than zero", "above 0"),
+                fault("title =", "«depth = '1 ± 1 m' #", "'depth';reaches zero", "smaller"),
+                fault("title =", "«depth = inf #", "'depth';Infinity", "\"1 m\""),
+                fault("unit = 'mm'", "unit = 'mm'\n«depth = '2 m'", "'depth' in [outline]", "before the first table"),
                 fault("title =", "«depth = '2 kg' #", "'depth';2 kg", "a length"),
                 fault("title =", "«depth = 2 #", "'depth';number 2;unit", "\"2 m\""),
                 fault("title =", "«report = 'x' #", "'report';table", "[report]"),
@@ -55,6 +58,7 @@ class FaultyKeyTest {
                         "leave the spread out"),
                 fault("unit = 'mm'", "unit = 'mm'\n«snap = '1 s'", "'snap'", "a length"),
                 fault("unit = 'mm'", "unit = 'mm'\n«fiel = 'x.wkt'", "'fiel' in [outline]", "'file'"),
+                fault("unit = 'mm'", "unit = 'mm'\n«file = 'a\\u0000.wkt'", "not a file name", "exists"),
                 fault("unit = 'mm'", "unit = 'mm'\n«file = 7", "'file';number 7", "quotes"));
     }
 

@@ -300,4 +300,28 @@ class FaultyRegionAndEdgeTest {
         List<Finding> errors = new CaseFolder(temp).errors(toml);
         assertThat(errors.get(0).remedy()).contains("[[edge]]");
     }
+
+    @Test
+    void aRegionWithoutNameIsReadAllTheSame() {
+        String region = """
+                «[[region]]
+                «outline = "POLYGON ((0 0, 9 9, 9 0, 0 9, 0 0))"
+                «material = "steal"
+                «heat = 5
+                """;
+        assertThat(new CaseFolder(temp).errors(CaseFolder.SOUND + region)).hasSize(4);
+    }
+
+    @Test
+    void aNameThatStandsTwiceIsNoOtherError() {
+        String more = """
+                [[edge]]
+                «name = "bar"
+                where = "left"
+                [[ask]]
+                name = "q"
+                flow = "bar"
+                """;
+        assertThat(new CaseFolder(temp).errors(CaseFolder.SOUND + more)).hasSize(1);
+    }
 }

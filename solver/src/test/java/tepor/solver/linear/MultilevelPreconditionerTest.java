@@ -77,12 +77,33 @@ class MultilevelPreconditionerTest {
         assertThat(back.add(-1, exact).norm(Vector.Norm.Infinity)).isLessThan(1e-9);
     }
 
+    /** A bar that is insulated all round: its matrix has the constants for a null space, and a last pivot of rounding. */
+    @Test
+    void aSemidefiniteMatrixStillGivesADefiniteMap() {
+        for (int nodes = 20; nodes < 60; nodes++) {
+            int[] elements = new int[2 * (nodes - 1)];
+            Arrays.setAll(elements, k -> (k + 1) / 2);
+            SparsityPattern pattern = new SparsityPattern(nodes, 2, elements);
+            double[] value = new double[pattern.slotCount()];
+            Random random = new Random(nodes);
+            for (int e = 0; e < nodes - 1; e++) {
+                double k = random.nextDouble();
+                pattern.add(e, new double[] {k, -k, -k, k}, value);
+            }
+            DenseVector x = random(nodes, 1);
+            Vector bx =
+                    new MultilevelPreconditioner(new SymmetricMatrix(pattern, value)).apply(x, new DenseVector(nodes));
+            assertThat(x.dot(bx)).isPositive().isFinite();
+        }
+    }
+
     @Test
     void quadraticProblemsAreCoarsenedToTheirCorners() {
         MultilevelPreconditioner b =
                 ModelProblem.quadratic(CELLS, ModelProblem.constant(1)).solver().preconditioner();
         assertThat(b.unknowns(0)).isEqualTo((2 * CELLS + 1) * (2 * CELLS + 1));
         assertThat(b.unknowns(1)).isEqualTo((CELLS + 1) * (CELLS + 1));
+        assertThat(b.unknowns(2)).as("aggregates of five and more").isLessThan(b.unknowns(1) / 5);
         assertThat(b.unknowns(b.levelCount() - 1)).isLessThanOrEqualTo(300);
     }
 

@@ -101,6 +101,7 @@ class FaultyQuantityTest {
                 "0.65 W/(m.K) ± 10 % (normal) | CONDUCTIVITY | coverage factor | (normal, k=2)",
                 "0.65 W/(m.K) ± 10 % (normal, k=0) | CONDUCTIVITY | coverage factor | (normal, k=2)",
                 "0.65 W/(m.K) ± 10 % (normal, k=-2) | CONDUCTIVITY | coverage factor | (normal, k=2)",
+                "0.65 W/(m.K) ± 10 % (normal, k=1e400) | CONDUCTIVITY | too large | finite",
                 "0.65 W/(m.K) ± 10 % (gaussian) | CONDUCTIVITY | no distribution | (triangular)",
                 "0.65 W/(m.K) ± 10 % (rectangular, k=2) | CONDUCTIVITY | no distribution | (rectangular)",
                 "0.65 W/(m.K) (normal, k=2) | CONDUCTIVITY | no spread       | before it",

@@ -49,6 +49,14 @@ final class AskMarkers {
         return 0.42 * font.getSize2D();
     }
 
+    /** Where asks have their places, metres. */
+    List<double[]> places() {
+        return asks.stream()
+                .map(AskAnswer::where)
+                .filter(where -> where != null)
+                .toList();
+    }
+
     /** Finds places for the tags. */
     void place(SectionView view, Rectangle2D frame) {
         for (int i = 0; i < asks.size(); i++) {

@@ -50,7 +50,8 @@ public final class FigureText {
         }
         int decimals = decimals(error, value);
         double shown = Math.ceil(error * Math.pow(10, decimals) - 1e-9) / Math.pow(10, decimals);
-        return number(value, decimals) + (shown > 0 ? " ± " + number(shown, decimals) : "") + unit;
+        boolean seen = error >= 0.5 * Math.pow(10, -decimals); // else the value is as exact as it is written
+        return number(value, decimals) + (seen ? " ± " + number(shown, decimals) : "") + unit;
     }
 
     /** Limit and verdict of an answer in words: "≤ 105 °C: met"; empty where it has no limit. */
@@ -65,8 +66,9 @@ public final class FigureText {
                 limit.quantity().dimension());
         return (limit.relation() == Limit.Relation.AT_MOST ? "≤ " : "≥ ")
                 + significant(value, 6)
-                + " "
-                + unit(limit.quantity().unit())
+                + (limit.quantity().unit().isEmpty()
+                        ? ""
+                        : " " + unit(limit.quantity().unit()))
                 + ": "
                 + answer.verdict().word();
     }
@@ -82,9 +84,9 @@ public final class FigureText {
         return Double.isFinite(si) ? Math.abs(Units.fromSi(si, answer.unit(), dimension)) : si;
     }
 
-    /** Two significant digits of an error (JCGM 100:2008, 7.2.6); at most nine digits of the value. */
+    /** Two significant digits of an error (JCGM 100:2008, 7.2.6); at most seven digits of the value. */
     private static int decimals(double error, double value) {
-        int most = 8 - (int) Math.floor(Math.log10(Math.max(Math.abs(value), 1e-6)));
+        int most = 6 - (int) Math.floor(Math.log10(Math.max(Math.abs(value), 1e-6)));
         int magnitude = (int) Math.floor(Math.log10(error));
 
         return Math.max(0, Math.min(most, 1 - magnitude));

@@ -37,7 +37,7 @@ final class KeyRow {
         double metresPerUnit = unit.metres();
         String symbol = unit.symbol();
         double most = widthAtMost / pixelsPerMetre;
-        if (most / metresPerUnit < 0.1 || most / metresPerUnit >= 5000) {
+        if (most / metresPerUnit < 0.1 || most / metresPerUnit >= 1000) {
             double[] metres = {1e3, 1, 1e-3, 1e-6, 1e-9};
             String[] symbols = {"km", "m", "mm", "µm", "nm"};
             for (int i = 0; i < metres.length; i++) {

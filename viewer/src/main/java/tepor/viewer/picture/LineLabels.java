@@ -85,7 +85,7 @@ final class LineLabels {
         double width = PictureFont.width(figure, font);
         double gap = width + 0.5 * height;
         double total = end(along);
-        double margin = line.closed() ? 0 : 0.4 * height;
+        double margin = line.closed() ? 0 : 0.8 * height;
         if (total < (line.closed() ? 2.2 * gap : gap + 2 * margin)) {
             return;
         }

@@ -40,9 +40,16 @@ final class SectionView {
      * @param unit px for which line widths are meant
      */
     SectionView(Section section, Rectangle2D frame, double unit) {
+        this(section, section.bounds(), frame, unit);
+    }
+
+    /**
+     * @param window what of the section is to fill the frame: least x, least y, greatest x, greatest y, metres
+     */
+    SectionView(Section section, double[] window, Rectangle2D frame, double unit) {
         this.section = section;
         this.unit = unit;
-        bounds = section.bounds();
+        bounds = window.clone();
         double width = bounds[2] - bounds[0];
         double height = bounds[3] - bounds[1];
         scale = Math.min(frame.getWidth() / width, frame.getHeight() / height);
@@ -80,7 +87,7 @@ final class SectionView {
         return top + scale * (bounds[3] - metres);
     }
 
-    /** The material's bounding box, px. */
+    /** The material's bounding box, or the window, px. */
     Rectangle2D box() {
         return new Rectangle2D.Double(left, top, scale * (bounds[2] - bounds[0]), scale * (bounds[3] - bounds[1]));
     }

@@ -2,8 +2,11 @@ package tepor.solver.bracket;
 
 import java.util.function.DoubleUnaryOperator;
 
-/** Gauss–Legendre quadrature with sixteen points (Abramowitz & Stegun 25.4.29; nodes found by Newton's method). */
-final class GaussRule {
+/**
+ * Integrals over an interval: of 1/f for f linear in closed form, of others by Gauss–Legendre quadrature with sixteen points
+ * (Abramowitz & Stegun 25.4.29; nodes found by Newton's method).
+ */
+final class Integral {
     private static final int POINTS = 16;
     private static final double[] NODE = new double[POINTS];
     private static final double[] WEIGHT = new double[POINTS];
@@ -28,10 +31,10 @@ final class GaussRule {
         }
     }
 
-    private GaussRule() {}
+    private Integral() {}
 
     /** ∫ f from a to b, f being smooth up to the ends. */
-    static double integral(double a, double b, DoubleUnaryOperator f) {
+    static double of(double a, double b, DoubleUnaryOperator f) {
         double sum = 0;
         for (int i = 0; i < POINTS; i++) {
             sum += WEIGHT[i] * f.applyAsDouble(0.5 * (a + b) + 0.5 * (b - a) * NODE[i]);
@@ -40,10 +43,21 @@ final class GaussRule {
     }
 
     /** ∫ f from a to b, f behaving as a square root does at the ends: with x = a + (b − a) sin²φ it becomes smooth. */
-    static double integralWithRoots(double a, double b, DoubleUnaryOperator f) {
-        return integral(0, Math.PI / 2, phi -> {
+    static double withRoots(double a, double b, DoubleUnaryOperator f) {
+        return of(0, Math.PI / 2, phi -> {
             double sine = Math.sin(phi);
             return f.applyAsDouble(a + (b - a) * sine * sine) * (b - a) * Math.sin(2 * phi);
         });
+    }
+
+    /** ∫ dx / f(x) over a length, f being linear from a to b, both at least zero; infinite where one is zero. */
+    static double ofInverse(double length, double a, double b) {
+        double mean = 0.5 * (a + b);
+        double relative = (b - a) / mean;
+        if (Math.abs(relative) < 1e-4) {
+            // ln(b/a)/(b − a) by its series about the mean: differences of close numbers lose their digits.
+            return length / mean * (1 + relative * relative / 12);
+        }
+        return length * Math.log(b / a) / (b - a);
     }
 }
