@@ -6,9 +6,9 @@ import static com.tngtech.archunit.library.dependencies.SlicesRuleDefinition.sli
 
 import com.tngtech.archunit.core.domain.Dependency;
 import com.tngtech.archunit.core.domain.JavaClass;
+import com.tngtech.archunit.core.domain.JavaClasses;
+import com.tngtech.archunit.core.importer.ClassFileImporter;
 import com.tngtech.archunit.core.importer.ImportOption;
-import com.tngtech.archunit.junit.AnalyzeClasses;
-import com.tngtech.archunit.junit.ArchTest;
 import com.tngtech.archunit.lang.ArchCondition;
 import com.tngtech.archunit.lang.ArchRule;
 import com.tngtech.archunit.lang.ConditionEvents;
@@ -17,9 +17,9 @@ import com.tngtech.archunit.library.GeneralCodingRules;
 import com.tngtech.archunit.library.dependencies.SliceAssignment;
 import com.tngtech.archunit.library.dependencies.SliceIdentifier;
 import java.util.List;
+import org.junit.jupiter.api.Test;
 
 /** The arrows between modules and packages, and what only certain packages may do. */
-@AnalyzeClasses(packages = "tepor", importOptions = ImportOption.DoNotIncludeTests.class)
 class ArchitectureTest {
     /** From the bottom to the top: a package uses itself and what stands before it. */
     private static final List<String> LAYERS = List.of(
@@ -44,83 +44,113 @@ class ArchitectureTest {
             "tepor.viewer.window",
             "tepor.viewer.command");
 
-    @ArchTest
-    static final ArchRule packagesUseOnlyWhatStandsBelow =
-            classes().that().resideInAPackage("tepor..").should(useOnlyWhatStandsBelow());
+    private static final JavaClasses CLASSES = new ClassFileImporter()
+            .withImportOption(ImportOption.Predefined.DO_NOT_INCLUDE_TESTS)
+            .importPackages("tepor");
 
-    @ArchTest
-    static final ArchRule noCirclesBetweenPackages = slices().assignedFrom(new SliceAssignment() {
-                @Override
-                public SliceIdentifier getIdentifierOf(JavaClass one) {
-                    return SliceIdentifier.of(one.getPackageName());
-                }
+    @Test
+    void packagesUseOnlyWhatStandsBelow() {
+        ArchRule rule = classes().that().resideInAPackage("tepor..").should(useOnlyWhatStandsBelow());
+        rule.check(CLASSES);
+    }
 
-                @Override
-                public String getDescription() {
-                    return "packages";
-                }
-            })
-            .should()
-            .beFreeOfCycles();
+    @Test
+    void noCirclesBetweenPackages() {
+        ArchRule rule = slices().assignedFrom(new SliceAssignment() {
+                    @Override
+                    public SliceIdentifier getIdentifierOf(JavaClass one) {
+                        return SliceIdentifier.of(one.getPackageName());
+                    }
 
-    @ArchTest
-    static final ArchRule noCirclesBetweenFiles = slices().assignedFrom(new SliceAssignment() {
-                @Override
-                public SliceIdentifier getIdentifierOf(JavaClass one) {
-                    return SliceIdentifier.of(outermost(one).getName());
-                }
+                    @Override
+                    public String getDescription() {
+                        return "packages";
+                    }
+                })
+                .should()
+                .beFreeOfCycles();
+        rule.check(CLASSES);
+    }
 
-                @Override
-                public String getDescription() {
-                    return "files";
-                }
-            })
-            .should()
-            .beFreeOfCycles();
+    @Test
+    void noCirclesBetweenFiles() {
+        ArchRule rule = slices().assignedFrom(new SliceAssignment() {
+                    @Override
+                    public SliceIdentifier getIdentifierOf(JavaClass one) {
+                        return SliceIdentifier.of(outermost(one).getName());
+                    }
 
-    @ArchTest
-    static final ArchRule onlyTheCommandLinePrints = noClasses()
-            .that()
-            .resideOutsideOfPackage("tepor.viewer.command..")
-            .should(GeneralCodingRules.ACCESS_STANDARD_STREAMS);
+                    @Override
+                    public String getDescription() {
+                        return "files";
+                    }
+                })
+                .should()
+                .beFreeOfCycles();
+        rule.check(CLASSES);
+    }
 
-    @ArchTest
-    static final ArchRule onlyMainEndsTheProcess = noClasses()
-            .that()
-            .doNotHaveFullyQualifiedName("tepor.viewer.command.Main")
-            .should()
-            .callMethod(System.class, "exit", int.class)
-            .orShould()
-            .callMethod(Runtime.class, "exit", int.class)
-            .orShould()
-            .callMethod(Runtime.class, "halt", int.class);
+    @Test
+    void onlyTheCommandLinePrints() {
+        ArchRule rule = noClasses()
+                .that()
+                .resideOutsideOfPackage("tepor.viewer.command..")
+                .should(GeneralCodingRules.ACCESS_STANDARD_STREAMS);
+        rule.check(CLASSES);
+    }
 
-    @ArchTest
-    static final ArchRule onlyQuantityAndCaseFileKnowUnits = noClasses()
-            .that()
-            .resideOutsideOfPackages("tepor.solver.quantity..", "tepor.solver.casefile..")
-            .should()
-            .dependOnClassesThat()
-            .resideInAnyPackage("javax.measure..", "tech.units..", "systems.uom..", "si.uom..", "tech.uom..");
+    @Test
+    void onlyMainEndsTheProcess() {
+        ArchRule rule = noClasses()
+                .that()
+                .doNotHaveFullyQualifiedName("tepor.viewer.command.Main")
+                .should()
+                .callMethod(System.class, "exit", int.class)
+                .orShould()
+                .callMethod(Runtime.class, "exit", int.class)
+                .orShould()
+                .callMethod(Runtime.class, "halt", int.class);
+        rule.check(CLASSES);
+    }
 
-    @ArchTest
-    static final ArchRule onlyTheWindowKnowsJavaFx = noClasses()
-            .that()
-            .resideOutsideOfPackage("tepor.viewer.window..")
-            .should()
-            .dependOnClassesThat()
-            .resideInAnyPackage("javafx..");
+    @Test
+    void onlyQuantityAndCaseFileKnowUnits() {
+        ArchRule rule = noClasses()
+                .that()
+                .resideOutsideOfPackages("tepor.solver.quantity..", "tepor.solver.casefile..")
+                .should()
+                .dependOnClassesThat()
+                .resideInAnyPackage("javax.measure..", "tech.units..", "systems.uom..", "si.uom..", "tech.uom..");
+        rule.check(CLASSES);
+    }
 
-    @ArchTest
-    static final ArchRule onlyTheCommandLineKnowsItsLibraries = noClasses()
-            .that()
-            .resideOutsideOfPackage("tepor.viewer.command..")
-            .should()
-            .dependOnClassesThat()
-            .resideInAnyPackage("picocli..", "me.tongfei..");
+    @Test
+    void onlyTheWindowKnowsJavaFx() {
+        ArchRule rule = noClasses()
+                .that()
+                .resideOutsideOfPackage("tepor.viewer.window..")
+                .should()
+                .dependOnClassesThat()
+                .resideInAnyPackage("javafx..");
+        rule.check(CLASSES);
+    }
 
-    @ArchTest
-    static final ArchRule nobodyThrowsGenericExceptions = GeneralCodingRules.NO_CLASSES_SHOULD_THROW_GENERIC_EXCEPTIONS;
+    @Test
+    void onlyTheCommandLineKnowsItsLibraries() {
+        ArchRule rule = noClasses()
+                .that()
+                .resideOutsideOfPackage("tepor.viewer.command..")
+                .should()
+                .dependOnClassesThat()
+                .resideInAnyPackage("picocli..", "me.tongfei..");
+        rule.check(CLASSES);
+    }
+
+    @Test
+    void nobodyThrowsGenericExceptions() {
+        ArchRule rule = GeneralCodingRules.NO_CLASSES_SHOULD_THROW_GENERIC_EXCEPTIONS;
+        rule.check(CLASSES);
+    }
 
     private static JavaClass outermost(JavaClass one) {
         return one.getEnclosingClass().map(ArchitectureTest::outermost).orElse(one);
