@@ -21,14 +21,14 @@ final class MeshFinder {
     private static final double GROWTH_FIRST = 2;
 
     private static final double GROWTH_FAR = 4;
-    private static final double GROWTH_MIDDLE = 2.5;
-    private static final double GROWTH_NEAR = 1.8;
+    private static final double GROWTH_MIDDLE = 2.2;
+    private static final double GROWTH_NEAR = 1.6;
 
     /** Growth of the size per distance. */
     private static final double GRADATION = 0.5;
 
     /** The mesher takes a size for the longest side wanted; its triangles' sides come out shorter by this on average. */
-    private static final double LONGEST_TO_MEAN = 1.95;
+    private static final double LONGEST_TO_MEAN = 2.1;
 
     private final Case subject;
     private final BooleanSupplier stopped;

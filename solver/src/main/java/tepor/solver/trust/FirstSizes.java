@@ -14,7 +14,7 @@ public final class FirstSizes implements SizeField {
     /** About so many triangles would fill the section at the base size. */
     private static final double TRIANGLES_LINEAR = 1500;
 
-    private static final double TRIANGLES_QUADRATIC = 500;
+    private static final double TRIANGLES_QUADRATIC = 600;
 
     /** A size is the longest side wanted; the sides of a mesh come out shorter by this on average. */
     private static final double LONGEST_TO_MEAN = 1.7;
@@ -23,7 +23,7 @@ public final class FirstSizes implements SizeField {
     private static final double GRADATION = 0.5;
 
     /** Size at a singular point, relative to its clearance. */
-    private static final double TIP = 0.25;
+    private static final double TIP = 0.1;
 
     /** Many singular points, as of a grid of bars, are met by the adaptive rounds; the first mesh stays small. */
     private static final int MANY = 300;

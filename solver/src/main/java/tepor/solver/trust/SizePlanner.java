@@ -11,7 +11,7 @@ public final class SizePlanner {
     private static final double LEAST_SHRINK = 0.8;
 
     /** A corner calls for sizes that no single round could foresee. */
-    private static final double MOST_SHRINK = 0.25;
+    private static final double MOST_SHRINK = 0.08;
 
     private SizePlanner() {}
 

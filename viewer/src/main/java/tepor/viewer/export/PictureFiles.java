@@ -1,15 +1,25 @@
 package tepor.viewer.export;
 
+import java.awt.Graphics2D;
+import java.awt.RenderingHints;
+import java.awt.geom.Ellipse2D;
+import java.awt.geom.Line2D;
 import java.io.IOException;
+import java.io.OutputStream;
+import java.io.UncheckedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Locale;
 import java.util.Set;
+import java.util.concurrent.CompletableFuture;
+import java.util.concurrent.CompletionException;
 import tepor.solver.answer.Answer;
 import tepor.solver.answer.Inspection;
 import tepor.viewer.picture.IsothermPicture;
 import tepor.viewer.picture.OutlinePicture;
+import tepor.viewer.picture.Picture;
 import tepor.viewer.picture.PictureOptions;
+import tepor.viewer.picture.drawing.PictureFont;
 
 /** The pictures that go with an answer or an inspection. */
 public final class PictureFiles {
@@ -30,9 +40,65 @@ public final class PictureFiles {
         }
         IsothermPicture picture = new IsothermPicture(answer, options);
         Path png = folder.reserve("isotherms.png");
-        PngWriter.write(picture, png);
-        SvgWriter.write(picture, folder.reserve("isotherms.svg"));
+        Path svg = folder.reserve("isotherms.svg");
+        CompletableFuture<Void> other = CompletableFuture.runAsync(() -> {
+            try {
+                SvgWriter.write(picture, svg);
+            } catch (IOException e) {
+                throw new UncheckedIOException(e);
+            }
+        });
+        try {
+            PngWriter.write(picture, png);
+        } finally {
+            await(other);
+        }
         return new PictureFile("image/png", picture.description(), Files.readAllBytes(png));
+    }
+
+    private static void await(CompletableFuture<Void> writing) throws IOException {
+        try {
+            writing.join();
+        } catch (CompletionException e) {
+            if (e.getCause() instanceof UncheckedIOException io) {
+                throw io.getCause();
+            }
+            throw e;
+        }
+    }
+
+    /**
+     * Draws a few words to nowhere, as PNG and as SVG: what the first picture of a process loads is then loaded while
+     * something else is computed.
+     */
+    public static void warmUp() throws IOException {
+        Picture words = new Picture() {
+            @Override
+            public int width() {
+                return 60;
+            }
+
+            @Override
+            public int height() {
+                return 20;
+            }
+
+            @Override
+            public String description() {
+                return "warm-up";
+            }
+
+            @Override
+            public void paint(Graphics2D g) {
+                g.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
+                g.fill(new Ellipse2D.Double(1, 1, 8, 8));
+                g.draw(new Line2D.Double(0, 0, 9, 3));
+                g.setFont(PictureFont.size(9));
+                g.drawString("0.5 °C", 12, 12);
+            }
+        };
+        PngWriter.write(words, OutputStream.nullOutputStream());
+        SvgWriter.write(words, OutputStream.nullOutputStream());
     }
 
     /** Whether the name of a file says what kind of picture it is to be. */

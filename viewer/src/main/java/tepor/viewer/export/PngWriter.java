@@ -3,6 +3,7 @@ package tepor.viewer.export;
 import java.awt.Graphics2D;
 import java.awt.image.BufferedImage;
 import java.io.IOException;
+import java.io.OutputStream;
 import java.nio.file.Path;
 import javax.imageio.ImageIO;
 import tepor.viewer.picture.Picture;
@@ -13,6 +14,10 @@ public final class PngWriter {
 
     /** Writes a picture, whole or not at all. */
     public static void write(Picture picture, Path file) throws IOException {
+        WholeFile.write(file, out -> write(picture, out));
+    }
+
+    static void write(Picture picture, OutputStream out) throws IOException {
         BufferedImage image = new BufferedImage(picture.width(), picture.height(), BufferedImage.TYPE_INT_RGB);
         Graphics2D g = image.createGraphics();
         try {
@@ -21,10 +26,8 @@ public final class PngWriter {
             g.dispose();
         }
         ImageIO.setUseCache(false); // else each picture goes through a temporary file
-        WholeFile.write(file, out -> {
-            if (!ImageIO.write(image, "png", out)) {
-                throw new IOException("this Java cannot write PNG");
-            }
-        });
+        if (!ImageIO.write(image, "png", out)) {
+            throw new IOException("this Java cannot write PNG");
+        }
     }
 }

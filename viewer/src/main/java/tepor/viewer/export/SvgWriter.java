@@ -2,6 +2,7 @@ package tepor.viewer.export;
 
 import java.awt.Dimension;
 import java.io.IOException;
+import java.io.OutputStream;
 import java.io.StringWriter;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
@@ -22,6 +23,10 @@ public final class SvgWriter {
 
     /** Writes a picture, whole or not at all. */
     public static void write(Picture picture, Path file) throws IOException {
+        WholeFile.write(file, out -> write(picture, out));
+    }
+
+    static void write(Picture picture, OutputStream out) throws IOException {
         Document document = GenericDOMImplementation.getDOMImplementation().createDocument(NAMESPACE, "svg", null);
         SVGGeneratorContext context = SVGGeneratorContext.createDefault(document);
         context.setPrecision(DECIMALS);
@@ -36,8 +41,7 @@ public final class SvgWriter {
         root.insertBefore(title, root.getFirstChild());
         StringWriter text = new StringWriter();
         g.stream(root, text, true, false);
-        byte[] bytes = finish(text.toString()).getBytes(StandardCharsets.UTF_8);
-        WholeFile.write(file, out -> out.write(bytes));
+        out.write(finish(text.toString()).getBytes(StandardCharsets.UTF_8));
     }
 
     /**
