@@ -10,6 +10,9 @@ import tepor.solver.trust.Convergence;
 
 /** Follows every ask of a case over the rounds of refinement. */
 final class AskConvergence {
+    /** What is left at least of the errors of two terms in their difference. */
+    private static final double CANCELLED = 0.1;
+
     private final Case subject;
     private final List<Convergence> convergences = new ArrayList<>();
     private final List<Double> last = new ArrayList<>();
@@ -41,27 +44,45 @@ final class AskConvergence {
     }
 
     boolean settled() {
-        return convergences.stream().allMatch(Convergence::settled);
+        for (int i = 0; i < convergences.size(); i++) {
+            if (!reached(i)) {
+                return false;
+            }
+        }
+        return true;
     }
 
     /** Mesh error of the ask that is worst off, relative to its tolerance; NaN after a single round or without asks. */
     double widestRelative() {
         double widest = Double.NaN;
         for (int i = 0; i < convergences.size() && rounds > 1; i++) {
-            double relative = convergences.get(i).error() / within.get(i);
+            double relative = halfWidth(i) / within.get(i);
             widest = Double.isNaN(widest) ? relative : Math.max(widest, relative);
         }
         return widest;
     }
 
     MeshError error(int i) {
-        double error = convergences.get(i).error();
-        return new MeshError(
-                -error,
-                error,
-                MeshError.Kind.ESTIMATE,
-                within.get(i),
-                convergences.get(i).settled());
+        double error = halfWidth(i);
+        return new MeshError(-error, error, MeshError.Kind.ESTIMATE, within.get(i), reached(i));
+    }
+
+    private boolean reached(int i) {
+        return convergences.get(i).settled() && halfWidth(i) <= within.get(i);
+    }
+
+    /**
+     * Half-width of an error interval. A difference may stand still while both its terms move alike; that their errors
+     * cancel is trusted to a tenth only.
+     */
+    private double halfWidth(int i) {
+        double own = convergences.get(i).error();
+        if (subject.asks().get(i) instanceof Ask.Difference difference) {
+            double terms = halfWidth(subject.asks().indexOf(difference.first()))
+                    + halfWidth(subject.asks().indexOf(difference.second()));
+            return Math.max(own, CANCELLED * terms);
+        }
+        return own;
     }
 
     Answer.Round round(int triangles) {
@@ -89,7 +110,7 @@ final class AskConvergence {
                     value.where(),
                     error(i),
                     verdict(ask, value.value()),
-                    handCheck(ask, value.value(), convergences.get(i).error())));
+                    handCheck(ask, value.value(), halfWidth(i))));
         }
         return answers;
     }

@@ -142,7 +142,7 @@ public final class SymmetricMatrix extends AbstractMatrix {
 
         @Override
         public void set(double value) {
-            throw new UnsupportedOperationException("the values of a SymmetricMatrix do not change");
+            throw new IllegalStateException("the values of a SymmetricMatrix do not change");
         }
     }
 }

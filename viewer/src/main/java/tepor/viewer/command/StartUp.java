@@ -1,6 +1,7 @@
 package tepor.viewer.command;
 
 import java.io.IOException;
+import java.io.UncheckedIOException;
 import tepor.solver.quantity.Dimension;
 import tepor.solver.quantity.Units;
 import tepor.viewer.export.PictureFiles;
@@ -15,6 +16,9 @@ final class StartUp {
     static void inBackground() {
         Thread thread = new Thread(StartUp::load, "start-up");
         thread.setDaemon(true);
+        // Nothing is lost but time, as when the user stops meanwhile; the answer's own pictures say what is wrong with
+        // them.
+        thread.setUncaughtExceptionHandler((failed, reason) -> {});
         thread.start();
     }
 
@@ -23,8 +27,7 @@ final class StartUp {
         try {
             PictureFiles.warmUp();
         } catch (IOException e) {
-            // Nothing is lost but time; the picture itself will say what is wrong.
-            return;
+            throw new UncheckedIOException(e);
         }
     }
 }
