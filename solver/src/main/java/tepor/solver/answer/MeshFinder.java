@@ -20,6 +20,9 @@ final class MeshFinder {
     /** Growth of the number of triangles from round to round: where nothing is known, far from and near the tolerance. */
     private static final double GROWTH_FIRST = 2;
 
+    /** A first mesh of more triangles than this has them because the outline is rich in detail, not by choice. */
+    private static final int RICH = 3000;
+
     private static final double GROWTH_FAR = 4;
     private static final double GROWTH_MIDDLE = 2.2;
     private static final double GROWTH_NEAR = 1.6;
@@ -54,7 +57,7 @@ final class MeshFinder {
      */
     MeshResult next(Mesh last, List<Solution> solutions, double widest) {
         double room = 0.9 * subject.mesh().trianglesAtMost() / last.triangleCount();
-        double growth = Math.min(growth(widest), room);
+        double growth = Math.min(growth(widest, last.triangleCount()), room);
         if (growth < 1.3) {
             return null;
         }
@@ -76,9 +79,9 @@ final class MeshFinder {
         return mesh(new MeshSizes(last, sizes, GRADATION));
     }
 
-    private static double growth(double widest) {
+    private static double growth(double widest, int triangles) {
         if (Double.isNaN(widest)) {
-            return GROWTH_FIRST;
+            return triangles > RICH ? GROWTH_NEAR : GROWTH_FIRST;
         }
         return widest > 10 ? GROWTH_FAR : widest > 0.5 ? GROWTH_MIDDLE : GROWTH_NEAR;
     }
