@@ -61,7 +61,6 @@ public final class CommandRun {
         if (!(last.getCommand() instanceof Callable<?> command)) {
             throw new ParameterException(last, "say what to do: answer or inspect");
         }
-        StartUp.inBackground();
         try {
             return command.call() instanceof Status status ? status.code() : Status.UNFINISHED.code();
         } catch (ParameterException e) {

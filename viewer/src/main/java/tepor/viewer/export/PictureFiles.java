@@ -1,11 +1,6 @@
 package tepor.viewer.export;
 
-import java.awt.Graphics2D;
-import java.awt.RenderingHints;
-import java.awt.geom.Ellipse2D;
-import java.awt.geom.Line2D;
 import java.io.IOException;
-import java.io.OutputStream;
 import java.io.UncheckedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -17,9 +12,7 @@ import tepor.solver.answer.Answer;
 import tepor.solver.answer.Inspection;
 import tepor.viewer.picture.IsothermPicture;
 import tepor.viewer.picture.OutlinePicture;
-import tepor.viewer.picture.Picture;
 import tepor.viewer.picture.PictureOptions;
-import tepor.viewer.picture.drawing.PictureFont;
 
 /** The pictures that go with an answer or an inspection. */
 public final class PictureFiles {
@@ -65,40 +58,6 @@ public final class PictureFiles {
             }
             throw e;
         }
-    }
-
-    /**
-     * Draws a few words to nowhere, as PNG and as SVG: what the first picture of a process loads is then loaded while
-     * something else is computed.
-     */
-    public static void warmUp() throws IOException {
-        Picture words = new Picture() {
-            @Override
-            public int width() {
-                return 60;
-            }
-
-            @Override
-            public int height() {
-                return 20;
-            }
-
-            @Override
-            public String description() {
-                return "warm-up";
-            }
-
-            @Override
-            public void paint(Graphics2D g) {
-                g.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
-                g.fill(new Ellipse2D.Double(1, 1, 8, 8));
-                g.draw(new Line2D.Double(0, 0, 9, 3));
-                g.setFont(PictureFont.size(9));
-                g.drawString("0.5 °C", 12, 12);
-            }
-        };
-        PngWriter.write(words, OutputStream.nullOutputStream());
-        SvgWriter.write(words, OutputStream.nullOutputStream());
     }
 
     /** Whether the name of a file says what kind of picture it is to be. */
