@@ -17,6 +17,7 @@ final class AskConvergence {
     private final List<Convergence> convergences = new ArrayList<>();
     private final List<Double> last = new ArrayList<>();
     private final List<Double> within = new ArrayList<>();
+    private final List<double[]> places = new ArrayList<>();
     private int rounds;
 
     AskConvergence(Case subject) {
@@ -31,6 +32,7 @@ final class AskConvergence {
     /** Takes what a further mesh says. */
     void add(AskEvaluator evaluator) {
         rounds++;
+        places.clear();
         for (int i = 0; i < convergences.size(); i++) {
             Ask ask = subject.asks().get(i);
             AskValue value = evaluator.evaluate(ask);
@@ -40,7 +42,15 @@ final class AskConvergence {
             last.set(i, value.value());
             within.set(i, tolerance);
             convergences.get(i).add(value.value(), tolerance);
+            if (value.where() != null) {
+                places.add(value.where());
+            }
         }
+    }
+
+    /** Places (x and y, metres) of the asks that look at a point, as the last mesh has them. */
+    List<double[]> places() {
+        return List.copyOf(places);
     }
 
     boolean settled() {

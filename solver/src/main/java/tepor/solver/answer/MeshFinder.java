@@ -1,11 +1,13 @@
 package tepor.solver.answer;
 
+import java.util.BitSet;
 import java.util.List;
 import java.util.function.BooleanSupplier;
 import tepor.mesher.mesh.Mesh;
 import tepor.mesher.mesh.MeshOptions;
 import tepor.mesher.mesh.MeshResult;
 import tepor.mesher.mesh.Mesher;
+import tepor.mesher.mesh.TriangleFinder;
 import tepor.mesher.refinement.SizeField;
 import tepor.solver.field.Solution;
 import tepor.solver.model.Case;
@@ -25,7 +27,10 @@ final class MeshFinder {
 
     private static final double GROWTH_FAR = 4;
     private static final double GROWTH_MIDDLE = 2.2;
-    private static final double GROWTH_NEAR = 1.6;
+    private static final double GROWTH_NEAR = 1.4;
+
+    /** Triangles about a place asked for shrink to this share of their size at least. */
+    private static final double SHARPEN = 0.4;
 
     /** Growth of the size per distance. */
     private static final double GRADATION = 0.5;
@@ -53,9 +58,10 @@ final class MeshFinder {
      *
      * @param solutions those on the last mesh; each counts the same
      * @param widest mesh error of the ask that is worst off, relative to its tolerance; NaN where none is known
+     * @param places of the asks that look at a point (x and y, metres): there the mesh is made finer in any case
      * @return null where the element limit leaves no room for a mesh worth having
      */
-    MeshResult next(Mesh last, List<Solution> solutions, double widest) {
+    MeshResult next(Mesh last, List<Solution> solutions, double widest, List<double[]> places) {
         double room = 0.9 * subject.mesh().trianglesAtMost() / last.triangleCount();
         double growth = Math.min(growth(widest, last.triangleCount()), room);
         if (growth < 1.3) {
@@ -73,10 +79,32 @@ final class MeshFinder {
             }
         }
         double[] sizes = SizePlanner.plan(last, squared, growth);
+        sharpen(last, sizes, places);
         for (int t = 0; t < sizes.length; t++) {
             sizes[t] *= LONGEST_TO_MEAN;
         }
         return mesh(new MeshSizes(last, sizes, GRADATION));
+    }
+
+    /**
+     * Shrinks the triangles about each place. A temperature in a corner moves only as the triangles there shrink: left as
+     * they are, it would stand still and look exact.
+     */
+    private static void sharpen(Mesh mesh, double[] sizes, List<double[]> places) {
+        TriangleFinder finder = new TriangleFinder(mesh);
+        BitSet nodes = new BitSet();
+        double[] barycentric = new double[3];
+        for (double[] place : places) {
+            int triangle = finder.find(place[0], place[1], barycentric);
+            for (int i = 0; i < 3 && triangle != Mesh.NONE; i++) {
+                nodes.set(mesh.node(triangle, i));
+            }
+        }
+        for (int t = 0; t < sizes.length; t++) {
+            if (nodes.get(mesh.node(t, 0)) || nodes.get(mesh.node(t, 1)) || nodes.get(mesh.node(t, 2))) {
+                sizes[t] = Math.min(sizes[t], SHARPEN * Math.sqrt(4 / Math.sqrt(3) * mesh.area(t)));
+            }
+        }
     }
 
     private static double growth(double widest, int triangles) {

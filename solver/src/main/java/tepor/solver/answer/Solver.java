@@ -99,7 +99,8 @@ public final class Solver {
                 break;
             }
             progress.stage("meshing");
-            MeshResult next = meshes.next(mesh.mesh(), solutions.all(), convergence.widestRelative());
+            MeshResult next =
+                    meshes.next(mesh.mesh(), solutions.all(), convergence.widestRelative(), convergence.places());
             if (next == null) {
                 break;
             }

@@ -61,7 +61,7 @@ public final class FacetFlows {
     /** The sharing out of nodal reactions over open facets. */
     private final class OpenFacets {
         private final HeatBalance balance;
-        private final TemperatureField field;
+        private final FieldGradient gradientOf;
         private final int nodesPerFacet;
         private final SideShape shape;
 
@@ -70,7 +70,7 @@ public final class FacetFlows {
 
         OpenFacets(HeatBalance balance, TemperatureField field, double[] residual) {
             this.balance = balance;
-            this.field = field;
+            gradientOf = new FieldGradient(field);
             nodesPerFacet = mesh.nodesPerTriangle() == 3 ? 2 : 3;
             shape = SideShape.of(mesh.nodesPerTriangle());
             boolean[] wanted = new boolean[mesh.nodeCount()];
@@ -194,7 +194,7 @@ public final class FacetFlows {
             double[] l = new double[3];
             l[(side + 1) % 3] = 1 - s;
             l[(side + 2) % 3] = s;
-            field.gradient(triangle, l[0], l[1], l[2], out);
+            gradientOf.at(triangle, l[0], l[1], l[2], out);
         }
     }
 }

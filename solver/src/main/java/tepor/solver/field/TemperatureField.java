@@ -2,7 +2,6 @@ package tepor.solver.field;
 
 import tepor.mesher.mesh.Mesh;
 import tepor.mesher.mesh.TriangleFinder;
-import tepor.solver.element.TriangleGeometry;
 import tepor.solver.element.TriangleShape;
 import tepor.solver.element.TriangleShapes;
 
@@ -62,30 +61,5 @@ public final class TemperatureField {
             sum += value[i] * (kelvin[mesh.node(triangle, i)] - level);
         }
         return level + sum;
-    }
-
-    /**
-     * Temperature gradient at barycentric coordinates of a triangle, K/m.
-     *
-     * @param out two entries, overwritten
-     */
-    public void gradient(int triangle, double l0, double l1, double l2, double[] out) {
-        TriangleShape shape = TriangleShapes.of(mesh.nodesPerTriangle());
-        int n = shape.nodeCount();
-        double[] slopes = new double[3 * n];
-        double[] gx = new double[n];
-        double[] gy = new double[n];
-        shape.slopes(l0, l1, l2, slopes);
-        TriangleGeometry geometry = new TriangleGeometry(mesh);
-        geometry.moveTo(triangle);
-        geometry.gradients(slopes, n, gx, gy);
-        double level = kelvin[mesh.node(triangle, 0)];
-        out[0] = 0;
-        out[1] = 0;
-        for (int i = 0; i < n; i++) {
-            double u = kelvin[mesh.node(triangle, i)] - level;
-            out[0] += u * gx[i];
-            out[1] += u * gy[i];
-        }
     }
 }

@@ -10,6 +10,7 @@ import tepor.solver.assembly.RegionHeat;
 import tepor.solver.assembly.Tensor;
 import tepor.solver.element.SideShape;
 import tepor.solver.element.TriangleGeometry;
+import tepor.solver.field.FieldGradient;
 import tepor.solver.field.TemperatureField;
 
 /**
@@ -56,13 +57,14 @@ public final class ErrorIndicator {
             heat[source.region()] += source.density();
         }
         TriangleGeometry geometry = new TriangleGeometry(mesh);
+        FieldGradient gradient = new FieldGradient(field);
         double[] g = new double[2];
         for (int t = 0; t < mesh.triangleCount(); t++) {
             Tensor k = balance.conduction().tensor(mesh.region(t));
             geometry.moveTo(t);
             double divergence = 0;
             for (int i = 0; i < 3; i++) {
-                field.gradient(t, i == 0 ? 1 : 0, i == 1 ? 1 : 0, i == 2 ? 1 : 0, g);
+                gradient.at(t, i == 0 ? 1 : 0, i == 1 ? 1 : 0, i == 2 ? 1 : 0, g);
                 double fx = -(k.xx() * g[0] + k.xy() * g[1]);
                 double fy = -(k.xy() * g[0] + k.yy() * g[1]);
                 flux[6 * t + 2 * i] = fx;

@@ -20,10 +20,10 @@ public final class FirstSizes implements SizeField {
     private static final double LONGEST_TO_MEAN = 1.7;
 
     /** Growth of the size with the distance from a singular point. */
-    private static final double GRADATION = 0.5;
+    private static final double GRADATION = 0.6;
 
     /** Size at a singular point, relative to its clearance. */
-    private static final double TIP = 0.1;
+    private static final double TIP = 0.04;
 
     /** Many singular points, as of a grid of bars, are met by the adaptive rounds; the first mesh stays small. */
     private static final int MANY = 300;

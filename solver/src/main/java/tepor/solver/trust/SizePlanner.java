@@ -8,7 +8,7 @@ import tepor.mesher.mesh.Mesh;
  */
 public final class SizePlanner {
     /** An ask moves by the error of the last mesh, so every part of it must be made finer, not only the worst. */
-    private static final double LEAST_SHRINK = 0.8;
+    private static final double LEAST_SHRINK = 0.85;
 
     /** A corner calls for sizes that no single round could foresee. */
     private static final double MOST_SHRINK = 0.08;
