@@ -13,9 +13,19 @@ final class StartUp {
     private StartUp() {}
 
     static void inBackground() {
-        Thread thread = new Thread(StartUp::load, "start-up");
+        inBackground(StartUp::load);
+    }
+
+    /**
+     * Runs a load whose failure is silent: where what failed is needed, it fails again with a message; and a process that ends
+     * early, say at a faulty case, takes files and classes away from under a load that is still running.
+     */
+    static Thread inBackground(Runnable load) {
+        Thread thread = new Thread(load, "start-up");
         thread.setDaemon(true);
+        thread.setUncaughtExceptionHandler((failed, reason) -> {});
         thread.start();
+        return thread;
     }
 
     private static void load() {
