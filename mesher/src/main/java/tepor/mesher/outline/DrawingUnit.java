@@ -20,19 +20,17 @@ public record DrawingUnit(String symbol, double metres) {
 
     /** A point given in metres, as text in this unit, for messages. */
     public String point(double x, double y) {
-        return "(" + number(x) + " " + number(y) + ") " + symbol;
+        // More digits than a length has: drawings lie far from their origin.
+        return "(" + number(x, 10) + " " + number(y, 10) + ") " + symbol;
     }
 
     /** A length given in metres, as text in this unit, for messages. */
     public String length(double length) {
-        return number(length) + " " + symbol;
+        return number(length, 6) + " " + symbol;
     }
 
-    private String number(double inMetres) {
-        String text = String.format(Locale.ROOT, "%.6g", inMetres / metres);
-        if (text.contains("e")) {
-            return text;
-        }
-        return text.contains(".") ? text.replaceAll("0+$", "").replaceAll("\\.$", "") : text;
+    private String number(double inMetres, int digits) {
+        String text = String.format(Locale.ROOT, "%." + digits + "g", inMetres / metres);
+        return text.replaceFirst("(\\.\\d*?)0+(?=e|$)", "$1").replaceFirst("\\.(?=e|$)", "");
     }
 }

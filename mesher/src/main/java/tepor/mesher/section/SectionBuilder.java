@@ -119,6 +119,6 @@ public final class SectionBuilder {
                 shape.place(),
                 "nothing is left of region '" + shape.name() + "': it lies wholly under "
                         + names.stream().collect(Collectors.joining(", ")),
-                "lay it after them, or leave it out");
+                "state it after whatever lies over it, or leave it out");
     }
 }

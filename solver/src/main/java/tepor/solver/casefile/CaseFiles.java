@@ -10,9 +10,11 @@ import java.nio.file.Path;
 import java.security.MessageDigest;
 import java.security.NoSuchAlgorithmException;
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.HexFormat;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import org.tomlj.Toml;
 import org.tomlj.TomlParseError;
 import org.tomlj.TomlParseResult;
@@ -157,7 +159,20 @@ final class CaseFiles {
             return Optional.empty();
         }
         TomlParseResult result = Toml.parse(text);
+        List<String> lines = text.lines().toList();
+        Set<String> notArrays = new HashSet<>();
+        Set<Integer> faultyHeaders = new HashSet<>();
         for (TomlParseError error : result.errors()) {
+            if (error.getMessage().contains("is not an array")) {
+                // Every [[region]] after one [region] is the same fault, and so is every key below it.
+                faultyHeaders.add(error.position().line());
+                if (!notArrays.add(error.getMessage())) {
+                    continue;
+                }
+            } else if (error.getMessage().contains("previously defined")
+                    && faultyHeaders.contains(headerLine(lines, error.position().line()))) {
+                continue;
+            }
             Place place =
                     new Place(file, error.position().line(), error.position().column());
             String message = error.getMessage();
@@ -166,6 +181,15 @@ final class CaseFiles {
         return result.hasErrors()
                 ? Optional.empty()
                 : Optional.of(new KeyTable(result, "the case file", "the case", new Place(file, 1, 1), findings));
+    }
+
+    /** The line, counted from 1, of the table header above a line; 0 where there is none. */
+    private static int headerLine(List<String> lines, int line) {
+        int header = Math.min(line, lines.size());
+        while (header > 0 && !lines.get(header - 1).stripLeading().startsWith("[")) {
+            header--;
+        }
+        return header;
     }
 
     private static String remedy(String message) {

@@ -122,7 +122,7 @@ final class RegionReader {
                     .error(
                             "heat-in-hole",
                             table.place("heat"),
-                            table.label() + " is of nothing, but states heat = "
+                            table.label() + " is of nothing, but states a heat: "
                                     + value.get().found(),
                             "leave the heat out, or give the region a material");
             return Optional.empty();

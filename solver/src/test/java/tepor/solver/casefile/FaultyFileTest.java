@@ -206,4 +206,15 @@ class FaultyFileTest {
                         """);
         assertThat(errors).hasSize(10);
     }
+
+    @Test
+    void singleBracketsAboveDoubleOnesAreOneFault() {
+        String text = CaseFolder.SOUND.replaceFirst("\\[\\[region]]", "[region]");
+        assertThat(text.split("\\[\\[region]]", -1)).hasSizeGreaterThan(1);
+        int second = text.indexOf("[[region]]");
+        List<Finding> errors = folder().errors(text.substring(0, second) + "«" + text.substring(second));
+        assertThat(errors).hasSize(1);
+        assertThat(errors.get(0).what()).contains("region", "previously defined at line");
+        assertThat(errors.get(0).remedy()).contains("[[region]]");
+    }
 }
