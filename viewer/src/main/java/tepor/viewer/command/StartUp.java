@@ -15,6 +15,8 @@ final class StartUp {
     static void inBackground() {
         Thread thread = new Thread(StartUp::load, "start-up");
         thread.setDaemon(true);
+        // Nothing is lost but time, and no trace belongs on the terminal: what is wrong shows again where it is needed.
+        thread.setUncaughtExceptionHandler((broken, failure) -> {});
         thread.start();
     }
 
