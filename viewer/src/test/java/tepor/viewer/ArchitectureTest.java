@@ -38,6 +38,7 @@ class ArchitectureTest {
             "tepor.solver.bracket",
             "tepor.solver.trust",
             "tepor.solver.answer",
+            "tepor.viewer.wording",
             "tepor.viewer.picture",
             "tepor.viewer.export",
             "tepor.viewer.report",

@@ -1,5 +1,6 @@
 package tepor.mesher.section;
 
+import java.util.Arrays;
 import java.util.List;
 
 /**
@@ -128,10 +129,15 @@ public final class Section {
     }
 
     /**
-     * What is left of the region once later ones lie over it, m². By the boundary integral over its segments; for a region
-     * of nothing it holds only where material lies all around, as nothing separates it from emptiness elsewhere.
+     * What is left of the region once later ones lie over it, m². By the boundary integral over its segments; so a region of
+     * nothing has an area only where material lies all around, as nothing separates it from emptiness elsewhere.
+     *
+     * @return NaN for a region of nothing that is open to the outside or to another such region
      */
     public double area(int region) {
+        if (isHole(region) && !isClosed(region)) {
+            return Double.NaN;
+        }
         // Coordinates are taken relative to one vertex, so that a section far from the origin loses no digits.
         double x0 = x(0);
         double y0 = y(0);
@@ -145,6 +151,17 @@ public final class Section {
             }
         }
         return 0.5 * twice;
+    }
+
+    /** Whether the region's segments make closed loops: as many lead to each vertex as lead away. */
+    private boolean isClosed(int region) {
+        int[] leaving = new int[vertexCount()];
+        for (int s = 0; s < segmentCount(); s++) {
+            int sign = left(s) == region ? 1 : right(s) == region ? -1 : 0;
+            leaving[start(s)] += sign;
+            leaving[end(s)] -= sign;
+        }
+        return Arrays.stream(leaving).allMatch(n -> n == 0);
     }
 
     /** Distance below which two points are one, metres. */

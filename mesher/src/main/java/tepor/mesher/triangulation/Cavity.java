@@ -174,8 +174,7 @@ public final class Cavity {
     }
 
     // Depth first in counter-clockwise order, so that the border comes out in order too. No vertex lies inside a
-    // cavity,
-    // hence its triangles form a tree, and none is met twice.
+    // cavity, hence its triangles form a tree, and none is met twice.
     private void run() {
         int[] twin = mesh.twin;
         int[] constraint = mesh.constraint;

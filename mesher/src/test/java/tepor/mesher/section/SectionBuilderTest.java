@@ -341,4 +341,19 @@ class SectionBuilderTest {
         assertThat(section.segmentCount()).isEqualTo(2 * n * (n + 1));
         assertThat(section.area(n + 1)).isCloseTo(0.01, within(1e-12));
     }
+
+    @Test
+    void aHoleHasAnAreaOnlyWhereMaterialLiesAllAround() {
+        Section inside = new Drawn()
+                .region("a", box(0, 0, 4, 4))
+                .nothing("hole", box(1, 1, 2, 3))
+                .build();
+        assertThat(inside.area(1)).isCloseTo(2, within(1e-12));
+        Section open = new Drawn()
+                .region("a", box(0, 0, 4, 4))
+                .nothing("notch", box(1, 3, 2, 5))
+                .build();
+        assertThat(open.area(0)).isCloseTo(15, within(1e-12));
+        assertThat(open.area(1)).isNaN();
+    }
 }

@@ -125,11 +125,14 @@ final class AskConvergence {
         return answers;
     }
 
-    /** A bracket narrower than the mesh error is not left by a value that is off by no more than that. */
+    /**
+     * A bracket narrower than the mesh error is not left by a value that is off by no more than that. An error that is not
+     * known excuses nothing: else the check could never fail.
+     */
     private HandCheck handCheck(Ask ask, double value, double error) {
         HandCheck check = HandChecker.check(subject, AskValues.of(subject, ask), ask, value)
                 .orElse(null);
-        if (check == null || check.inside()) {
+        if (check == null || check.inside() || !Double.isFinite(error)) {
             return check;
         }
         boolean inside = value + error >= check.low() && value - error <= check.high();

@@ -1,10 +1,10 @@
 package tepor.solver.answer;
 
 import java.util.HashMap;
-import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
+import java.util.TreeMap;
 import java.util.function.IntPredicate;
 import tepor.mesher.mesh.Mesh;
 import tepor.mesher.mesh.TriangleFinder;
@@ -213,32 +213,45 @@ final class AskEvaluator {
         return out;
     }
 
+    /**
+     * Where two different fixed temperatures meet, the heat turns about the node: the same flux, growing as the inverse of
+     * the distance, through every line from it. The flow has a limit only where what is asked for crosses those lines as
+     * often one way round as the other, as the whole border of a region does.
+     */
     private void refuseMeetings(Ask ask, Edge edge, Solution solution) {
-        Map<Integer, int[]> meetings = solution.balance().fixed().meetings();
+        Set<Integer> meetings = solution.balance().fixed().meetings().keySet();
         if (meetings.isEmpty()) {
             return;
         }
-        Set<Integer> asked = new HashSet<>();
-        for (int f : facets(edge)) {
-            asked.add(f);
-        }
-        for (Map.Entry<Integer, int[]> meeting : meetings.entrySet()) {
-            int inside = 0;
-            for (int f : meeting.getValue()) {
-                inside += asked.contains(f) ? 1 : 0;
+        Map<Integer, Integer> turns = new TreeMap<>();
+        int[] segments = edge.pieces().segments();
+        for (int i = 0; i < segments.length; i++) {
+            for (int f : solutions.index().on(segments[i])) {
+                for (int end = 0; end < 2; end++) {
+                    int node = mesh.facetNode(f, end);
+                    if (meetings.contains(node)) {
+                        turns.merge(
+                                node,
+                                end == 0
+                                        ? edge.pieces().signs()[i]
+                                        : -edge.pieces().signs()[i],
+                                Integer::sum);
+                    }
+                }
             }
-            if (inside > 0 && inside < meeting.getValue().length) {
-                int node = meeting.getKey();
+        }
+        turns.forEach((node, turn) -> {
+            if (turn != 0) {
                 throw new FaultyInputException(List.of(new Finding(
                         Finding.Severity.ERROR,
                         "endless-flow",
                         ask.head().place(),
                         "the heat flow through '" + edge.name()
-                                + "' has no limit: two different fixed temperatures meet" + " at "
+                                + "' has no limit: two different fixed temperatures meet at "
                                 + subject.unit().point(mesh.x(node), mesh.y(node)),
                         "leave a gap between the two, give one of them a film or resistance, or ask for temperatures"
                                 + " only")));
             }
-        }
+        });
     }
 }

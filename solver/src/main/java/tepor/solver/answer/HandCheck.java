@@ -7,7 +7,7 @@ import java.util.List;
  *
  * @param low lower bracket, SI, in the unit of the answer it stands beside
  * @param high upper bracket
- * @param inside whether the computed value lies within the bracket
+ * @param inside whether the computed value lies within the bracket, or leaves it by no more than its mesh error
  * @param working how it was reckoned, line by line, in words and figures that a checker can follow
  */
 public record HandCheck(double low, double high, boolean inside, List<String> working) {

@@ -7,7 +7,8 @@ package tepor.solver.answer;
  * @param high upper end; +∞ where nothing is known yet
  * @param kind guaranteed or not
  * @param within what was asked
- * @param reached whether the interval's half-width is within it
+ * @param reached whether the interval's half-width is within it, and the answer was seen to settle: moved by no more than a
+ *     quarter of it twice running
  */
 public record MeshError(double low, double high, Kind kind, double within, boolean reached) {
     /** Whether an interval is guaranteed. */

@@ -160,7 +160,9 @@ public final class Solver {
                         "the mesh error of '" + ask.name()
                                 + "' is not yet within what was asked; refinement stopped at "
                                 + history.get(history.size() - 1).triangles() + " triangles",
-                        "raise elements_at_most under [mesh], or widen `within`");
+                        history.size() == ROUNDS_AT_MOST
+                                ? "widen `within`: " + ROUNDS_AT_MOST + " rounds are the most that are made"
+                                : "raise elements_at_most under [mesh], or widen `within`");
             }
         }
     }

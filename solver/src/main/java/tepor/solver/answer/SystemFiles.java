@@ -5,6 +5,8 @@ import java.io.Writer;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
+import java.nio.file.StandardOpenOption;
+import java.util.UUID;
 import tepor.mesher.mesh.Mesh;
 import tepor.solver.assembly.FacetIndex;
 import tepor.solver.assembly.HeatBalance;
@@ -31,10 +33,11 @@ final class SystemFiles {
     }
 
     private static void whole(Path stem, String ending, Content content) throws IOException {
-        Path target = stem.resolveSibling(stem.getFileName() + ending).toAbsolutePath();
-        Path part = Files.createTempFile(target.getParent(), stem.getFileName().toString(), ".part");
+        Path target = stem.toAbsolutePath().resolveSibling(stem.getFileName() + ending);
+        // Not a temporary file of the library: nobody but its owner may read those.
+        Path part = target.resolveSibling("." + target.getFileName() + "." + UUID.randomUUID() + ".part");
         try {
-            try (Writer writer = Files.newBufferedWriter(part)) {
+            try (Writer writer = Files.newBufferedWriter(part, StandardOpenOption.CREATE_NEW)) {
                 content.write(writer);
             }
             Files.move(part, target, StandardCopyOption.REPLACE_EXISTING);

@@ -15,7 +15,8 @@ import tepor.solver.element.SideShape;
  * say how much heat enters that region there through its <em>open</em> facets, those with a fixed temperature and those
  * towards other regions (Carey 1982, Comput. Methods Appl. Mech. Engng 35, 1–14; Hughes et al. 2000, J. Comput. Phys. 163,
  * 467–488). Where several open facets meet in a node, each first gets what the temperature gradient says, and what is left
- * is shared equally; so the sum over all open facets of a region is exactly what the region takes up.
+ * is shared out by {@link NodeShares}; so the sum over all open facets of a region is exactly what the region takes up, and
+ * what leaves one region through an interface enters the other.
  */
 public final class FacetFlows {
     private final Mesh mesh;
@@ -65,6 +66,11 @@ public final class FacetFlows {
         private final int nodesPerFacet;
         private final SideShape shape;
 
+        /** For each node the open facets that meet in it, as nodesPerFacet·facet + i, from start[node] on. */
+        private final int[] start;
+
+        private final int[] meeting;
+
         /** Sum of element residuals by node and region, found by {@link #key}. */
         private final HashMap<Long, double[]> reaction = new HashMap<>();
 
@@ -73,20 +79,28 @@ public final class FacetFlows {
             gradientOf = new FieldGradient(field);
             nodesPerFacet = mesh.nodesPerTriangle() == 3 ? 2 : 3;
             shape = SideShape.of(mesh.nodesPerTriangle());
-            boolean[] wanted = new boolean[mesh.nodeCount()];
+            start = new int[mesh.nodeCount() + 1];
             for (int f = 0; f < mesh.facetCount(); f++) {
-                if (isOpen(f)) {
-                    for (int i = 0; i < nodesPerFacet; i++) {
-                        wanted[mesh.facetNode(f, i)] = true;
-                    }
+                for (int i = 0; i < nodesPerFacet && isOpen(f); i++) {
+                    start[mesh.facetNode(f, i) + 1]++;
+                }
+            }
+            for (int v = 0; v < mesh.nodeCount(); v++) {
+                start[v + 1] += start[v];
+            }
+            int[] next = start.clone();
+            meeting = new int[start[mesh.nodeCount()]];
+            for (int f = 0; f < mesh.facetCount(); f++) {
+                for (int i = 0; i < nodesPerFacet && isOpen(f); i++) {
+                    meeting[next[mesh.facetNode(f, i)]++] = nodesPerFacet * f + i;
                 }
             }
             int n = mesh.nodesPerTriangle();
             for (int t = 0; t < mesh.triangleCount(); t++) {
                 for (int i = 0; i < n; i++) {
                     int node = mesh.node(t, i);
-                    if (wanted[node]) {
-                        reaction.computeIfAbsent(key(node, mesh.region(t)), k -> new double[2])[0] +=
+                    if (start[node + 1] > start[node]) {
+                        reaction.computeIfAbsent(key(node, mesh.region(t)), k -> new double[1])[0] +=
                                 residual[n * t + i];
                     }
                 }
@@ -98,56 +112,46 @@ public final class FacetFlows {
         }
 
         private long key(int node, int region) {
-            return (long) node * 1_000_003L + region;
+            return (long) node << 32 | region;
         }
 
         void share() {
+            double[] flow = new double[nodesPerFacet * mesh.facetCount()]; // from left to right
             double[] moment = new double[nodesPerFacet];
             for (int f = 0; f < mesh.facetCount(); f++) {
                 if (isOpen(f)) {
                     predict(f, moment);
-                    for (int i = 0; i < nodesPerFacet; i++) {
-                        int node = mesh.facetNode(f, i);
-                        take(f, true, node, -moment[i]);
-                        take(f, false, node, moment[i]);
-                    }
+                    System.arraycopy(moment, 0, flow, nodesPerFacet * f, nodesPerFacet);
+                }
+            }
+            NodeShares shares = new NodeShares();
+            for (int node = 0; node < mesh.nodeCount(); node++) {
+                if (start[node + 1] > start[node]) {
+                    shareAt(node, flow, shares);
                 }
             }
             for (int f = 0; f < mesh.facetCount(); f++) {
-                if (isOpen(f)) {
-                    for (int i = 0; i < nodesPerFacet; i++) {
-                        int node = mesh.facetNode(f, i);
-                        giveRest(f, true, node);
-                        giveRest(f, false, node);
-                    }
+                for (int i = 0; i < nodesPerFacet && isOpen(f); i++) {
+                    intoLeft[f] -= mesh.facetLeftTriangle(f) == Mesh.NONE ? 0 : flow[nodesPerFacet * f + i];
+                    intoRight[f] += mesh.facetRightTriangle(f) == Mesh.NONE ? 0 : flow[nodesPerFacet * f + i];
                 }
             }
         }
 
-        /** Books what the gradient says enters on one side, and counts the facet. */
-        private void take(int f, boolean left, int node, double in) {
-            double[] entry = entry(f, left, node);
-            if (entry != null) {
-                entry[0] -= in;
-                entry[1]++;
-                into(left)[f] += in;
+        private void shareAt(int node, double[] flow, NodeShares shares) {
+            shares.clear();
+            for (int k = start[node]; k < start[node + 1]; k++) {
+                int f = meeting[k] / nodesPerFacet;
+                shares.add(region(mesh.facetLeftTriangle(f)), region(mesh.facetRightTriangle(f)), flow[meeting[k]]);
+            }
+            shares.balance(region -> reaction.get(key(node, region))[0]);
+            for (int k = start[node]; k < start[node + 1]; k++) {
+                flow[meeting[k]] = shares.flow(k - start[node]);
             }
         }
 
-        private void giveRest(int f, boolean left, int node) {
-            double[] entry = entry(f, left, node);
-            if (entry != null) {
-                into(left)[f] += entry[0] / entry[1];
-            }
-        }
-
-        private double[] into(boolean left) {
-            return left ? intoLeft : intoRight;
-        }
-
-        private double[] entry(int f, boolean left, int node) {
-            int triangle = left ? mesh.facetLeftTriangle(f) : mesh.facetRightTriangle(f);
-            return triangle == Mesh.NONE ? null : reaction.get(key(node, mesh.region(triangle)));
+        private int region(int triangle) {
+            return triangle == Mesh.NONE ? NodeShares.OUTSIDE : mesh.region(triangle);
         }
 
         /**

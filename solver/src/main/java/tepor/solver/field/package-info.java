@@ -1,5 +1,6 @@
 /**
- * The temperature field: the steady solution, its fluxes, and its values at points, along lines and inside elements.
+ * The temperature field: the steady solution, its fluxes, and its values at points, along edges and inside elements, and the heat flow through
+ * every facet.
  *
  * <p>May not know what is asked.
  */

@@ -44,8 +44,7 @@ final class SmoothedProlongation {
                 weak += strong[k] || a.column[k] == i ? 0 : a.value[k];
             }
             // Dropped couplings go to the diagonal, which keeps the row's sum. Where little is left of it, the row is
-            // kept
-            // whole: an unknown among much better conductors is the mean of them all.
+            // kept whole: an unknown among much better conductors is the mean of them all.
             boolean whole = diagonal[i] + weak <= LEAST_DIAGONAL * diagonal[i];
             double pivot = whole ? diagonal[i] : diagonal[i] + weak;
             for (int k = a.rowStart[i]; k < a.rowStart[i + 1]; k++) {

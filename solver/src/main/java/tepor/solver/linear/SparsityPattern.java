@@ -85,8 +85,7 @@ public final class SparsityPattern {
 
     private int[] fillColumns(int[] elementUnknowns, int[] touchStart, int[] touch) {
         // Rows are visited in ascending order and each writes its number into the rows it couples with: as the pattern
-        // is
-        // symmetric, this gives each row its columns in ascending order without sorting.
+        // is symmetric, this gives each row its columns in ascending order without sorting.
         int[] col = new int[rowStart[unknowns]];
         int[] next = Arrays.copyOf(rowStart, unknowns);
         int[] seenBy = new int[unknowns];

@@ -127,8 +127,7 @@ public final class ErrorIndicator {
         double dx = mesh.x(b) - mesh.x(a);
         double dy = mesh.y(b) - mesh.y(a);
         // The jump is linear along the side: its square integrates to length·(j₀² + j₀j₁ + j₁²)/3. The normals are as
-        // long as
-        // the side, which puts in the two factors of length that the indicator has.
+        // long as the side, which puts in the two factors of length that the indicator has.
         double j0 = normal(t, (side + 1) % 3, dx, dy) - normal(neighbour, (back + 2) % 3, dx, dy);
         double j1 = normal(t, (side + 2) % 3, dx, dy) - normal(neighbour, (back + 1) % 3, dx, dy);
         double k = mean(balance.conduction().tensor(mesh.region(t)))

@@ -7,11 +7,11 @@ import tepor.solver.answer.Answer;
 import tepor.solver.answer.Insulated;
 import tepor.solver.answer.Ledger;
 import tepor.solver.model.Case;
-import tepor.viewer.export.wording.AskWords;
-import tepor.viewer.export.wording.InsulatedRun;
-import tepor.viewer.export.wording.Rounding;
-import tepor.viewer.export.wording.ShownAnswer;
-import tepor.viewer.export.wording.VerdictWords;
+import tepor.viewer.wording.AskWords;
+import tepor.viewer.wording.InsulatedRun;
+import tepor.viewer.wording.Rounding;
+import tepor.viewer.wording.ShownAnswer;
+import tepor.viewer.wording.VerdictWords;
 
 /** An answer as text for a terminal. */
 final class AnswerText {

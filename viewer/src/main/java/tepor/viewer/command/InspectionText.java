@@ -10,8 +10,8 @@ import tepor.solver.model.Edge;
 import tepor.solver.model.Material;
 import tepor.solver.model.Region;
 import tepor.viewer.export.InspectionJson;
-import tepor.viewer.export.wording.ConditionWords;
-import tepor.viewer.export.wording.Rounding;
+import tepor.viewer.wording.ConditionWords;
+import tepor.viewer.wording.Rounding;
 
 /** An inspection as text for a terminal. */
 final class InspectionText {

@@ -6,7 +6,7 @@ import me.tongfei.progressbar.ProgressBar;
 import me.tongfei.progressbar.ProgressBarBuilder;
 import me.tongfei.progressbar.ProgressBarStyle;
 import tepor.solver.answer.Progress;
-import tepor.viewer.export.wording.Rounding;
+import tepor.viewer.wording.Rounding;
 
 /**
  * Progress of one case on the error stream: on a terminal a line drawn over and over, elsewhere one line for each round, and

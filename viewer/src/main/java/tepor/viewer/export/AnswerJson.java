@@ -10,9 +10,9 @@ import tepor.solver.answer.Ledger;
 import tepor.solver.answer.MeshError;
 import tepor.solver.model.Ask;
 import tepor.solver.model.Case;
-import tepor.viewer.export.wording.FlowDirection;
-import tepor.viewer.export.wording.ShownAnswer;
-import tepor.viewer.export.wording.VerdictWords;
+import tepor.viewer.wording.FlowDirection;
+import tepor.viewer.wording.ShownAnswer;
+import tepor.viewer.wording.VerdictWords;
 
 /** Writes {@code answers.json}: coordinates in metres, everything else in the unit given beside it. */
 public final class AnswerJson {

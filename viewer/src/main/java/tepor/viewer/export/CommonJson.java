@@ -9,7 +9,7 @@ import tepor.mesher.refinement.RefinementReport;
 import tepor.mesher.section.Section;
 import tepor.solver.answer.Insulated;
 import tepor.solver.model.Case;
-import tepor.viewer.export.wording.InsulatedRun;
+import tepor.viewer.wording.InsulatedRun;
 
 /** What {@code answers.json} and the JSON of an inspection have in common. */
 final class CommonJson {

@@ -9,7 +9,7 @@ import tepor.solver.model.Edge;
 import tepor.solver.model.EdgeCondition;
 import tepor.solver.model.Material;
 import tepor.solver.model.Region;
-import tepor.viewer.export.wording.ConditionWords;
+import tepor.viewer.wording.ConditionWords;
 
 /** Writes an inspection as one JSON object: areas in m², lengths in m. */
 public final class InspectionJson {

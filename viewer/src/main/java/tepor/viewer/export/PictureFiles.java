@@ -56,6 +56,9 @@ public final class PictureFiles {
             if (e.getCause() instanceof UncheckedIOException io) {
                 throw io.getCause();
             }
+            if (e.getCause() instanceof RuntimeException failure) {
+                throw failure;
+            }
             throw e;
         }
     }

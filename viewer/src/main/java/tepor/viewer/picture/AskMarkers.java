@@ -9,17 +9,17 @@ import java.awt.geom.Path2D;
 import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
 import java.util.List;
-import tepor.solver.answer.AskAnswer;
 import tepor.solver.answer.Verdict;
 import tepor.solver.model.Ask;
 import tepor.viewer.picture.drawing.EntryList;
 import tepor.viewer.picture.drawing.Ink;
 import tepor.viewer.picture.drawing.OccupancyGrid;
 import tepor.viewer.picture.drawing.TagPlacer;
+import tepor.viewer.wording.ShownAnswer;
 
 /** Asks in a picture: a marker at each place, a numbered tag on a leader line, and the list of all with their values. */
 final class AskMarkers {
-    private final List<AskAnswer> asks;
+    private final List<ShownAnswer> asks;
     private final Font font;
     private final List<Spot> spots = new ArrayList<>();
 
@@ -40,7 +40,7 @@ final class AskMarkers {
         }
     }
 
-    AskMarkers(List<AskAnswer> asks, Font font) {
+    AskMarkers(List<ShownAnswer> asks, Font font) {
         this.asks = asks;
         this.font = font;
     }
@@ -52,7 +52,7 @@ final class AskMarkers {
     /** Where asks have their places, metres. */
     List<double[]> places() {
         return asks.stream()
-                .map(AskAnswer::where)
+                .map(answer -> answer.source().where())
                 .filter(where -> where != null)
                 .toList();
     }
@@ -60,7 +60,7 @@ final class AskMarkers {
     /** Finds places for the tags. */
     void place(SectionView view, Rectangle2D frame) {
         for (int i = 0; i < asks.size(); i++) {
-            double[] where = asks.get(i).where();
+            double[] where = asks.get(i).source().where();
             if (where == null) {
                 continue;
             }
@@ -147,10 +147,11 @@ final class AskMarkers {
     EntryList list() {
         List<EntryList.Entry> entries = new ArrayList<>();
         for (int i = 0; i < asks.size(); i++) {
-            AskAnswer answer = asks.get(i);
+            ShownAnswer answer = asks.get(i);
             String number = String.valueOf(i + 1);
             String verdict = FigureText.verdict(answer);
-            boolean bad = answer.verdict() == Verdict.BROKEN || answer.verdict() == Verdict.UNDECIDED;
+            Verdict judged = answer.source().verdict();
+            boolean bad = judged == Verdict.BROKEN || judged == Verdict.UNDECIDED;
             List<String> details = new ArrayList<>();
             details.add(FigureText.value(answer));
             if (!verdict.isEmpty() && !bad) {
@@ -159,11 +160,11 @@ final class AskMarkers {
             entries.add(new EntryList.Entry(
                     (g, x, y) -> {
                         Ink.tag(g, number, x - (indent() - widestTag()) / 2 + 0.1 * font.getSize2D(), y, font, false);
-                        if (answer.where() != null) {
+                        if (answer.source().where() != null) {
                             paintMarker(g, answer.ask(), x + indent() / 2 - 0.75 * font.getSize2D(), y);
                         }
                     },
-                    answer.ask().name(),
+                    answer.name(),
                     details,
                     bad ? verdict : ""));
         }

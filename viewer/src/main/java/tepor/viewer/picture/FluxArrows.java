@@ -6,9 +6,10 @@ import java.awt.geom.Path2D;
 import java.util.ArrayList;
 import java.util.List;
 import tepor.mesher.mesh.Mesh;
+import tepor.solver.assembly.Tensor;
+import tepor.solver.field.FieldGradient;
 import tepor.solver.field.TemperatureField;
 import tepor.solver.model.Case;
-import tepor.solver.model.Conductivity;
 import tepor.solver.model.Values;
 import tepor.viewer.picture.drawing.Ink;
 
@@ -27,7 +28,8 @@ final class FluxArrows {
     FluxArrows(TemperatureField field, Case subject, SectionView view, double spacing) {
         this.spacing = spacing;
         Mesh mesh = field.mesh();
-        double[] k = conductivities(subject);
+        Tensor[] k = conductivities(subject);
+        FieldGradient gradient = new FieldGradient(field);
         double[] q = new double[2];
         for (int t = 0; t < mesh.triangleCount(); t++) {
             double[] x = new double[3];
@@ -44,7 +46,7 @@ final class FluxArrows {
                 for (int column = (int) Math.ceil(min(x) / spacing - shift); column <= last; column++) {
                     double px = (column + shift) * spacing;
                     double py = row * rowHeight;
-                    if (flux(field, t, k, mesh.region(t), x, y, px, py, q)) {
+                    if (flux(gradient, t, k[mesh.region(t)], x, y, px, py, q)) {
                         arrows.add(new Arrow(px, py, q[0], q[1]));
                     }
                 }
@@ -64,75 +66,28 @@ final class FluxArrows {
         return Math.max(v[0], Math.max(v[1], v[2]));
     }
 
-    /** kxx, kxy and kyy of each region, W/(m·K). */
-    private static double[] conductivities(Case subject) {
+    /** Of each region; null for those of nothing. */
+    private static Tensor[] conductivities(Case subject) {
         Values values = subject.inputs().nominal();
-        double[] k = new double[3 * subject.regions().size()];
-        for (int r = 0; r < subject.regions().size(); r++) {
-            if (subject.regions().get(r).isHole()) {
-                continue;
-            }
-            System.arraycopy(tensor(subject.regions().get(r).material().conductivity(), values), 0, k, 3 * r, 3);
-        }
-        return k;
-    }
-
-    /** kxx, kxy and kyy, W/(m·K): the diagonal of along and across, turned by the angle. */
-    static double[] tensor(Conductivity conductivity, Values values) {
-        if (conductivity instanceof Conductivity.Directional directional) {
-            double cos = Math.cos(values.of(directional.angle()));
-            double sin = Math.sin(values.of(directional.angle()));
-            double along = values.of(directional.along());
-            double across = values.of(directional.across());
-            return new double[] {
-                along * cos * cos + across * sin * sin,
-                (along - across) * cos * sin,
-                along * sin * sin + across * cos * cos
-            };
-        }
-        double k = values.of(((Conductivity.Uniform) conductivity).k());
-        return new double[] {k, 0, k};
+        return subject.regions().stream()
+                .map(r -> r.isHole() ? null : Tensor.of(r.material().conductivity(), values))
+                .toArray(Tensor[]::new);
     }
 
     /** Puts the flux at a point (pixels) of a triangle into q (W/m², y upwards); false if the point is not in it. */
     static boolean flux(
-            TemperatureField field,
-            int t,
-            double[] k,
-            int region,
-            double[] x,
-            double[] y,
-            double px,
-            double py,
-            double[] q) {
+            FieldGradient gradient, int t, Tensor k, double[] x, double[] y, double px, double py, double[] q) {
         double twice = (x[1] - x[0]) * (y[2] - y[0]) - (x[2] - x[0]) * (y[1] - y[0]);
         double l1 = ((px - x[0]) * (y[2] - y[0]) - (x[2] - x[0]) * (py - y[0])) / twice;
         double l2 = ((x[1] - x[0]) * (py - y[0]) - (px - x[0]) * (y[1] - y[0])) / twice;
         if (!(l1 >= 0 && l2 >= 0 && l1 + l2 < 1)) {
             return false;
         }
-        Mesh mesh = field.mesh();
-        double[] v = new double[6];
-        for (int i = 0; i < mesh.nodesPerTriangle(); i++) {
-            v[i] = field.at(mesh.node(t, i));
-        }
-        for (int i = mesh.nodesPerTriangle(); i < 6; i++) {
-            v[i] = 0.5 * (v[(i - 2) % 3] + v[(i - 1) % 3]);
-        }
-        double l0 = 1 - l1 - l2;
-        double d0 = (4 * l0 - 1) * v[0] + 4 * (l2 * v[4] + l1 * v[5]);
-        double d1 = (4 * l1 - 1) * v[1] + 4 * (l2 * v[3] + l0 * v[5]);
-        double d2 = (4 * l2 - 1) * v[2] + 4 * (l1 * v[3] + l0 * v[4]);
-        int a = mesh.node(t, 0);
-        int b = mesh.node(t, 1);
-        int c = mesh.node(t, 2);
-        double area2 = 2 * mesh.area(t);
-        double gx =
-                (d0 * (mesh.y(b) - mesh.y(c)) + d1 * (mesh.y(c) - mesh.y(a)) + d2 * (mesh.y(a) - mesh.y(b))) / area2;
-        double gy =
-                (d0 * (mesh.x(c) - mesh.x(b)) + d1 * (mesh.x(a) - mesh.x(c)) + d2 * (mesh.x(b) - mesh.x(a))) / area2;
-        q[0] = -(k[3 * region] * gx + k[3 * region + 1] * gy);
-        q[1] = -(k[3 * region + 1] * gx + k[3 * region + 2] * gy);
+        gradient.at(t, 1 - l1 - l2, l1, l2, q);
+        double gx = q[0];
+        double gy = q[1];
+        q[0] = -(k.xx() * gx + k.xy() * gy);
+        q[1] = -(k.xy() * gx + k.yy() * gy);
         return true;
     }
 

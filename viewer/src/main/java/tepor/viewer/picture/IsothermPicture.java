@@ -15,6 +15,7 @@ import tepor.viewer.picture.contour.TemperatureScale;
 import tepor.viewer.picture.drawing.EntryList;
 import tepor.viewer.picture.drawing.Ink;
 import tepor.viewer.picture.drawing.OccupancyGrid;
+import tepor.viewer.wording.ShownAnswer;
 
 /** The temperatures of an answered case: bands, labelled isotherms, the asks' places and values, legend and scale bar. */
 public final class IsothermPicture implements Picture {
@@ -46,12 +47,16 @@ public final class IsothermPicture implements Picture {
         Section section = answer.subject().section();
         TemperatureScale scale = TemperatureScale.of(TemperatureRange.of(answer.field()), BANDS_AT_MOST);
         legend = new Legend(scale, font);
-        markers = new AskMarkers(options.has(Layer.ASKS) ? answer.asks() : List.of(), font);
+        List<ShownAnswer> shown = options.has(Layer.ASKS)
+                ? answer.asks().stream()
+                        .map(ask -> ShownAnswer.of(ask, answer.subject()))
+                        .toList()
+                : List.of();
+        markers = new AskMarkers(shown, font);
         list = markers.list();
 
         // The sheet must know how many rows of keys there are, the keys how large the section becomes: a first layout
-        // with
-        // a scale bar of the usual length settles it.
+        // with a scale bar of the usual length settles it.
         double[] box = section.bounds();
         double aspect = (box[2] - box[0]) / (box[3] - box[1]);
         Sheet draft = sheet(aspect, keys(new KeyRow(font), null, 1e3, unit));

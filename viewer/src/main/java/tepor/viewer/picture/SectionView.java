@@ -31,7 +31,10 @@ final class SectionView {
     private final double left;
     private final double top;
     private final double[] bounds;
-    /** Of each region: area over half its border's length, px; the thickness of a long strip. */
+    /**
+     * Of each region: area over half its border's length, px; the thickness of a long strip. Infinite where a region of
+     * nothing has no area of its own, being open to the outside: it narrows no line.
+     */
     private final double[] thickness;
 
     /**
@@ -69,7 +72,8 @@ final class SectionView {
         }
         double[] result = new double[border.length];
         for (int r = 0; r < border.length; r++) {
-            result[r] = border[r] > 0 ? 2 * section.area(r) / border[r] * scale : 0;
+            double area = section.area(r);
+            result[r] = area > 0 ? 2 * area / border[r] * scale : Double.POSITIVE_INFINITY;
         }
         return result;
     }

@@ -4,11 +4,11 @@ import java.io.IOException;
 import java.util.List;
 import tepor.solver.answer.MeshError;
 import tepor.solver.model.Case;
-import tepor.viewer.export.wording.AskWords;
-import tepor.viewer.export.wording.Rounding;
-import tepor.viewer.export.wording.ShownAnswer;
-import tepor.viewer.export.wording.UnitWords;
-import tepor.viewer.export.wording.VerdictWords;
+import tepor.viewer.wording.AskWords;
+import tepor.viewer.wording.Rounding;
+import tepor.viewer.wording.ShownAnswer;
+import tepor.viewer.wording.UnitWords;
+import tepor.viewer.wording.VerdictWords;
 
 /** The asks, each with its value, the mesh's interval, limit and verdict. */
 final class AnswerTable {

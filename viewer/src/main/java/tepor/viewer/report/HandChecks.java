@@ -2,9 +2,9 @@ package tepor.viewer.report;
 
 import java.io.IOException;
 import java.util.List;
-import tepor.viewer.export.wording.Rounding;
-import tepor.viewer.export.wording.ShownAnswer;
-import tepor.viewer.export.wording.UnitWords;
+import tepor.viewer.wording.Rounding;
+import tepor.viewer.wording.ShownAnswer;
+import tepor.viewer.wording.UnitWords;
 
 /** The one-dimensional reckoning that a checker can follow with a pencil, beside each answer that has one. */
 final class HandChecks {

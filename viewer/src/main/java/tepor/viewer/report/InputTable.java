@@ -12,9 +12,9 @@ import tepor.solver.quantity.Dimension;
 import tepor.solver.quantity.Quantity;
 import tepor.solver.quantity.Spread;
 import tepor.solver.quantity.Units;
-import tepor.viewer.export.wording.ConditionWords;
-import tepor.viewer.export.wording.Rounding;
-import tepor.viewer.export.wording.UnitWords;
+import tepor.viewer.wording.ConditionWords;
+import tepor.viewer.wording.Rounding;
+import tepor.viewer.wording.UnitWords;
 
 /** What was put in: regions, edges, and every quantity with its spread and where it is from. */
 final class InputTable {

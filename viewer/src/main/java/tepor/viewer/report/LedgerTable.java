@@ -4,7 +4,7 @@ import java.io.IOException;
 import java.util.List;
 import tepor.solver.answer.Answer;
 import tepor.solver.answer.Ledger;
-import tepor.viewer.export.wording.Rounding;
+import tepor.viewer.wording.Rounding;
 
 /** One row for each source and each effect on an edge. */
 final class LedgerTable {

@@ -4,9 +4,9 @@ import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
 import tepor.solver.answer.Answer;
-import tepor.viewer.export.wording.Rounding;
-import tepor.viewer.export.wording.ShownAnswer;
-import tepor.viewer.export.wording.UnitWords;
+import tepor.viewer.wording.Rounding;
+import tepor.viewer.wording.ShownAnswer;
+import tepor.viewer.wording.UnitWords;
 
 /** The mesh, and how every answer moved from round to round. */
 final class MeshTable {

@@ -14,9 +14,9 @@ import tepor.solver.model.SourceFile;
 import tepor.viewer.export.InputsDigest;
 import tepor.viewer.export.PictureFile;
 import tepor.viewer.export.Version;
-import tepor.viewer.export.wording.InsulatedRun;
-import tepor.viewer.export.wording.Rounding;
-import tepor.viewer.export.wording.ShownAnswer;
+import tepor.viewer.wording.InsulatedRun;
+import tepor.viewer.wording.Rounding;
+import tepor.viewer.wording.ShownAnswer;
 
 /** Writes {@code report.html}: everything a checker needs on one page that names no other file. */
 public final class Report {

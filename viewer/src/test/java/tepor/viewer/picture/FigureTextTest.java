@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import org.junit.jupiter.api.Test;
 import tepor.solver.answer.Answer;
 import tepor.solver.answer.Verdict;
+import tepor.viewer.wording.ShownAnswer;
 
 class FigureTextTest {
     private static final Answer ANSWER = new SampleAnswers("t", PatternedGrid.ring(1, 2, 12, 2))
@@ -14,8 +15,12 @@ class FigureTextTest {
             .flow("f", -42.0213, 0.001)
             .answer(6, (x, y) -> 20.0);
 
+    private static ShownAnswer shown(int i) {
+        return ShownAnswer.of(ANSWER.asks().get(i), ANSWER.subject());
+    }
+
     private static String value(int i) {
-        return FigureText.value(ANSWER.asks().get(i));
+        return FigureText.value(shown(i));
     }
 
     @Test
@@ -28,15 +33,9 @@ class FigureTextTest {
 
     @Test
     void verdictsNameTheLimit() {
-        assertThat(FigureText.verdict(ANSWER.asks().get(0))).isEqualTo("≤ 105 °C: met");
-        assertThat(FigureText.verdict(ANSWER.asks().get(1))).isEqualTo("≤ 60 °C: broken");
-        assertThat(FigureText.verdict(ANSWER.asks().get(2))).isEmpty();
-    }
-
-    @Test
-    void unitsArePrintedAsInBooks() {
-        assertThat(FigureText.unit("0.65 W/(m2.K)")).isEqualTo("0.65 W/(m²·K)");
-        assertThat(FigureText.unit("degC")).isEqualTo("°C");
+        assertThat(FigureText.verdict(shown(0))).isEqualTo("≤ 105 °C: met");
+        assertThat(FigureText.verdict(shown(1))).isEqualTo("≤ 60 °C: broken");
+        assertThat(FigureText.verdict(shown(2))).isEmpty();
     }
 
     @Test

@@ -5,31 +5,11 @@ import static org.assertj.core.api.Assertions.within;
 
 import org.junit.jupiter.api.Test;
 import tepor.mesher.mesh.Mesh;
-import tepor.mesher.outline.Place;
+import tepor.solver.assembly.Tensor;
+import tepor.solver.field.FieldGradient;
 import tepor.solver.field.TemperatureField;
-import tepor.solver.model.Conductivity;
-import tepor.solver.model.Input;
-import tepor.solver.model.Inputs;
-import tepor.solver.quantity.Dimension;
-import tepor.solver.quantity.Quantity;
 
 class FluxArrowsTest {
-    private final Inputs inputs = new Inputs();
-
-    private Input input(String path, double value, Dimension dimension) {
-        return inputs.add(path, new Quantity(value, dimension, "", null, ""), new Place("case.toml", 1, 1));
-    }
-
-    @Test
-    void conductivityByDirectionIsTurnedByItsAngle() {
-        Conductivity wood = new Conductivity.Directional(
-                input("along", 0.9, Dimension.CONDUCTIVITY),
-                input("across", 0.25, Dimension.CONDUCTIVITY),
-                input("angle", Math.PI / 2, Dimension.ANGLE));
-        assertThat(FluxArrows.tensor(wood, inputs.nominal()))
-                .containsExactly(new double[] {0.25, 0, 0.9}, within(1e-15));
-    }
-
     @Test
     void fluxIsMinusConductivityTimesGradient() {
         // T = 3x² − 2xy + y: ∇T = (6x − 2y, −2x + 1), at (0.3, 0.2) (1.4, 0.4); q = −k ∇T with kxx 2, kxy 0.5, kyy 1.
@@ -44,7 +24,7 @@ class FluxArrowsTest {
                 x[i] = mesh.x(mesh.node(t, i));
                 y[i] = mesh.y(mesh.node(t, i));
             }
-            found += FluxArrows.flux(field, t, new double[] {2, 0.5, 1}, 0, x, y, 0.3, 0.2, q) ? 1 : 0;
+            found += FluxArrows.flux(new FieldGradient(field), t, new Tensor(2, 0.5, 1), x, y, 0.3, 0.2, q) ? 1 : 0;
         }
         assertThat(found).isEqualTo(1);
         assertThat(q).containsExactly(new double[] {-(2 * 1.4 + 0.5 * 0.4), -(0.5 * 1.4 + 0.4)}, within(1e-11));

@@ -2,10 +2,19 @@ package tepor.viewer.picture;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.awt.image.BufferedImage;
+import java.io.ByteArrayOutputStream;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import javax.imageio.ImageIO;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import tepor.solver.answer.Inspection;
+import tepor.solver.answer.Progress;
+import tepor.solver.answer.Solver;
+import tepor.solver.casefile.CaseReader;
+import tepor.viewer.export.InspectionJson;
 import tepor.viewer.export.PngWriter;
 import tepor.viewer.export.SvgWriter;
 
@@ -43,5 +52,36 @@ class OutlinePictureTest {
                 .contains(">resin</text", ">bar</text", ">coat</text", ">foot</text", ">skin</text", ">duct wall</text")
                 .contains(">nothing: cut out</text", ">material 0, 0.1 W/(m·K)</text")
                 .contains(">nothing stated, taken as insulated: 160 mm</text");
+    }
+
+    @Test
+    void aHoleOpenToTheOutsideIsDrawn(@TempDir Path folder) throws Exception {
+        Path file = Files.writeString(folder.resolve("notch.toml"), """
+                format = 1
+                [outline]
+                unit = "mm"
+                [[region]]
+                name = "plate"
+                outline = "POLYGON ((0 0, 200 0, 200 100, 0 100, 0 0))"
+                material = "steel"
+                [[region]]
+                name = "notch"
+                outline = "POLYGON ((80 60, 120 60, 120 140, 80 140, 80 60))"
+                material = "nothing"
+                [material.steel]
+                k = "15 W/(m.K)"
+                [[edge]]
+                name = "hot"
+                where = "left"
+                temperature = "60 degC"
+                """);
+        Inspection inspection = Solver.inspect(CaseReader.read(file), Progress.NONE);
+        Path png = folder.resolve("notch.png");
+        PngWriter.write(new OutlinePicture(inspection, PictureOptions.standard()), png);
+        BufferedImage image = ImageIO.read(png.toFile());
+        assertThat(image.getWidth()).isEqualTo(1600);
+        ByteArrayOutputStream json = new ByteArrayOutputStream();
+        InspectionJson.write(inspection, json);
+        assertThat(json.toString(StandardCharsets.UTF_8)).contains("\"area\" : null");
     }
 }

@@ -82,8 +82,7 @@ class IsothermsTest {
     @Test
     void openLinesEndOnTheBoundaryAndAreasFollowIt() {
         // T = 100 xy on the unit square: isotherms are hyperbolas xy = c from side to side, which a quadratic field
-        // holds
-        // exactly; the area at or above c is 1 − c + c ln c.
+        // holds exactly; the area at or above c is 1 − c + c ln c.
         Mesh mesh = PatternedGrid.rectangle(1, 1, 24, 24, (i, j) -> 0, "square").mesh(6);
         Isotherms isotherms = isotherms(PatternedGrid.field(mesh, (x, y) -> 100 * x * y));
         assertThat(isotherms.lines()).hasSize(isotherms.scale().count()).noneMatch(Isotherm::closed);

@@ -1,4 +1,4 @@
-package tepor.viewer.export.wording;
+package tepor.viewer.wording;
 
 import java.util.List;
 import tepor.solver.answer.MeshError;
@@ -27,7 +27,8 @@ public final class VerdictWords {
         String distance = distance(answer, limit);
         return switch (limit.verdict()) {
             case MET -> "met, by " + distance + "; " + exact();
-            case BROKEN -> "broken, by " + distance + "; " + exact();
+            case BROKEN ->
+                "broken, by " + distance + (isWithinMesh(answer) ? ", less than the mesh error" : "") + "; " + exact();
             case UNDECIDED -> "undecided: " + undecided(answer, limit, distance);
         };
     }
@@ -37,13 +38,20 @@ public final class VerdictWords {
         if (error == null || !Double.isFinite(error.halfWidth())) {
             return "how far off the mesh may be is not known";
         }
-        MeshError inSi = answer.source().meshError();
-        double margin = answer.ask().head().limit().margin(answer.source().value());
-        if (Math.abs(margin) <= Math.max(Math.abs(inSi.low()), Math.abs(inSi.high()))) {
+        if (isWithinMesh(answer)) {
             return "the limit lies within the mesh interval";
         }
         return (limit.margin() >= 0 ? "kept" : "broken") + " by " + distance + " at the stated values, but "
                 + notCounted();
+    }
+
+    /** Whether a known mesh error could turn the verdict. */
+    private static boolean isWithinMesh(ShownAnswer answer) {
+        MeshError error = answer.source().meshError();
+        double margin = answer.ask().head().limit().margin(answer.source().value());
+        return error != null
+                && Double.isFinite(error.high() - error.low())
+                && Math.abs(margin) <= Math.max(Math.abs(error.low()), Math.abs(error.high()));
     }
 
     private static String distance(ShownAnswer answer, ShownAnswer.ShownLimit limit) {

@@ -1,4 +1,4 @@
-package tepor.viewer.export.wording;
+package tepor.viewer.wording;
 
 import tepor.solver.answer.Answer;
 import tepor.solver.answer.AskAnswer;

@@ -1,4 +1,4 @@
-package tepor.viewer.export.wording;
+package tepor.viewer.wording;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
@@ -23,6 +23,8 @@ class WordsTest {
     void aVerdictIsSaidWithWhatItRestsOn() {
         assertThat(verdict(new BusbarSample())).isEqualTo("met, by 8.630 K; 6 inputs taken as exact");
         assertThat(verdict(new BusbarSample().verdict(Verdict.BROKEN))).startsWith("broken, by ");
+        assertThat(verdict(new BusbarSample().verdict(Verdict.BROKEN).error(9)))
+                .endsWith(", less than the mesh error; 6 inputs taken as exact");
         assertThat(verdict(new BusbarSample().verdict(Verdict.UNDECIDED)))
                 .isEqualTo("undecided: kept by 8.630 K at the stated values, but the spreads of 2 of 6 inputs are not "
                         + "counted yet");

@@ -1,4 +1,4 @@
-package tepor.viewer.export.wording;
+package tepor.viewer.wording;
 
 /** Units and signs as they are printed, rather than as they are typed. */
 public final class UnitWords {

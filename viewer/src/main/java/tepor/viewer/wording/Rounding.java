@@ -1,4 +1,4 @@
-package tepor.viewer.export.wording;
+package tepor.viewer.wording;
 
 import java.math.BigDecimal;
 import java.math.MathContext;
@@ -38,7 +38,7 @@ public final class Rounding {
     }
 
     /** Decimals that a value of this error is shown with. */
-    static int decimals(double value, double error) {
+    public static int decimals(double value, double error) {
         int most = MOST_DIGITS - 1 - magnitude(value);
         if (!Double.isFinite(error) || error == 0) {
             return Math.max(0, Math.min(most, DIGITS_WITHOUT_ERROR - 1 - magnitude(value)));

@@ -1,4 +1,4 @@
-package tepor.viewer.export.wording;
+package tepor.viewer.wording;
 
 import java.util.Comparator;
 import java.util.Map;

@@ -1,5 +1,6 @@
-package tepor.viewer.export.wording;
+package tepor.viewer.wording;
 
+import java.util.function.UnaryOperator;
 import java.util.stream.Collectors;
 import tepor.solver.model.Air;
 import tepor.solver.model.Conductivity;
@@ -13,17 +14,28 @@ public final class ConditionWords {
 
     /** Such as "film 8 W/(m2.K) to room (35 degC)". */
     public static String of(EdgeCondition condition) {
+        return of(condition, UnaryOperator.identity());
+    }
+
+    /**
+     * The same with quantities in another spelling.
+     *
+     * @param spelling of a quantity as the user wrote it
+     */
+    public static String of(EdgeCondition condition, UnaryOperator<String> spelling) {
         if (condition instanceof EdgeCondition.FixedTemperature fixed) {
-            return "temperature " + text(fixed.temperature());
+            return "temperature " + spelling.apply(text(fixed.temperature()));
         }
         if (condition instanceof EdgeCondition.Film film) {
-            return "film " + text(film.coefficient()) + to(film.air(), film.airTemperature());
+            return "film " + spelling.apply(text(film.coefficient()))
+                    + to(film.air(), spelling.apply(text(film.airTemperature())));
         }
         if (condition instanceof EdgeCondition.SurfaceResistance surface) {
-            return "resistance " + text(surface.resistance()) + to(surface.air(), surface.airTemperature());
+            return "resistance " + spelling.apply(text(surface.resistance()))
+                    + to(surface.air(), spelling.apply(text(surface.airTemperature())));
         }
         if (condition instanceof EdgeCondition.Inflow inflow) {
-            return "inflow " + text(inflow.amount());
+            return "inflow " + spelling.apply(text(inflow.amount()));
         }
         return condition.word();
     }
@@ -35,7 +47,7 @@ public final class ConditionWords {
         }
         return edge.conditions().isEmpty()
                 ? "a name only"
-                : edge.conditions().stream().map(ConditionWords::of).collect(Collectors.joining(", and "));
+                : edge.conditions().stream().map(c -> of(c)).collect(Collectors.joining(", and "));
     }
 
     /** Such as "0.65 W/(m.K)". */
@@ -50,8 +62,8 @@ public final class ConditionWords {
         return "";
     }
 
-    private static String to(Air air, Input temperature) {
-        return air == null ? " to " + text(temperature) : " to " + air.name() + " (" + text(temperature) + ")";
+    private static String to(Air air, String temperature) {
+        return air == null ? " to " + temperature : " to " + air.name() + " (" + temperature + ")";
     }
 
     private static String text(Input input) {

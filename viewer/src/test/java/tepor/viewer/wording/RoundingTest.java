@@ -1,4 +1,4 @@
-package tepor.viewer.export.wording;
+package tepor.viewer.wording;
 
 import static org.assertj.core.api.Assertions.assertThat;
 

@@ -1,6 +1,0 @@
-/**
- * Answers in the units in which they are read, and in words: what JSON, report and terminal say alike.
- *
- * <p>May not know files, nor how a text is laid out.
- */
-package tepor.viewer.export.wording;
