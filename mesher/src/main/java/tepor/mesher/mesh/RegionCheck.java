@@ -59,8 +59,7 @@ final class RegionCheck {
     }
 
     // The first segment met by a ray to the right tells the region. The ray starts at a point of no symmetry, so that
-    // it
-    // does not run into a vertex.
+    // it does not run into a vertex.
     private static int regionSeen(Mesh mesh, Section section, int t) {
         double x = 0;
         double y = 0;
