@@ -128,20 +128,30 @@ public final class Section {
     }
 
     /**
-     * What is left of the region once later ones lie over it, m². By the boundary integral over its segments; for a region
-     * of nothing it holds only where material lies all around, as nothing separates it from emptiness elsewhere.
+     * What is left of the region once later ones lie over it, m². By the boundary integral over its segments; NaN for a
+     * region of nothing that material does not lie all around, as nothing separates it from emptiness elsewhere.
      */
     public double area(int region) {
         // Coordinates are taken relative to one vertex, so that a section far from the origin loses no digits.
         double x0 = x(0);
         double y0 = y(0);
         double twice = 0;
+        int[] loose = new int[vertexCount()];
         for (int s = 0; s < segmentCount(); s++) {
             double cross = (x(start(s)) - x0) * (y(end(s)) - y0) - (x(end(s)) - x0) * (y(start(s)) - y0);
             if (left(s) == region) {
                 twice += cross;
+                loose[start(s)]++;
+                loose[end(s)]--;
             } else if (right(s) == region) {
                 twice -= cross;
+                loose[start(s)]--;
+                loose[end(s)]++;
+            }
+        }
+        for (int ends : loose) {
+            if (ends != 0) {
+                return Double.NaN;
             }
         }
         return 0.5 * twice;

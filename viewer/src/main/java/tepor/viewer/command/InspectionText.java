@@ -42,7 +42,7 @@ final class InspectionText {
         for (Region region : subject.regions()) {
             table.row(
                     region.name(),
-                    Rounding.significant(subject.section().area(region.index()), DIGITS),
+                    area(subject.section().area(region.index())),
                     region.isHole() ? "nothing" : region.material().name(),
                     region.heat() == null
                             ? ""
@@ -50,6 +50,11 @@ final class InspectionText {
         }
         table.row("all material", Rounding.significant(InspectionJson.area(subject.section()), DIGITS), "", "");
         table.lines().forEach(out::println);
+    }
+
+    /** Nothing for a region of nothing that is open to the outside: it has no area of its own in the section. */
+    private static String area(double area) {
+        return area > 0 ? Rounding.significant(area, DIGITS) : "";
     }
 
     private void materials() {

@@ -75,7 +75,10 @@ public final class InspectionJson {
     private void region(Region region) throws IOException {
         json.text("name", region.name());
         json.text("material", region.isHole() ? "nothing" : region.material().name());
-        json.number("area", subject.section().area(region.index()));
+        double area = subject.section().area(region.index());
+        if (area > 0) { // a region of nothing that is open to the outside has none
+            json.number("area", area);
+        }
         if (region.heat() != null) {
             json.text("heat", region.heat().amount().quantity().text());
         }

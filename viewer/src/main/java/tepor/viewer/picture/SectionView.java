@@ -31,7 +31,7 @@ final class SectionView {
     private final double left;
     private final double top;
     private final double[] bounds;
-    /** Of each region: area over half its border's length, px; the thickness of a long strip. */
+    /** Of each region: area over half its border's length, px; the thickness of a long strip; NaN without area. */
     private final double[] thickness;
 
     /**
@@ -143,7 +143,7 @@ final class SectionView {
             double width = OUTLINE * unit;
             for (int s : chain.segments()) {
                 int beside = isSolid(section.left(s)) ? section.right(s) : section.left(s);
-                if (beside != Section.NONE) {
+                if (beside != Section.NONE && thickness[beside] > 0) {
                     width = Math.min(width, SHARE_OF_LAYER * thickness[beside]);
                 }
             }

@@ -26,6 +26,11 @@ final class InputTable {
         this.html = html;
     }
 
+    /** Nothing for a region of nothing that is open to the outside: it has no area of its own in the section. */
+    private static String area(double area) {
+        return area > 0 ? Rounding.significant(area, 5) : "";
+    }
+
     void write() throws IOException {
         table("Regions", List.of("Region", "Material", "Heat", "#Area, m²"), () -> {
             for (Region region : subject.regions()) {
@@ -35,7 +40,7 @@ final class InputTable {
                         region.heat() == null
                                 ? ""
                                 : region.heat().amount().quantity().text(),
-                        Rounding.significant(subject.section().area(region.index()), 5));
+                        area(subject.section().area(region.index())));
             }
         });
         table("Edges", List.of("Edge", "What holds on it", "", "#Length, m"), () -> {
