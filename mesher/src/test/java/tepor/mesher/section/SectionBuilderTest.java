@@ -134,6 +134,7 @@ class SectionBuilderTest {
                 .nothing("notch", box(1, 3, 2, 4))
                 .build();
         assertThat(length(section, section::isOuter)).isCloseTo(18, within(1e-12));
+        assertThat(section.area(1)).as("open to the outside").isNaN();
     }
 
     @Test
