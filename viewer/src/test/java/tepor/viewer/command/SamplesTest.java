@@ -81,10 +81,10 @@ class SamplesTest {
     @Test
     void cableTrench() throws IOException {
         JsonNode json = answer("03-cable-trench");
-        holds(json, "large conductor", 76.19496);
-        holds(json, "medium conductor", 72.77084);
-        holds(json, "small conductor", 63.83383);
-        holds(json, "large above medium", 3.424119);
+        holds(json, "large conductor", 76.19425);
+        holds(json, "medium conductor", 72.77057);
+        holds(json, "small conductor", 63.83374);
+        holds(json, "large above medium", 3.423681);
         assertThat(json.at("/answers/4/value").asDouble()
                         + json.at("/answers/5/value").asDouble())
                 .isCloseTo(34 + 24 + 15, within(1e-6));

@@ -14,7 +14,7 @@ import tepor.solver.field.TemperatureField;
  */
 public final class IsothermTracer {
     /** Triangles into which six-node triangles may be divided altogether; more is finer than a picture shows. */
-    private static final int SMALL_TRIANGLES = 400_000;
+    private static final int SMALL_TRIANGLES = 160_000;
 
     private static final int NONE = -1;
 
