@@ -1,6 +1,8 @@
 package tepor.viewer.report;
 
 import java.io.IOException;
+import java.math.BigDecimal;
+import java.math.RoundingMode;
 import java.util.List;
 import tepor.solver.answer.MeshError;
 import tepor.solver.model.Case;
@@ -62,7 +64,7 @@ final class AnswerTable {
             double[] where = one.source().where();
             if (where != null) {
                 html.text(" ");
-                html.element("span", "place", "at " + subject.unit().point(where[0], where[1]));
+                html.element("span", "place", "at " + subject.unit().point(rounded(where[0]), rounded(where[1])));
             }
         });
         html.element("td", List.of("class", "figure"), () -> {
@@ -93,5 +95,15 @@ final class AnswerTable {
             html.element("span", "verdict", words.substring(0, end));
             html.text(words.substring(end));
         });
+    }
+
+    /** To a ten-thousandth of the section or finer: closer than that nobody can point. */
+    private double rounded(double metres) {
+        double step =
+                Math.pow(10, Math.floor(Math.log10(1e-4 * subject.section().extent())));
+        return BigDecimal.valueOf(metres)
+                .divide(BigDecimal.valueOf(step), 0, RoundingMode.HALF_EVEN)
+                .multiply(BigDecimal.valueOf(step))
+                .doubleValue();
     }
 }
