@@ -30,7 +30,7 @@ final class AskConvergence {
     }
 
     /** Takes what a further mesh says. */
-    void add(AskEvaluator evaluator) {
+    void add(AskEvaluator evaluator, int triangles) {
         rounds++;
         places.clear();
         for (int i = 0; i < convergences.size(); i++) {
@@ -41,7 +41,7 @@ final class AskConvergence {
                     : ((Within.Absolute) ask.head().within()).value();
             last.set(i, value.value());
             within.set(i, tolerance);
-            convergences.get(i).add(value.value(), tolerance);
+            convergences.get(i).add(value.value(), tolerance, triangles);
             if (value.where() != null) {
                 places.add(value.where());
             }

@@ -27,7 +27,7 @@ final class MeshFinder {
 
     private static final double GROWTH_FAR = 4;
     private static final double GROWTH_MIDDLE = 2.2;
-    private static final double GROWTH_NEAR = 1.4;
+    private static final double GROWTH_NEAR = 1.5;
 
     /** Triangles about a place asked for shrink to this share of their size at least. */
     private static final double SHARPEN = 0.4;

@@ -33,6 +33,7 @@ public final class Solver {
         meshes = new MeshFinder(subject, progress::stopped);
         convergence = new AskConvergence(subject);
         warnings = new ArrayList<>(subject.warnings());
+        warnings.addAll(CrossingCheck.check(subject));
     }
 
     /**
@@ -85,7 +86,7 @@ public final class Solver {
             evaluator = new AskEvaluator(solutions);
             progress.stage("solving");
             Solution nominal = solutions.nominal();
-            convergence.add(evaluator);
+            convergence.add(evaluator, mesh.mesh().triangleCount());
             secondsAssembly += solutions.secondsAssembly();
             secondsLinear += solutions.secondsLinear();
             history.add(convergence.round(mesh.mesh().triangleCount()));

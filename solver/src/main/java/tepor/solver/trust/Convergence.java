@@ -10,6 +10,9 @@ import java.util.List;
  * <p>A figure is settled once it moved by no more than a quarter of its tolerance twice running. Three times its last
  * movement is its error, or three times half the movement before where that is more: a single small movement may be chance,
  * as at corners, where the last one alone was measured to fall short.
+ *
+ * <p>Movements are taken as for a doubling of the triangles. With a growth g below that a figure moves little whatever its
+ * error: for an error that falls as 1/N it moves by (g − 1) times what is left, so the movement is divided by g − 1.
  */
 public final class Convergence {
     private static final double SETTLED = 0.25;
@@ -18,6 +21,10 @@ public final class Convergence {
     /** The equations are not solved more closely than this, relative to the figure. */
     private static final double ROUND_OFF = 1e-9;
 
+    /** A growth below this says nothing any more. */
+    private static final double LEAST_GROWTH = 1.05;
+
+    private final List<Integer> triangles = new ArrayList<>();
     private final List<Double> values = new ArrayList<>();
     private double within = Double.NaN;
 
@@ -26,9 +33,11 @@ public final class Convergence {
      *
      * @param value the figure
      * @param tolerance how close the mesh must bring it, in its unit
+     * @param triangleCount of the round's mesh
      */
-    public void add(double value, double tolerance) {
+    public void add(double value, double tolerance, int triangleCount) {
         values.add(value);
+        triangles.add(triangleCount);
         within = tolerance;
     }
 
@@ -46,9 +55,10 @@ public final class Convergence {
         return values.size() >= 3 && movement(0) <= SETTLED * within && movement(1) <= SETTLED * within;
     }
 
-    /** Movement in the last round (back = 0) or the one before (back = 1). */
+    /** Movement in the last round (back = 0) or the one before (back = 1), as for a doubling of the triangles. */
     private double movement(int back) {
         int last = values.size() - 1 - back;
-        return Math.abs(values.get(last) - values.get(last - 1));
+        double growth = Math.max(LEAST_GROWTH, (double) triangles.get(last) / triangles.get(last - 1));
+        return Math.abs(values.get(last) - values.get(last - 1)) / Math.min(1, growth - 1);
     }
 }

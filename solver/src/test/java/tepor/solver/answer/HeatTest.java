@@ -217,4 +217,25 @@ class HeatTest {
         assertThat(answer.asks().get(0).meshError().reached()).isFalse();
         assertThat(answer.warnings()).extracting(w -> w.code()).contains("tolerance-missed");
     }
+
+    @ParameterizedTest
+    @CsvSource({"20, 0.1, true", "2, 0.1, false"})
+    void aCheckerboardOfConductorsIsWarnedOf(String good, String poor, boolean warned) {
+        StringBuilder toml = new StringBuilder("format = 1\ntitle = \"checkerboard\"\n[outline]\nunit = \"m\"\n");
+        for (int i = 0; i < 4; i++) {
+            int x = i % 2;
+            int y = i / 2;
+            toml.append(String.format(
+                    "[[region]]\nname = \"r%d\"\nmaterial = \"%s\"\noutline = \"POLYGON ((%d %d, %d %d, %d %d, %d %d,"
+                            + " %d %d))\"\n",
+                    i, x == y ? "good" : "poor", x, y, x + 1, y, x + 1, y + 1, x, y + 1, x, y));
+        }
+        toml.append("[material.good]\nk = \"" + good + " W/(m.K)\"\n[material.poor]\nk = \"" + poor + " W/(m.K)\"\n"
+                + "[[edge]]\nname = \"warm\"\nwhere = \"left\"\ntemperature = \"1 degC\"\n"
+                + "[[edge]]\nname = \"cold\"\nwhere = \"right\"\ntemperature = \"0 degC\"\n");
+        assertThat(Solver.inspect(CaseText.read(toml.toString()), Progress.NONE).warnings())
+                .filteredOn(w -> w.code().equals("checkerboard"))
+                .hasSize(warned ? 1 : 0)
+                .allMatch(w -> w.what().contains("(1 1) m"));
+    }
 }
