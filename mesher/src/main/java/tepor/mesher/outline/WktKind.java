@@ -118,32 +118,11 @@ enum WktKind {
                     "leave the coordinate system out: lengths only");
         }
         String remedy = Arrays.stream(values())
-                .filter(k -> k != OTHER && isNear(upper, k.name()))
+                .filter(k -> k != OTHER && EditDistance.between(upper, k.name()) <= 2)
                 .findFirst()
                 .map(k -> "write " + k.name())
                 .orElse(
                         "use POLYGON, MULTIPOLYGON, LINESTRING, MULTILINESTRING or POINT; a name takes a colon behind it");
         return new Refusal("unknown-kind", shown + " is no kind of geometry", remedy);
-    }
-
-    /** Whether at most two letters are wrong, missing or too many (Levenshtein distance). */
-    private static boolean isNear(String a, String b) {
-        if (Math.abs(a.length() - b.length()) > 2) {
-            return false;
-        }
-        int[] row = new int[b.length() + 1];
-        for (int j = 0; j <= b.length(); j++) {
-            row[j] = j;
-        }
-        for (int i = 1; i <= a.length(); i++) {
-            int diagonal = row[0];
-            row[0] = i;
-            for (int j = 1; j <= b.length(); j++) {
-                int changed = diagonal + (a.charAt(i - 1) == b.charAt(j - 1) ? 0 : 1);
-                diagonal = row[j];
-                row[j] = Math.min(changed, 1 + Math.min(row[j], row[j - 1]));
-            }
-        }
-        return row[b.length()] <= 2;
     }
 }

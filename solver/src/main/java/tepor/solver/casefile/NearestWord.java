@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.stream.Collectors;
+import tepor.mesher.outline.EditDistance;
 
 /** Finds the known word that a mistyped one may have meant. */
 final class NearestWord {
@@ -35,24 +36,7 @@ final class NearestWord {
         return words.size() > 12 ? text + " and " + (words.size() - 12) + " more" : text;
     }
 
-    /** Optimal string alignment: insertions, deletions, changes and swaps of neighbours each count 1. */
     private static int distance(String first, String second) {
-        String a = first.toLowerCase(Locale.ROOT);
-        String b = second.toLowerCase(Locale.ROOT);
-        int[][] d = new int[a.length() + 1][b.length() + 1];
-        for (int i = 0; i <= a.length(); i++) {
-            for (int j = 0; j <= b.length(); j++) {
-                if (i == 0 || j == 0) {
-                    d[i][j] = i + j;
-                    continue;
-                }
-                int change = a.charAt(i - 1) == b.charAt(j - 1) ? 0 : 1;
-                d[i][j] = Math.min(Math.min(d[i - 1][j], d[i][j - 1]) + 1, d[i - 1][j - 1] + change);
-                if (i > 1 && j > 1 && a.charAt(i - 1) == b.charAt(j - 2) && a.charAt(i - 2) == b.charAt(j - 1)) {
-                    d[i][j] = Math.min(d[i][j], d[i - 2][j - 2] + 1);
-                }
-            }
-        }
-        return d[a.length()][b.length()];
+        return EditDistance.between(first.toLowerCase(Locale.ROOT), second.toLowerCase(Locale.ROOT));
     }
 }

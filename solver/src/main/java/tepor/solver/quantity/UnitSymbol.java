@@ -9,6 +9,7 @@ import java.util.concurrent.ConcurrentHashMap;
 import java.util.stream.Stream;
 import javax.measure.Unit;
 import tech.units.indriya.AbstractUnit;
+import tepor.mesher.outline.EditDistance;
 
 /**
  * The unit symbols that are known, with SI prefixes where they take them.
@@ -147,7 +148,7 @@ record UnitSymbol(String name, Unit<?> unit, double zero, boolean angle) {
         String nearest = null;
         int least = spelling.length() > 3 ? 3 : 2;
         for (String name : shortestFirst()) {
-            int distance = name.equalsIgnoreCase(spelling) ? 0 : distance(name, spelling);
+            int distance = name.equalsIgnoreCase(spelling) ? 0 : EditDistance.between(name, spelling);
             if (distance < least && distance < spelling.length()) {
                 nearest = name;
                 least = distance;
@@ -163,23 +164,5 @@ record UnitSymbol(String name, Unit<?> unit, double zero, boolean angle) {
                 .distinct()
                 .sorted(Comparator.comparingInt(String::length).thenComparing(Comparator.naturalOrder()))
                 .toList();
-    }
-
-    /** Number of letters to insert, delete or replace (Levenshtein 1966). */
-    private static int distance(String a, String b) {
-        int[] row = new int[b.length() + 1];
-        for (int j = 0; j <= b.length(); j++) {
-            row[j] = j;
-        }
-        for (int i = 1; i <= a.length(); i++) {
-            int diagonal = row[0];
-            row[0] = i;
-            for (int j = 1; j <= b.length(); j++) {
-                int replaced = diagonal + (a.charAt(i - 1) == b.charAt(j - 1) ? 0 : 1);
-                diagonal = row[j];
-                row[j] = Math.min(replaced, 1 + Math.min(row[j], row[j - 1]));
-            }
-        }
-        return row[b.length()];
     }
 }
