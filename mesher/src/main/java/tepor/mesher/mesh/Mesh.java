@@ -1,5 +1,7 @@
 package tepor.mesher.mesh;
 
+import java.util.BitSet;
+
 /**
  * A conforming triangle mesh of a section, written for reading by index. Immutable.
  *
@@ -8,12 +10,19 @@ package tepor.mesher.mesh;
  * in the middle of its sides 0, 1 and 2; side i lies <em>opposite</em> corner i, and runs from corner (i+1)%3 to corner
  * (i+2)%3. Where two parts of the section touch in a single point only, each has a node of its own there.
  *
+ * <p>In six-node triangles the node in the middle of a side that is a facet on an arc lies on that arc's circle: the side is
+ * curved, the parabola through its three nodes. All other sides are straight, with the node in their middle. The map from
+ * the reference triangle to each curved triangle has a positive Jacobian everywhere: this was proven when the mesh was made.
+ *
  * <p>A <em>facet</em> is a triangle side that lies on a segment of the section: on the boundary, or between regions. A
  * facet runs in the direction of its segment; the triangle on its left has it as a side in that same direction.
  */
 public final class Mesh {
     /** No triangle, no neighbour. */
     public static final int NONE = -1;
+
+    /** A middle node farther off the middle than this makes a side curved. */
+    private static final double ROUND_OFF_ULPS = 8;
 
     private final int nodesPerTriangle;
     private final int cornerCount;
@@ -24,6 +33,7 @@ public final class Mesh {
     private final int[] facetSegment;
     private final int[] facetLeft;
     private final int[] facetRight;
+    private final BitSet curved = new BitSet();
 
     /**
      * @param nodesPerTriangle 3 or 6
@@ -55,6 +65,23 @@ public final class Mesh {
         this.facetSegment = facetSegment.clone();
         this.facetLeft = facetLeft.clone();
         this.facetRight = facetRight.clone();
+        if (nodesPerTriangle == 6) {
+            findCurved();
+        }
+    }
+
+    private void findCurved() {
+        for (int t = 0; t < region.length; t++) {
+            for (int i = 0; i < 3; i++) {
+                int a = node(t, (i + 1) % 3);
+                int b = node(t, (i + 2) % 3);
+                int m = node(t, 3 + i);
+                double off = Math.max(Math.abs(x(m) - 0.5 * (x(a) + x(b))), Math.abs(y(m) - 0.5 * (y(a) + y(b))));
+                if (off > ROUND_OFF_ULPS * Math.ulp(Math.max(Math.abs(x(m)), Math.abs(y(m))))) {
+                    curved.set(t);
+                }
+            }
+        }
     }
 
     /** 3 or 6. */
@@ -149,18 +176,52 @@ public final class Mesh {
         return node(triangle, (side + (fromLeft == (i == 0) ? 1 : 2)) % 3);
     }
 
-    /** Metres. */
+    /** Whether a triangle has a curved side. */
+    public boolean isCurved(int triangle) {
+        return curved.get(triangle);
+    }
+
+    /** Whether a facet is curved. */
+    public boolean isCurvedFacet(int facet) {
+        int triangle = facetLeft[facet] >= 0 ? facetLeft[facet] / 3 : facetRight[facet] / 3;
+        if (!curved.get(triangle)) {
+            return false;
+        }
+        int a = facetNode(facet, 0);
+        int b = facetNode(facet, 1);
+        int m = facetNode(facet, 2);
+        double off = Math.max(Math.abs(x(m) - 0.5 * (x(a) + x(b))), Math.abs(y(m) - 0.5 * (y(a) + y(b))));
+        return off > ROUND_OFF_ULPS * Math.ulp(Math.max(Math.abs(x(m)), Math.abs(y(m))));
+    }
+
+    /** Length of the chord of a facet, metres: of the facet itself where it is straight. */
     public double facetLength(int facet) {
         int a = facetNode(facet, 0);
         int b = facetNode(facet, 1);
         return Math.hypot(x(b) - x(a), y(b) - y(a));
     }
 
-    /** Area of a triangle, m². */
+    /** Area of a triangle, m²; exactly that within its curved sides. */
     public double area(int triangle) {
         int a = node(triangle, 0);
         int b = node(triangle, 1);
         int c = node(triangle, 2);
-        return 0.5 * ((x(b) - x(a)) * (y(c) - y(a)) - (x(c) - x(a)) * (y(b) - y(a)));
+        double area = 0.5 * ((x(b) - x(a)) * (y(c) - y(a)) - (x(c) - x(a)) * (y(b) - y(a)));
+        if (curved.get(triangle)) {
+            for (int i = 0; i < 3; i++) {
+                area += areaOutsideChord(triangle, i);
+            }
+        }
+        return area;
+    }
+
+    // Between chord and parabola lie two thirds of the parallelogram that both span.
+    private double areaOutsideChord(int triangle, int i) {
+        int a = node(triangle, (i + 1) % 3);
+        int b = node(triangle, (i + 2) % 3);
+        int m = node(triangle, 3 + i);
+        double bulgeX = x(m) - 0.5 * (x(a) + x(b));
+        double bulgeY = y(m) - 0.5 * (y(a) + y(b));
+        return 2.0 / 3.0 * (bulgeX * (y(b) - y(a)) - bulgeY * (x(b) - x(a)));
     }
 }
