@@ -1,6 +1,7 @@
 package tepor.mesher.mesh;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import tepor.mesher.outline.Circle;
 import tepor.mesher.section.Section;
@@ -24,14 +25,30 @@ final class RegionCheck {
     static List<String> problems(Mesh mesh, Section section) {
         List<String> problems = new ArrayList<>();
         checkAreas(mesh, section, problems);
+        boolean[] standsForArc = straightOnArc(mesh, section);
         int step = Math.max(1, mesh.triangleCount() / SAMPLES);
         for (int t = 0; t < mesh.triangleCount(); t += step) {
-            int seen = regionSeen(mesh, section, t);
+            // A triangle with a straight side on an arc may reach beyond the arc.
+            int seen = standsForArc[t] ? mesh.region(t) : regionSeen(mesh, section, t);
             if (seen != mesh.region(t)) {
                 problems.add("triangle " + t + " has region " + mesh.region(t) + " but lies in region " + seen);
             }
         }
         return problems;
+    }
+
+    private static boolean[] straightOnArc(Mesh mesh, Section section) {
+        boolean[] straight = new boolean[mesh.triangleCount()];
+        for (int f = 0; f < mesh.facetCount(); f++) {
+            if (section.circle(mesh.facetSegment(f)) != null && !mesh.isCurvedFacet(f)) {
+                for (int t : new int[] {mesh.facetLeftTriangle(f), mesh.facetRightTriangle(f)}) {
+                    if (t >= 0) {
+                        straight[t] = true;
+                    }
+                }
+            }
+        }
+        return straight;
     }
 
     private static void checkAreas(Mesh mesh, Section section, List<String> problems) {
@@ -116,42 +133,63 @@ final class RegionCheck {
     private static int regionSeen(Mesh mesh, Section section, int t) {
         double x = 0;
         double y = 0;
-        for (int i = 0; i < 3; i++) {
-            x += WEIGHT[i] * mesh.x(mesh.node(t, i));
-            y += WEIGHT[i] * mesh.y(mesh.node(t, i));
+        for (int i = 0; i < mesh.nodesPerTriangle(); i++) {
+            double weight = weight(i, mesh.nodesPerTriangle());
+            x += weight * mesh.x(mesh.node(t, i));
+            y += weight * mesh.y(mesh.node(t, i));
         }
         double nearest = Double.POSITIVE_INFINITY;
         int seen = Mesh.NONE;
         for (int s = 0; s < section.segmentCount(); s++) {
-            if (isInLens(section, s, x, y)) {
-                return section.lens(s) > 0 ? section.left(s) : section.right(s);
-            }
-            double ay = section.y(section.start(s)) - y;
-            double by = section.y(section.end(s)) - y;
-            if (ay > 0 == by > 0) {
-                continue;
-            }
-            double ax = section.x(section.start(s)) - x;
-            double bx = section.x(section.end(s)) - x;
-            double at = ax + (bx - ax) * (ay / (ay - by));
-            if (at > 0 && at < nearest) {
-                nearest = at;
-                seen = by > ay ? section.left(s) : section.right(s);
+            double[] met = section.circle(s) == null ? meetLine(section, s, x, y) : meetArc(section, s, x, y);
+            for (int i = 0; i < met.length; i += 2) {
+                if (met[i] > 0 && met[i] < nearest) {
+                    nearest = met[i];
+                    seen = met[i + 1] > 0 ? section.left(s) : section.right(s);
+                }
             }
         }
         return seen;
     }
 
-    private static boolean isInLens(Section section, int s, double x, double y) {
-        Circle circle = section.circle(s);
-        if (circle == null || circle.offset(x, y) >= 0) {
-            return false;
+    // Shape function of a node at the point: a curved triangle need not hold the point of the straight one.
+    private static double weight(int i, int nodesPerTriangle) {
+        if (nodesPerTriangle == 3) {
+            return WEIGHT[i];
         }
+        return i < 3 ? WEIGHT[i] * (2 * WEIGHT[i] - 1) : 4 * WEIGHT[(i + 1) % 3] * WEIGHT[(i + 2) % 3];
+    }
+
+    // Distance at which the ray meets the segment, and whether the segment runs up (1) or down (-1) there; or nothing.
+    private static double[] meetLine(Section section, int s, double x, double y) {
+        double ay = section.y(section.start(s)) - y;
+        double by = section.y(section.end(s)) - y;
+        if (ay > 0 == by > 0) {
+            return new double[0];
+        }
+        double ax = section.x(section.start(s)) - x;
+        double bx = section.x(section.end(s)) - x;
+        return new double[] {ax + (bx - ax) * (ay / (ay - by)), by > ay ? 1 : -1};
+    }
+
+    private static double[] meetArc(Section section, int s, double x, double y) {
+        Circle circle = section.circle(s);
         double ax = section.x(section.start(s));
         double ay = section.y(section.start(s));
-        double dx = section.x(section.end(s)) - ax;
-        double dy = section.y(section.end(s)) - ay;
-        double right = (x - ax) * dy - (y - ay) * dx;
-        return section.lens(s) > 0 ? right > 0 : right < 0;
+        double turn = circle.turn(ax, ay, section.x(section.end(s)), section.y(section.end(s)));
+        double height = y - circle.y();
+        double[] met = {};
+        if (Math.abs(height) < circle.radius()) {
+            double half = Math.sqrt((circle.radius() - height) * (circle.radius() + height));
+            for (int sign = -1; sign <= 1; sign += 2) {
+                double toPlace = circle.turn(ax, ay, circle.x() + sign * half, y);
+                if (toPlace * turn > 0 && Math.abs(toPlace) < Math.abs(turn)) {
+                    met = Arrays.copyOf(met, met.length + 2);
+                    met[met.length - 2] = circle.x() + sign * half - x;
+                    met[met.length - 1] = sign * turn > 0 ? 1 : -1;
+                }
+            }
+        }
+        return met;
     }
 }

@@ -23,17 +23,22 @@ public record Circle(double x, double y, double radius) {
         return Math.atan2(ux * vy - uy * vx, ux * vx + uy * vy);
     }
 
-    /** Middle of the shorter arc from a to b, metres; on the circle even where a and b are a little off it. */
+    /** Middle of the shorter arc from a to b, metres: on the circle, and as far from a as from b. */
     public Coordinate middle(double ax, double ay, double bx, double by) {
-        double chordX = bx - ax;
-        double chordY = by - ay;
-        double chord = Math.hypot(chordX, chordY);
-        // The bisector of the chord, on the side of the chord that lies away from the centre.
-        double nx = chordY / chord;
-        double ny = -chordX / chord;
-        double side = nx * (0.5 * (ax + bx) - x) + ny * (0.5 * (ay + by) - y) >= 0 ? radius : -radius;
-        // Where both ends are on the circle its bisector runs through the centre.
-        return new Coordinate(x + side * nx, y + side * ny);
+        double chord = Math.hypot(bx - ax, by - ay);
+        double ux = (bx - ax) / chord;
+        double uy = (by - ay) / chord;
+        double mx = 0.5 * (ax - x + bx - x);
+        double my = 0.5 * (ay - y + by - y);
+        // From the middle of the chord along its bisector, away from the centre. The ends may lie a little off the
+        // circle;
+        // then the bisector passes by the centre.
+        double across = mx * uy - my * ux;
+        double nx = across >= 0 ? uy : -uy;
+        double ny = across >= 0 ? -ux : ux;
+        double aside = mx * ux + my * uy;
+        double reach = Math.sqrt(Math.max(0, (radius - aside) * (radius + aside))) - Math.abs(across);
+        return new Coordinate(x + mx + reach * nx, y + my + reach * ny);
     }
 
     /** Greatest distance of the shorter arc from its chord, metres, for a chord of this length (metres). */

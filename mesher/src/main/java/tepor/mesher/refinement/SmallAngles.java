@@ -16,7 +16,7 @@ import tepor.mesher.section.Section;
  * <p>There two rules keep refinement from running away: segments are cut at equal distances from the apex, and a sharp
  * triangle whose shortest side joins both segments at equal distance is left alone. Sources: Ruppert 1995, J. Algorithms
  * 18:548–585 (shells); Miller, Pav & Walkington 2003, <em>When and why Ruppert's algorithm works</em>, IMR (triangles left
- * alone). Segments that continue each other without a corner count as one line; angles at arcs are those of their tangents,
+ * alone). Segments that continue each other straight or on the same circle count as one line; angles at arcs are those of their tangents,
  * or of their chords where these are smaller.
  */
 final class SmallAngles {
@@ -41,11 +41,7 @@ final class SmallAngles {
      * @param direction of its chord
      * @param bend from its chord to its tangent, positive counter-clockwise; 0 for a straight segment
      */
-    private record Spoke(int segment, boolean outward, double direction, double bend) {
-        double tangent() {
-            return direction + bend;
-        }
-    }
+    private record Spoke(int segment, boolean outward, double direction, double bend) {}
 
     SmallAngles(Section section) {
         this.section = section;
@@ -165,26 +161,19 @@ final class SmallAngles {
         return spokes;
     }
 
-    // Where a line touches a circle four spokes lie in line: each goes on in its own kind if it can.
+    // A line and an arc that goes on from it are two: round a plate with rounded corners all would be one line, that
+    // meets
+    // itself.
     private void joinStraight(List<Spoke> spokes) {
-        boolean[] joined = new boolean[spokes.size()];
-        joinStraight(spokes, joined, true);
-        joinStraight(spokes, joined, false);
-    }
-
-    private void joinStraight(List<Spoke> spokes, boolean[] joined, boolean sameKind) {
         for (int i = 0; i < spokes.size(); i++) {
             for (int j = i + 1; j < spokes.size(); j++) {
                 Spoke a = spokes.get(i);
                 Spoke b = spokes.get(j);
                 Circle circle = section.circle(a.segment());
-                boolean same = Objects.equals(circle, section.circle(b.segment()));
-                double turn = Math.IEEEremainder(b.tangent() - a.tangent(), 2 * Math.PI);
-                boolean straight = (same && circle != null) || Math.abs(turn) > Math.PI - STRAIGHT;
-                if (straight && same == sameKind && !joined[i] && !joined[j]) {
+                double turn = Math.abs(b.direction() - a.direction());
+                if (Objects.equals(circle, section.circle(b.segment()))
+                        && (circle != null || Math.abs(turn - Math.PI) < STRAIGHT)) {
                     line[root(a.segment())] = root(b.segment());
-                    joined[i] = true;
-                    joined[j] = true;
                 }
             }
         }
