@@ -89,21 +89,33 @@ public final class SectionRefiner {
         for (int side = 0; side < 3 * mesh.triangleCount(); side++) {
             checkSubsegment(side);
         }
+        int steps = 0;
+        boolean limited = false;
+        while (!limited && splitNextSubsegment()) {
+            checkStopped(steps++);
+            limited = mesh.triangleCount() + 2 > options.trianglesAtMost();
+        }
+        new LatticeSeeder(mesh, vertices, subsegmentRule, walk, cavity).plant(options.trianglesAtMost(), stopped);
+        for (int side = 0; side < 3 * mesh.triangleCount(); side++) {
+            checkSubsegment(side);
+        }
         for (int t = 0; t < mesh.triangleCount(); t++) {
             checkTriangle(t);
         }
-        int steps = 0;
-        boolean limited = false;
         boolean busy = true;
         while (busy && !limited) {
-            if (steps++ % STEPS_BETWEEN_CHECKS == 0 && stopped.getAsBoolean()) {
-                throw new CancellationException("meshing was told to stop");
-            }
+            checkStopped(steps++);
             // An interior vertex adds two triangles.
             limited = mesh.triangleCount() + 2 > options.trianglesAtMost();
             busy = !limited && (splitNextSubsegment() || betterNextTriangle());
         }
         return StopFinder.find(mesh, vertices, triangleRule, smallAngles, limited);
+    }
+
+    private void checkStopped(int step) {
+        if (step % STEPS_BETWEEN_CHECKS == 0 && stopped.getAsBoolean()) {
+            throw new CancellationException("meshing was told to stop");
+        }
     }
 
     private void checkSubsegment(int side) {

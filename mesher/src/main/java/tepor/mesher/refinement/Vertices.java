@@ -47,6 +47,11 @@ final class Vertices {
         return size[v];
     }
 
+    /** Size wanted at a place, metres. */
+    double sizeAt(double x, double y) {
+        return field.at(x, y);
+    }
+
     /** Segment inside which the vertex lies; {@link #FREE} or {@link #GIVEN}. */
     int carrier(int v) {
         return carrier[v];
