@@ -32,6 +32,9 @@ final class LatticeSeeder {
     /** Refinement beside segments adds this many triangles at most for each one of the lattice. */
     private static final double RESERVE = 1.5;
 
+    /** Room is made beforehand for so many times the triangles of the lattice. */
+    private static final double ROOM = 1.06;
+
     private static final int COARSEST = 12;
     private static final int STEPS_BETWEEN_CHECKS = 1024;
 
@@ -77,6 +80,7 @@ final class LatticeSeeder {
             return;
         }
         collect();
+        vertices.reserve((int) (2 * ROOM * count) + mesh.triangleCount());
         insertAll(stopped);
     }
 

@@ -25,6 +25,12 @@ public final class SectionRefiner {
     private static final double SMALLEST_ULPS = 256;
 
     private static final int STEPS_BETWEEN_CHECKS = 1024;
+    /** More triangles than this are made in two stages, of which the first makes about so many. */
+    private static final int MANY = 60_000;
+
+    private static final double FIRST_STAGE = 10_000;
+    /** Room made beforehand for so many times the triangles expected. */
+    private static final double RESERVE = 1.1;
 
     private final Triangulation mesh;
     private final RefinementOptions options;
@@ -39,6 +45,11 @@ public final class SectionRefiner {
     private final PendingSubsegments subsegments = new PendingSubsegments();
     private final Set<Long> unsplittable = new HashSet<>();
     private final double smallestLength;
+    /** Whether triangles are judged yet, or subsegments only. */
+    private boolean isJudging;
+
+    private int steps;
+    private boolean limited;
 
     private SectionRefiner(
             Triangulation mesh,
@@ -86,30 +97,43 @@ public final class SectionRefiner {
     }
 
     private RefinementReport run() {
-        for (int side = 0; side < 3 * mesh.triangleCount(); side++) {
-            checkSubsegment(side);
-        }
-        int steps = 0;
-        boolean limited = false;
+        checkSubsegments();
         while (!limited && splitNextSubsegment()) {
-            checkStopped(steps++);
-            limited = mesh.triangleCount() + 2 > options.trianglesAtMost();
+            checkStep();
         }
+        isJudging = true;
         new LatticeSeeder(mesh, vertices, subsegmentRule, walk, cavity).plant(options.trianglesAtMost(), stopped);
+        checkSubsegments();
+        double expected = Math.min(Patches.expected(mesh, vertices), options.trianglesAtMost());
+        if (expected > MANY && expected > 4 * mesh.triangleCount()) {
+            vertices.reserve((int) (RESERVE * expected));
+            refine(Math.sqrt(expected / FIRST_STAGE));
+        }
+        refine(1);
+        return StopFinder.find(mesh, vertices, triangleRule, smallAngles, limited);
+    }
+
+    private void checkSubsegments() {
         for (int side = 0; side < 3 * mesh.triangleCount(); side++) {
             checkSubsegment(side);
         }
+    }
+
+    private void refine(double coarseness) {
+        triangleRule.setCoarseness(coarseness);
+        triangles.divide(Patches.divide(mesh, vertices));
         for (int t = 0; t < mesh.triangleCount(); t++) {
             checkTriangle(t);
         }
-        boolean busy = true;
-        while (busy && !limited) {
-            checkStopped(steps++);
-            // An interior vertex adds two triangles.
-            limited = mesh.triangleCount() + 2 > options.trianglesAtMost();
-            busy = !limited && (splitNextSubsegment() || betterNextTriangle());
+        while (!limited && (splitNextSubsegment() || betterNextTriangle())) {
+            checkStep();
         }
-        return StopFinder.find(mesh, vertices, triangleRule, smallAngles, limited);
+    }
+
+    private void checkStep() {
+        checkStopped(steps++);
+        // An interior vertex adds two triangles.
+        limited = mesh.triangleCount() + 2 > options.trianglesAtMost();
     }
 
     private void checkStopped(int step) {
@@ -127,7 +151,8 @@ public final class SectionRefiner {
     private void checkTriangle(int triangle) {
         triangleRule.examine(triangle);
         if (triangleRule.isLarge() || (triangleRule.isSharp() && !isImposed(triangle))) {
-            triangles.add(triangle, mesh.version(triangle), triangleRule.shortestSquared());
+            int patch = vertices.patch(mesh.apex(3 * triangle));
+            triangles.add(triangle, mesh.version(triangle), patch, triangleRule.shortestSquared());
         }
     }
 
@@ -181,7 +206,8 @@ public final class SectionRefiner {
             case ON_CORNER -> again = false;
         }
         if (again) {
-            triangles.add(triangle, mesh.version(triangle), shortestSquared);
+            int patch = vertices.patch(mesh.apex(3 * triangle));
+            triangles.add(triangle, mesh.version(triangle), patch, shortestSquared);
         }
         return true;
     }
@@ -213,13 +239,17 @@ public final class SectionRefiner {
     }
 
     private void insert(double x, double y, int segment) {
-        cavity.fill(vertices.add(x, y, segment));
+        int vertex = vertices.add(x, y, segment);
+        vertices.setPatch(vertex, vertices.patch(mesh.apex(cavity.borderSide(0) / 3 * 3)));
+        cavity.fill(vertex);
         for (int i = 0; i < cavity.borderCount(); i++) {
             int side = cavity.borderSide(i);
             checkSubsegment(side);
             checkSubsegment(side + 1);
             checkSubsegment(side + 2);
-            checkTriangle(side / 3);
+            if (isJudging) {
+                checkTriangle(side / 3);
+            }
         }
     }
 }

@@ -21,6 +21,9 @@ final class TriangleRule {
     private final double squaredCosine4;
     private final double reach;
 
+    /** Times how much coarser than wanted triangles may be at present. */
+    private double coarseness = 1;
+
     private int shortest;
     private double shortestSquared;
     private boolean sharp;
@@ -35,6 +38,11 @@ final class TriangleRule {
         double cosine = Math.cos(options.smallestAngle());
         squaredCosine4 = 4 * cosine * cosine;
         reach = OFF_CENTRE * 0.5 / Math.tan(0.5 * options.smallestAngle());
+    }
+
+    /** Sets how many times larger than wanted triangles may be from now on. */
+    void setCoarseness(double times) {
+        coarseness = times;
     }
 
     /** Looks at a triangle. */
@@ -59,7 +67,7 @@ final class TriangleRule {
         // Law of cosines for the angle opposite the shortest side.
         double twiceProduct = max + mid - min;
         sharp = twiceProduct * twiceProduct > squaredCosine4 * mid * max;
-        large = isLarge(a, b, c, Math.sqrt(max) / COARSER);
+        large = isLarge(a, b, c, Math.sqrt(max) / (COARSER * coarseness));
     }
 
     private boolean isLarge(int a, int b, int c, double longest) {
@@ -130,7 +138,7 @@ final class TriangleRule {
         double distance = ((uy - 0.5 * dy) * dx - (ux - 0.5 * dx) * dy) / length;
         double wanted = reach * length;
         if (large) {
-            double size = Math.min(vertices.size(p), vertices.size(q));
+            double size = coarseness * Math.min(vertices.size(p), vertices.size(q));
             double aim = AIM * size;
             if (length <= COARSER * size) {
                 wanted = Math.min(wanted, Math.sqrt(aim * aim - 0.25 * dd));
