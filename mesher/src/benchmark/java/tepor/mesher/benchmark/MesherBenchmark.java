@@ -14,6 +14,7 @@ import tepor.mesher.outline.Findings;
 import tepor.mesher.outline.Outline;
 import tepor.mesher.outline.WktReader;
 import tepor.mesher.refinement.RefinementReport;
+import tepor.mesher.refinement.SizeField;
 import tepor.mesher.section.RegionShape;
 import tepor.mesher.section.Section;
 import tepor.mesher.section.SectionBuilder;
@@ -54,7 +55,7 @@ public final class MesherBenchmark {
             result = null;
             System.gc();
             long start = System.nanoTime();
-            result = Mesher.mesh(section, new MeshOptions(angle, (x, y) -> size, 20_000_000, 3), () -> false);
+            result = Mesher.mesh(section, new MeshOptions(angle, SizeField.even(size), 20_000_000, 3), () -> false);
             least = Math.min(least, 1e-9 * (System.nanoTime() - start));
         }
         int triangles = result.mesh().triangleCount();

@@ -1,5 +1,6 @@
 package tepor.mesher.refinement;
 
+import java.util.Arrays;
 import java.util.HashSet;
 import java.util.Set;
 import java.util.concurrent.CancellationException;
@@ -48,6 +49,10 @@ public final class SectionRefiner {
     /** Whether triangles are judged yet, or subsegments only. */
     private boolean isJudging;
 
+    /** Triangles given up, or not to be bettered since the outline imposes their angle. */
+    private int[] leftAlone = new int[64];
+
+    private int leftAloneCount;
     private int steps;
     private boolean limited;
 
@@ -110,7 +115,9 @@ public final class SectionRefiner {
             refine(Math.sqrt(expected / FIRST_STAGE));
         }
         refine(1);
-        return StopFinder.find(mesh, vertices, triangleRule, smallAngles, limited);
+        return limited
+                ? StopFinder.ofAll(mesh, vertices, triangleRule, smallAngles)
+                : StopFinder.of(mesh, vertices, triangleRule, smallAngles, Arrays.stream(leftAlone, 0, leftAloneCount));
     }
 
     private void checkSubsegments() {
@@ -121,6 +128,7 @@ public final class SectionRefiner {
 
     private void refine(double coarseness) {
         triangleRule.setCoarseness(coarseness);
+        leftAloneCount = 0;
         triangles.divide(Patches.divide(mesh, vertices));
         for (int t = 0; t < mesh.triangleCount(); t++) {
             checkTriangle(t);
@@ -153,7 +161,16 @@ public final class SectionRefiner {
         if (triangleRule.isLarge() || (triangleRule.isSharp() && !isImposed(triangle))) {
             int patch = vertices.patch(mesh.apex(3 * triangle));
             triangles.add(triangle, mesh.version(triangle), patch, triangleRule.shortestSquared());
+        } else if (triangleRule.isSharp()) {
+            leaveAlone(triangle);
         }
+    }
+
+    private void leaveAlone(int triangle) {
+        if (leftAloneCount == leftAlone.length) {
+            leftAlone = Arrays.copyOf(leftAlone, 2 * leftAloneCount);
+        }
+        leftAlone[leftAloneCount++] = triangle;
     }
 
     private boolean isImposed(int triangle) {
@@ -179,7 +196,8 @@ public final class SectionRefiner {
     private long key(int side) {
         int a = mesh.origin(side);
         int b = mesh.destination(side);
-        return (long) Math.max(a, b) << 32 | Math.min(a, b);
+        // The factor spreads the hashes of neighbouring numbers.
+        return ((long) Math.max(a, b) << 32 | Math.min(a, b)) * 0x9E3779B97F4A7C15L;
     }
 
     private boolean betterNextTriangle() {
@@ -193,6 +211,7 @@ public final class SectionRefiner {
         triangleRule.examine(triangle);
         double shortestSquared = triangleRule.shortestSquared();
         if (shortestSquared < smallestLength * smallestLength || !triangleRule.place()) {
+            leaveAlone(triangle);
             return true;
         }
         double x = triangleRule.x();
@@ -208,6 +227,8 @@ public final class SectionRefiner {
         if (again) {
             int patch = vertices.patch(mesh.apex(3 * triangle));
             triangles.add(triangle, mesh.version(triangle), patch, shortestSquared);
+        } else if (mesh.version(triangle) == triangles.takenVersion()) {
+            leaveAlone(triangle);
         }
         return true;
     }

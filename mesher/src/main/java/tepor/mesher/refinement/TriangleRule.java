@@ -6,7 +6,7 @@ import tepor.mesher.triangulation.Triangulation;
  * Judges triangles by angle and size, and chooses where to put a vertex that betters one.
  *
  * <p>A triangle is too large if its longest side exceeds the size wanted at its corners, its centroid or the middle of a
- * side; middles are asked only where they can matter for a size that changes by less than 3 m per metre.
+ * side; these are asked only where they can matter for a size of its gradation.
  */
 final class TriangleRule {
     private static final double COARSER = 1 + 1e-9;
@@ -14,6 +14,9 @@ final class TriangleRule {
     private static final double OFF_CENTRE = 0.95;
     /** Side of the triangle which a vertex put in for the sake of size aims at, as a part of the size wanted. */
     private static final double AIM = 0.8;
+
+    /** Greatest distance of a point of a triangle from its nearest corner, as a part of the longest side: 1/√3. */
+    private static final double FARTHEST = 0.5774;
 
     private final Triangulation mesh;
     private final Vertices vertices;
@@ -74,6 +77,11 @@ final class TriangleRule {
         double atCorners = Math.min(vertices.size(a), Math.min(vertices.size(b), vertices.size(c)));
         if (longest > atCorners) {
             return true;
+        }
+        // No point of a triangle lies farther from its nearest corner than this part of its longest side.
+        double smallest = atCorners - field.gradation() * FARTHEST * coarseness * COARSER * longest;
+        if (longest <= smallest) {
+            return false;
         }
         double ax = mesh.x(a);
         double ay = mesh.y(a);
