@@ -17,20 +17,22 @@ final class FacetList {
     }
 
     static FacetList of(Triangulation mesh, Section section) {
-        Integer[] order = facetSides(mesh);
-        double[] along = new double[3 * mesh.triangleCount()];
-        for (int side : order) {
-            along[side] = distanceAlong(mesh, section, side);
+        int[] sides = facetSides(mesh);
+        double[] along = new double[sides.length];
+        Integer[] order = new Integer[sides.length];
+        for (int f = 0; f < order.length; f++) {
+            along[f] = distanceAlong(mesh, section, sides[f]);
+            order[f] = f;
         }
         Arrays.sort(order, (a, b) -> {
-            int bySegment = Integer.compare(mesh.constraint(a) / 2, mesh.constraint(b) / 2);
+            int bySegment = Integer.compare(mesh.constraint(sides[a]) / 2, mesh.constraint(sides[b]) / 2);
             return bySegment != 0 ? bySegment : Double.compare(along[a], along[b]);
         });
         int[] segment = new int[order.length];
         int[] left = new int[order.length];
         int[] right = new int[order.length];
         for (int f = 0; f < order.length; f++) {
-            int side = order[f];
+            int side = sides[order[f]];
             boolean runsAlong = mesh.constraint(side) % 2 == 0;
             segment[f] = mesh.constraint(side) / 2;
             left[f] = runsAlong ? side : mesh.twin(side);
@@ -40,12 +42,15 @@ final class FacetList {
     }
 
     // One side for each facet: that on the left of the segment if there is a triangle, else that on the right.
-    private static Integer[] facetSides(Triangulation mesh) {
-        Integer[] sides = new Integer[3 * mesh.triangleCount()];
+    private static int[] facetSides(Triangulation mesh) {
+        int[] sides = new int[256];
         int count = 0;
         for (int side = 0; side < 3 * mesh.triangleCount(); side++) {
             int code = mesh.constraint(side);
             if (code >= 0 && (code % 2 == 0 || mesh.twin(side) < 0)) {
+                if (count == sides.length) {
+                    sides = Arrays.copyOf(sides, 2 * count);
+                }
                 sides[count++] = side;
             }
         }
@@ -69,7 +74,7 @@ final class FacetList {
 
     /** Segment of each facet. */
     int[] segments() {
-        return segment.clone();
+        return segment;
     }
 
     /** Side of the triangle on the left of the facet, or {@link Triangulation#NONE}. */

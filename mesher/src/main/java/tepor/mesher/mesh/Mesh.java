@@ -56,19 +56,44 @@ public final class Mesh {
             int[] facetSegment,
             int[] facetLeft,
             int[] facetRight) {
+        this(
+                nodesPerTriangle,
+                cornerCount,
+                new Arrays(
+                        xy.clone(),
+                        node.clone(),
+                        neighbour.clone(),
+                        region.clone(),
+                        facetSegment.clone(),
+                        facetLeft.clone(),
+                        facetRight.clone()));
+    }
+
+    /** A mesh that keeps the arrays themselves: whoever made them must not touch them any more. */
+    Mesh(int nodesPerTriangle, int cornerCount, Arrays arrays) {
         this.nodesPerTriangle = nodesPerTriangle;
         this.cornerCount = cornerCount;
-        this.xy = xy.clone();
-        this.node = node.clone();
-        this.neighbour = neighbour.clone();
-        this.region = region.clone();
-        this.facetSegment = facetSegment.clone();
-        this.facetLeft = facetLeft.clone();
-        this.facetRight = facetRight.clone();
+        xy = arrays.xy;
+        node = arrays.node;
+        neighbour = arrays.neighbour;
+        region = arrays.region;
+        facetSegment = arrays.facetSegment;
+        facetLeft = arrays.facetLeft;
+        facetRight = arrays.facetRight;
         if (nodesPerTriangle == 6) {
             findCurved();
         }
     }
+
+    /** What a mesh is made of; see the constructor. */
+    record Arrays(
+            double[] xy,
+            int[] node,
+            int[] neighbour,
+            int[] region,
+            int[] facetSegment,
+            int[] facetLeft,
+            int[] facetRight) {}
 
     private void findCurved() {
         for (int t = 0; t < region.length; t++) {

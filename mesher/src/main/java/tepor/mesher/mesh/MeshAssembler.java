@@ -73,9 +73,12 @@ final class MeshAssembler {
 
     private double[] centroids() {
         double[] centroid = new double[2 * count];
-        for (int side = 0; side < 3 * count; side++) {
-            centroid[2 * (side / 3)] += from.x(from.apex(side)) / 3;
-            centroid[2 * (side / 3) + 1] += from.y(from.apex(side)) / 3;
+        for (int t = 0; t < count; t++) {
+            int a = from.apex(3 * t);
+            int b = from.apex(3 * t + 1);
+            int c = from.apex(3 * t + 2);
+            centroid[2 * t] = (from.x(a) + from.x(b) + from.x(c)) / 3;
+            centroid[2 * t + 1] = (from.y(a) + from.y(b) + from.y(c)) / 3;
         }
         return centroid;
     }
@@ -168,13 +171,8 @@ final class MeshAssembler {
         mesh = new Mesh(
                 nodesPerTriangle,
                 cornerCount,
-                Arrays.copyOf(xy, 2 * nodeCount),
-                node,
-                neighbour,
-                region,
-                facets.segments(),
-                left,
-                right);
+                new Mesh.Arrays(
+                        Arrays.copyOf(xy, 2 * nodeCount), node, neighbour, region, facets.segments(), left, right));
     }
 
     private int renumbered(int side) {

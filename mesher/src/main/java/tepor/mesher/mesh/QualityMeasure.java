@@ -1,9 +1,6 @@
 package tepor.mesher.mesh;
 
-import java.util.ArrayList;
-import java.util.HashSet;
-import java.util.List;
-import java.util.Set;
+import java.util.BitSet;
 import tepor.mesher.section.Section;
 
 /** Measures the angles of a mesh, and tells those the outline imposes from those that were made. */
@@ -12,24 +9,35 @@ final class QualityMeasure {
 
     private final Mesh mesh;
     private final Section section;
-    private final List<Set<Integer>> segmentsAt = new ArrayList<>();
-    private final Set<Long> facetSides = new HashSet<>();
+    /** Where the facets at each corner begin in the list that follows, and their segments. */
+    private final int[] firstAt;
+
+    private final int[] segmentAt;
+    /** Sides 3·triangle + i that are facets. */
+    private final BitSet facetSides = new BitSet();
 
     private QualityMeasure(Mesh mesh, Section section) {
         this.mesh = mesh;
         this.section = section;
+        firstAt = new int[mesh.cornerCount() + 1];
+        segmentAt = new int[2 * mesh.facetCount()];
+        for (int f = 0; f < mesh.facetCount(); f++) {
+            firstAt[mesh.facetNode(f, 0)]++;
+            firstAt[mesh.facetNode(f, 1)]++;
+            if (mesh.facetLeftTriangle(f) != Mesh.NONE) {
+                facetSides.set(3 * mesh.facetLeftTriangle(f) + mesh.facetLeftSide(f));
+            }
+            if (mesh.facetRightTriangle(f) != Mesh.NONE) {
+                facetSides.set(3 * mesh.facetRightTriangle(f) + mesh.facetRightSide(f));
+            }
+        }
+        // From numbers to ends of the lists; filling them from behind turns the ends into beginnings.
         for (int n = 0; n < mesh.cornerCount(); n++) {
-            segmentsAt.add(Set.of());
+            firstAt[n + 1] += firstAt[n];
         }
         for (int f = 0; f < mesh.facetCount(); f++) {
-            for (int i = 0; i < 2; i++) {
-                int n = mesh.facetNode(f, i);
-                if (segmentsAt.get(n).isEmpty()) {
-                    segmentsAt.set(n, new HashSet<>(4));
-                }
-                segmentsAt.get(n).add(mesh.facetSegment(f));
-            }
-            facetSides.add(key(mesh.facetNode(f, 0), mesh.facetNode(f, 1)));
+            segmentAt[--firstAt[mesh.facetNode(f, 0)]] = mesh.facetSegment(f);
+            segmentAt[--firstAt[mesh.facetNode(f, 1)]] = mesh.facetSegment(f);
         }
     }
 
@@ -37,56 +45,61 @@ final class QualityMeasure {
         return new QualityMeasure(mesh, section).measure();
     }
 
+    // Compares cotangents, which fall as angles grow from 0 to 180°.
     private MeshQuality measure() {
-        double smallest = Math.PI;
-        double smallestMade = Math.PI;
-        double largest = 0;
-        double[] angle = new double[3];
+        double smallest = Double.NEGATIVE_INFINITY;
+        double smallestMade = Double.NEGATIVE_INFINITY;
+        double largest = Double.POSITIVE_INFINITY;
+        double[] cotangent = new double[3];
         for (int t = 0; t < mesh.triangleCount(); t++) {
-            double least = Math.PI;
-            int leastCorner = 0;
-            for (int i = 0; i < 3; i++) {
-                angle[i] = angle(t, i);
-                largest = Math.max(largest, angle[i]);
-                if (angle[i] < least) {
-                    least = angle[i];
-                    leastCorner = i;
-                }
-            }
-            smallest = Math.min(smallest, least);
+            findCotangents(t, cotangent);
+            int leastCorner = cotangent[0] >= cotangent[1] ? 0 : 1;
+            leastCorner = cotangent[leastCorner] >= cotangent[2] ? leastCorner : 2;
+            double least = cotangent[leastCorner];
+            largest = Math.min(largest, Math.min(cotangent[0], Math.min(cotangent[1], cotangent[2])));
+            smallest = Math.max(smallest, least);
             // The shortest side lies opposite the smallest angle.
-            if (least < smallestMade && !joinsSmallAngle(t, leastCorner)) {
+            if (least > smallestMade && !joinsSmallAngle(t, leastCorner)) {
                 for (int i = 0; i < 3; i++) {
-                    if (angle[i] < smallestMade && !isBetweenSegments(t, i)) {
-                        smallestMade = angle[i];
+                    if (cotangent[i] > smallestMade && !isBetweenSegments(t, i)) {
+                        smallestMade = cotangent[i];
                     }
                 }
             }
         }
-        return new MeshQuality(smallest, smallestMade, largest);
+        return new MeshQuality(angle(smallest), angle(smallestMade), angle(largest));
     }
 
-    private double angle(int t, int i) {
-        int a = mesh.node(t, i);
-        int b = mesh.node(t, (i + 1) % 3);
-        int c = mesh.node(t, (i + 2) % 3);
-        double bx = mesh.x(b) - mesh.x(a);
-        double by = mesh.y(b) - mesh.y(a);
-        double cx = mesh.x(c) - mesh.x(a);
-        double cy = mesh.y(c) - mesh.y(a);
-        return Math.atan2(bx * cy - by * cx, bx * cx + by * cy);
+    private static double angle(double cotangent) {
+        return Math.PI / 2 - Math.atan(cotangent);
+    }
+
+    private void findCotangents(int t, double[] cotangent) {
+        int a = mesh.node(t, 0);
+        int b = mesh.node(t, 1);
+        int c = mesh.node(t, 2);
+        double abX = mesh.x(b) - mesh.x(a);
+        double abY = mesh.y(b) - mesh.y(a);
+        double bcX = mesh.x(c) - mesh.x(b);
+        double bcY = mesh.y(c) - mesh.y(b);
+        double caX = mesh.x(a) - mesh.x(c);
+        double caY = mesh.y(a) - mesh.y(c);
+        double cross = abX * bcY - bcX * abY;
+        cotangent[0] = -(abX * caX + abY * caY) / cross;
+        cotangent[1] = -(bcX * abX + bcY * abY) / cross;
+        cotangent[2] = -(caX * bcX + caY * bcY) / cross;
     }
 
     private boolean isBetweenSegments(int t, int i) {
-        int a = mesh.node(t, i);
-        return facetSides.contains(key(a, mesh.node(t, (i + 1) % 3)))
-                && facetSides.contains(key(a, mesh.node(t, (i + 2) % 3)));
+        return facetSides.get(3 * t + (i + 1) % 3) && facetSides.get(3 * t + (i + 2) % 3);
     }
 
     private boolean joinsSmallAngle(int t, int corner) {
-        for (int p : segmentsAt.get(mesh.node(t, (corner + 1) % 3))) {
-            for (int q : segmentsAt.get(mesh.node(t, (corner + 2) % 3))) {
-                if (p != q && meetSmall(p, q)) {
+        int a = mesh.node(t, (corner + 1) % 3);
+        int b = mesh.node(t, (corner + 2) % 3);
+        for (int i = firstAt[a]; i < firstAt[a + 1]; i++) {
+            for (int j = firstAt[b]; j < firstAt[b + 1]; j++) {
+                if (segmentAt[i] != segmentAt[j] && meetSmall(segmentAt[i], segmentAt[j])) {
                     return true;
                 }
             }
@@ -108,9 +121,5 @@ final class QualityMeasure {
         double bx = section.x(b) - section.x(apex);
         double by = section.y(b) - section.y(apex);
         return Math.abs(Math.atan2(ax * by - ay * bx, ax * bx + ay * by)) < SMALL;
-    }
-
-    private static long key(int a, int b) {
-        return (long) Math.max(a, b) << 32 | Math.min(a, b);
     }
 }

@@ -3,7 +3,7 @@ package tepor.mesher.refinement;
 import java.util.Arrays;
 
 /**
- * Triangles that wait to be refined: those with the shortest sides first (Üngör 2009, Comput. Geom. 42:109–118, needs this
+ * Triangles that wait to be refined, patch by patch; in a patch those with the shortest sides first (Üngör 2009, Comput. Geom. 42:109–118, needs this
  * for off-centres to pay), first come first served among nearly equals.
  */
 final class PendingTriangles {
@@ -13,15 +13,15 @@ final class PendingTriangles {
     private static final int SHIFT = 51;
 
     private final long firstBucket;
-    private final int[] head = new int[BUCKETS];
-    private final int[] tail = new int[BUCKETS];
+    private int[] head = new int[BUCKETS];
+    private int[] tail = new int[BUCKETS];
+    private int[] lowest = {BUCKETS};
     private int[] next = new int[1024];
     private int[] triangle = new int[1024];
     private int[] version = new int[1024];
     private int free = NONE;
     private int used;
-    private int lowest = BUCKETS;
-
+    private int patch;
     private int takenVersion;
 
     /** @param extent about the greatest length that occurs, metres */
@@ -30,36 +30,52 @@ final class PendingTriangles {
         Arrays.fill(head, NONE);
     }
 
-    void add(int triangle, int version, double shortestSquared) {
+    /** Sets the number of patches; nothing may be waiting. */
+    void divide(int patches) {
+        head = new int[BUCKETS * patches];
+        tail = new int[BUCKETS * patches];
+        lowest = new int[patches];
+        Arrays.fill(head, NONE);
+        Arrays.fill(lowest, BUCKETS);
+        patch = 0;
+    }
+
+    void add(int triangle, int version, int patch, double shortestSquared) {
         int bucket = (int) ((Double.doubleToRawLongBits(shortestSquared) >>> SHIFT) - firstBucket);
         bucket = Math.min(BUCKETS - 1, Math.max(0, bucket));
         int entry = newEntry();
         this.triangle[entry] = triangle;
         this.version[entry] = version;
         next[entry] = NONE;
-        if (head[bucket] < 0) {
-            head[bucket] = entry;
+        int list = BUCKETS * patch + bucket;
+        if (head[list] < 0) {
+            head[list] = entry;
         } else {
-            next[tail[bucket]] = entry;
+            next[tail[list]] = entry;
         }
-        tail[bucket] = entry;
-        lowest = Math.min(lowest, bucket);
+        tail[list] = entry;
+        lowest[patch] = Math.min(lowest[patch], bucket);
     }
 
-    /** Takes the next triangle; −1 if there is none. */
+    /** Takes the next triangle of the patch at hand, or of the next one that has any; −1 if there is none. */
     int take() {
-        while (lowest < BUCKETS && head[lowest] < 0) {
-            lowest++;
+        for (int i = 0; i <= lowest.length; i++) {
+            int bucket = lowest[patch];
+            while (bucket < BUCKETS && head[BUCKETS * patch + bucket] < 0) {
+                bucket++;
+            }
+            lowest[patch] = bucket;
+            if (bucket < BUCKETS) {
+                int entry = head[BUCKETS * patch + bucket];
+                head[BUCKETS * patch + bucket] = next[entry];
+                next[entry] = free;
+                free = entry;
+                takenVersion = version[entry];
+                return triangle[entry];
+            }
+            patch = patch + 1 == lowest.length ? 0 : patch + 1;
         }
-        if (lowest == BUCKETS) {
-            return NONE;
-        }
-        int entry = head[lowest];
-        head[lowest] = next[entry];
-        next[entry] = free;
-        free = entry;
-        takenVersion = version[entry];
-        return triangle[entry];
+        return NONE;
     }
 
     /** Version that the triangle taken last had when it was added. */

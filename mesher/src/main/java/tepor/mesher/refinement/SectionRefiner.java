@@ -1,5 +1,6 @@
 package tepor.mesher.refinement;
 
+import java.util.Arrays;
 import java.util.HashMap;
 import java.util.HashSet;
 import java.util.Map;
@@ -30,6 +31,12 @@ public final class SectionRefiner {
     private static final int DELAYS_AT_MOST = 8;
 
     private static final int STEPS_BETWEEN_CHECKS = 1024;
+    /** More triangles than this are made in two stages, of which the first makes about so many. */
+    private static final int MANY = 60_000;
+
+    private static final double FIRST_STAGE = 10_000;
+    /** Room made beforehand for so many times the triangles expected. */
+    private static final double RESERVE = 1.1;
 
     private final Triangulation mesh;
     private final Section section;
@@ -46,7 +53,15 @@ public final class SectionRefiner {
     private final Set<Long> unsplittable = new HashSet<>();
     private final Map<Long, Integer> delays = new HashMap<>();
     private final double smallestLength;
+    /** Whether triangles are judged yet, or subsegments only. */
+    private boolean isJudging;
+
+    /** Triangles given up, or not to be bettered since the outline imposes their angle. */
+    private int[] leftAlone = new int[64];
+
+    private int leftAloneCount;
     private int steps;
+    private boolean limited;
 
     private SectionRefiner(
             Triangulation mesh,
@@ -96,33 +111,47 @@ public final class SectionRefiner {
     }
 
     private RefinementReport run() {
+        checkSubsegments();
+        while (!limited && splitNextSubsegment()) {
+            checkStep();
+        }
+        isJudging = true;
+        new LatticeSeeder(mesh, vertices, subsegmentRule, walk, cavity).plant(options.trianglesAtMost(), stopped);
+        checkSubsegments();
+        double expected = Math.min(Patches.expected(mesh, vertices), options.trianglesAtMost());
+        if (expected > MANY && expected > 4 * mesh.triangleCount()) {
+            vertices.reserve((int) (RESERVE * expected));
+            refine(Math.sqrt(expected / FIRST_STAGE));
+        }
+        refine(1);
+        return limited
+                ? StopFinder.ofAll(mesh, vertices, triangleRule, smallAngles)
+                : StopFinder.of(mesh, vertices, triangleRule, smallAngles, Arrays.stream(leftAlone, 0, leftAloneCount));
+    }
+
+    private void checkSubsegments() {
         for (int side = 0; side < 3 * mesh.triangleCount(); side++) {
             checkSubsegment(side);
         }
+    }
+
+    private void refine(double coarseness) {
+        triangleRule.setCoarseness(coarseness);
+        leftAloneCount = 0;
+        triangles.divide(Patches.divide(mesh, vertices));
         for (int t = 0; t < mesh.triangleCount(); t++) {
             checkTriangle(t);
         }
-        boolean limited = refineQueued();
-        while (!limited && section.hasArcs() && queueBowed()) {
-            limited = refineQueued();
+        finishQueued();
+        while (!limited && coarseness == 1 && section.hasArcs() && queueBowed()) {
+            finishQueued();
         }
-        return StopFinder.find(mesh, vertices, triangleRule, smallAngles, limited);
     }
 
-    /** Works until nothing waits; whether the greatest number of triangles ended it. */
-    private boolean refineQueued() {
-        boolean busy = true;
-        while (busy) {
-            if (steps++ % STEPS_BETWEEN_CHECKS == 0 && stopped.getAsBoolean()) {
-                throw new CancellationException("meshing was told to stop");
-            }
-            // An interior vertex adds two triangles.
-            if (mesh.triangleCount() + 2 > options.trianglesAtMost()) {
-                return true;
-            }
-            busy = splitNextSubsegment() || betterNextTriangle();
+    private void finishQueued() {
+        while (!limited && (splitNextSubsegment() || betterNextTriangle())) {
+            checkStep();
         }
-        return false;
     }
 
     /** Queues arcs that bow too far for the triangles beside them; whether there are any. */
@@ -137,6 +166,18 @@ public final class SectionRefiner {
         return found;
     }
 
+    private void checkStep() {
+        checkStopped(steps++);
+        // An interior vertex adds two triangles.
+        limited = mesh.triangleCount() + 2 > options.trianglesAtMost();
+    }
+
+    private void checkStopped(int step) {
+        if (step % STEPS_BETWEEN_CHECKS == 0 && stopped.getAsBoolean()) {
+            throw new CancellationException("meshing was told to stop");
+        }
+    }
+
     private void checkSubsegment(int side) {
         if (mesh.constraint(side) >= 0 && subsegmentRule.isBad(side)) {
             subsegments.add(side, mesh.version(side / 3));
@@ -146,8 +187,18 @@ public final class SectionRefiner {
     private void checkTriangle(int triangle) {
         triangleRule.examine(triangle);
         if (triangleRule.isLarge() || (triangleRule.isSharp() && !isImposed(triangle))) {
-            triangles.add(triangle, mesh.version(triangle), triangleRule.shortestSquared());
+            int patch = vertices.patch(mesh.apex(3 * triangle));
+            triangles.add(triangle, mesh.version(triangle), patch, triangleRule.shortestSquared());
+        } else if (triangleRule.isSharp()) {
+            leaveAlone(triangle);
         }
+    }
+
+    private void leaveAlone(int triangle) {
+        if (leftAloneCount == leftAlone.length) {
+            leftAlone = Arrays.copyOf(leftAlone, 2 * leftAloneCount);
+        }
+        leftAlone[leftAloneCount++] = triangle;
     }
 
     private boolean isImposed(int triangle) {
@@ -197,13 +248,16 @@ public final class SectionRefiner {
         for (int side = firstSide; side < firstSide + 3; side++) {
             checkSubsegment(side);
         }
-        checkTriangle(firstSide / 3);
+        if (isJudging) {
+            checkTriangle(firstSide / 3);
+        }
     }
 
     private long key(int side) {
         int a = mesh.origin(side);
         int b = mesh.destination(side);
-        return (long) Math.max(a, b) << 32 | Math.min(a, b);
+        // The factor spreads the hashes of neighbouring numbers.
+        return ((long) Math.max(a, b) << 32 | Math.min(a, b)) * 0x9E3779B97F4A7C15L;
     }
 
     private boolean betterNextTriangle() {
@@ -217,6 +271,7 @@ public final class SectionRefiner {
         triangleRule.examine(triangle);
         double shortestSquared = triangleRule.shortestSquared();
         if (shortestSquared < smallestLength * smallestLength || !triangleRule.place()) {
+            leaveAlone(triangle);
             return true;
         }
         double x = triangleRule.x();
@@ -230,7 +285,10 @@ public final class SectionRefiner {
             case ON_CORNER -> again = false;
         }
         if (again) {
-            triangles.add(triangle, mesh.version(triangle), shortestSquared);
+            int patch = vertices.patch(mesh.apex(3 * triangle));
+            triangles.add(triangle, mesh.version(triangle), patch, shortestSquared);
+        } else if (mesh.version(triangle) == triangles.takenVersion()) {
+            leaveAlone(triangle);
         }
         return true;
     }
@@ -262,7 +320,9 @@ public final class SectionRefiner {
     }
 
     private void insert(double x, double y, int segment) {
-        cavity.fill(vertices.add(x, y, segment));
+        int vertex = vertices.add(x, y, segment);
+        vertices.setPatch(vertex, vertices.patch(mesh.apex(cavity.borderSide(0) / 3 * 3)));
+        cavity.fill(vertex);
         for (int i = 0; i < cavity.borderCount(); i++) {
             int side = cavity.borderSide(i);
             checkAll(side);

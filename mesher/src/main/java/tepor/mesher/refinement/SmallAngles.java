@@ -59,10 +59,7 @@ final class SmallAngles {
             bentLine[line[s]] |= section.circle(s) != null;
         }
         for (int v = 0; v < spokes.size(); v++) {
-            linesAt[v] = spokes.get(v).stream()
-                    .mapToInt(s -> line[s.segment()])
-                    .distinct()
-                    .toArray();
+            linesAt[v] = linesOf(spokes.get(v));
             findApex(v, spokes.get(v));
         }
     }
@@ -96,7 +93,8 @@ final class SmallAngles {
             int pLine = pSegment >= 0 ? line[pSegment] : linesAt[p][i];
             for (int j = 0; j < qCount; j++) {
                 int qLine = qSegment >= 0 ? line[qSegment] : linesAt[q][j];
-                int[] apexes = pLine == qLine ? null : apexesOf.get(pair(pLine, qLine));
+                boolean may = pLine != qLine && sharpLine[pLine] && sharpLine[qLine];
+                int[] apexes = may ? apexesOf.get(pair(pLine, qLine)) : null;
                 if (apexes != null && isShell(vertices, apexes, pLine, qLine, p, q)) {
                     return true;
                 }
@@ -204,6 +202,22 @@ final class SmallAngles {
         return all;
     }
 
+    private int[] linesOf(List<Spoke> spokes) {
+        int[] lines = new int[spokes.size()];
+        int count = 0;
+        for (int i = 0; i < lines.length; i++) {
+            int own = line[spokes.get(i).segment()];
+            boolean known = false;
+            for (int j = 0; j < count; j++) {
+                known |= lines[j] == own;
+            }
+            if (!known) {
+                lines[count++] = own;
+            }
+        }
+        return Arrays.copyOf(lines, count);
+    }
+
     private int root(int segment) {
         int r = segment;
         while (line[r] != r) {
@@ -214,6 +228,7 @@ final class SmallAngles {
     }
 
     private static long pair(int a, int b) {
-        return (long) Math.max(a, b) << 32 | Math.min(a, b);
+        // The factor spreads the hashes of neighbouring numbers.
+        return ((long) Math.max(a, b) << 32 | Math.min(a, b)) * 0x9E3779B97F4A7C15L;
     }
 }

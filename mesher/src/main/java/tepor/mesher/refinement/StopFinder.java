@@ -2,26 +2,45 @@ package tepor.mesher.refinement;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.IntStream;
+import tepor.mesher.refinement.RefinementReport.Reason;
 import tepor.mesher.triangulation.Triangulation;
 
 /** Finds the triangles that stayed worse than asked once refinement has ended, and says why. */
 final class StopFinder {
     private StopFinder() {}
 
-    /** @param limited whether refinement ended at the greatest number of triangles */
-    static RefinementReport find(
-            Triangulation mesh, Vertices vertices, TriangleRule rule, SmallAngles smallAngles, boolean limited) {
+    /** All triangles that stayed worse than asked, where refinement ended at the greatest number of triangles. */
+    static RefinementReport ofAll(Triangulation mesh, Vertices vertices, TriangleRule rule, SmallAngles smallAngles) {
+        return find(mesh, vertices, rule, smallAngles, IntStream.range(0, mesh.triangleCount()), Reason.ELEMENT_LIMIT);
+    }
+
+    /**
+     * Those that stayed worse than asked of the triangles left alone.
+     *
+     * @param leftAlone numbers of all triangles that refinement gave up, some perhaps bettered since
+     */
+    static RefinementReport of(
+            Triangulation mesh, Vertices vertices, TriangleRule rule, SmallAngles smallAngles, IntStream leftAlone) {
+        return find(mesh, vertices, rule, smallAngles, leftAlone.sorted().distinct(), Reason.SIZE_FLOOR);
+    }
+
+    private static RefinementReport find(
+            Triangulation mesh,
+            Vertices vertices,
+            TriangleRule rule,
+            SmallAngles smallAngles,
+            IntStream triangles,
+            Reason unlessImposed) {
         List<RefinementReport.Stop> stops = new ArrayList<>();
-        for (int t = 0; t < mesh.triangleCount(); t++) {
+        triangles.forEach(t -> {
             rule.examine(t);
-            if (!rule.isSharp() && !rule.isLarge()) {
-                continue;
+            if (rule.isSharp() || rule.isLarge()) {
+                boolean imposed = !rule.isLarge() && isImposed(mesh, vertices, rule, smallAngles, t);
+                Reason reason = imposed ? Reason.IMPOSED_BY_OUTLINE : unlessImposed;
+                stops.add(new RefinementReport.Stop(reason, centroid(mesh, t, 0), centroid(mesh, t, 1)));
             }
-            RefinementReport.Reason reason = !rule.isLarge() && isImposed(mesh, vertices, rule, smallAngles, t)
-                    ? RefinementReport.Reason.IMPOSED_BY_OUTLINE
-                    : limited ? RefinementReport.Reason.ELEMENT_LIMIT : RefinementReport.Reason.SIZE_FLOOR;
-            stops.add(new RefinementReport.Stop(reason, centroid(mesh, t, 0), centroid(mesh, t, 1)));
-        }
+        });
         return new RefinementReport(stops);
     }
 

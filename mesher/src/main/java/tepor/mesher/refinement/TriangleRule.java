@@ -6,7 +6,7 @@ import tepor.mesher.triangulation.Triangulation;
  * Judges triangles by angle and size, and chooses where to put a vertex that betters one.
  *
  * <p>A triangle is too large if its longest side exceeds the size wanted at its corners, its centroid or the middle of a
- * side; middles are asked only where they can matter for a size that changes by less than 3 m per metre.
+ * side; these are asked only where they can matter for a size of its gradation.
  */
 final class TriangleRule {
     private static final double COARSER = 1 + 1e-9;
@@ -15,11 +15,17 @@ final class TriangleRule {
     /** Side of the triangle which a vertex put in for the sake of size aims at, as a part of the size wanted. */
     private static final double AIM = 0.8;
 
+    /** Greatest distance of a point of a triangle from its nearest corner, as a part of the longest side: 1/√3. */
+    private static final double FARTHEST = 0.5774;
+
     private final Triangulation mesh;
     private final Vertices vertices;
     private final SizeField field;
     private final double squaredCosine4;
     private final double reach;
+
+    /** Times how much coarser than wanted triangles may be at present. */
+    private double coarseness = 1;
 
     private int shortest;
     private double shortestSquared;
@@ -35,6 +41,11 @@ final class TriangleRule {
         double cosine = Math.cos(options.smallestAngle());
         squaredCosine4 = 4 * cosine * cosine;
         reach = OFF_CENTRE * 0.5 / Math.tan(0.5 * options.smallestAngle());
+    }
+
+    /** Sets how many times larger than wanted triangles may be from now on. */
+    void setCoarseness(double times) {
+        coarseness = times;
     }
 
     /** Looks at a triangle. */
@@ -59,13 +70,18 @@ final class TriangleRule {
         // Law of cosines for the angle opposite the shortest side.
         double twiceProduct = max + mid - min;
         sharp = twiceProduct * twiceProduct > squaredCosine4 * mid * max;
-        large = isLarge(a, b, c, Math.sqrt(max) / COARSER);
+        large = isLarge(a, b, c, Math.sqrt(max) / (COARSER * coarseness));
     }
 
     private boolean isLarge(int a, int b, int c, double longest) {
         double atCorners = Math.min(vertices.size(a), Math.min(vertices.size(b), vertices.size(c)));
         if (longest > atCorners) {
             return true;
+        }
+        // No point of a triangle lies farther from its nearest corner than this part of its longest side.
+        double smallest = atCorners - field.gradation() * FARTHEST * coarseness * COARSER * longest;
+        if (longest <= smallest) {
+            return false;
         }
         double ax = mesh.x(a);
         double ay = mesh.y(a);
@@ -130,7 +146,7 @@ final class TriangleRule {
         double distance = ((uy - 0.5 * dy) * dx - (ux - 0.5 * dx) * dy) / length;
         double wanted = reach * length;
         if (large) {
-            double size = Math.min(vertices.size(p), vertices.size(q));
+            double size = coarseness * Math.min(vertices.size(p), vertices.size(q));
             double aim = AIM * size;
             if (length <= COARSER * size) {
                 wanted = Math.min(wanted, Math.sqrt(aim * aim - 0.25 * dd));

@@ -14,6 +14,7 @@ final class Vertices {
     private final SizeField field;
     private double[] size;
     private int[] carrier;
+    private short[] patch;
 
     Vertices(Triangulation mesh, SizeField field) {
         this.mesh = mesh;
@@ -21,6 +22,7 @@ final class Vertices {
         int given = mesh.vertexCount();
         size = new double[2 * given + 16];
         carrier = new int[2 * given + 16];
+        patch = new short[2 * given + 16];
         for (int v = 0; v < given; v++) {
             note(v, GIVEN);
         }
@@ -30,11 +32,24 @@ final class Vertices {
     int add(double x, double y, int onSegment) {
         int v = mesh.addVertex(x, y);
         if (v == size.length) {
-            size = Arrays.copyOf(size, v + v / 2);
-            carrier = Arrays.copyOf(carrier, v + v / 2);
+            resize(v + v / 2);
         }
         note(v, onSegment);
         return v;
+    }
+
+    /** Makes room for so many triangles and their vertices. */
+    void reserve(int triangles) {
+        mesh.reserve(triangles);
+        if (triangles / 2 > size.length) {
+            resize(triangles / 2);
+        }
+    }
+
+    private void resize(int length) {
+        size = Arrays.copyOf(size, length);
+        carrier = Arrays.copyOf(carrier, length);
+        patch = Arrays.copyOf(patch, length);
     }
 
     private void note(int v, int onSegment) {
@@ -47,9 +62,23 @@ final class Vertices {
         return size[v];
     }
 
+    /** Size wanted at a place, metres. */
+    double sizeAt(double x, double y) {
+        return field.at(x, y);
+    }
+
     /** Segment inside which the vertex lies; {@link #FREE} or {@link #GIVEN}. */
     int carrier(int v) {
         return carrier[v];
+    }
+
+    /** Patch to which the triangles belong that were made when this vertex was added. */
+    int patch(int v) {
+        return patch[v];
+    }
+
+    void setPatch(int v, int number) {
+        patch[v] = (short) number;
     }
 
     double distance(int a, int b) {

@@ -238,7 +238,7 @@ public final class Cavity {
         dugCount = 0;
         borderCount = 0;
         if (seen.length < mesh.triangleCount()) {
-            seen = Arrays.copyOf(seen, Math.max(mesh.triangleCount(), seen.length * 2));
+            seen = Arrays.copyOf(seen, Math.max(mesh.region.length, mesh.triangleCount()));
         }
     }
 

@@ -11,6 +11,16 @@ import java.util.Arrays;
 public final class HilbertOrder {
     private static final int LEVELS = 16;
     private static final int SMALLEST_ROUND = 64;
+    /** Low bits of a packed key that hold the number of its point. */
+    private static final int NUMBER_BITS = 26;
+
+    private static final int DIGIT_BITS = 11;
+
+    private static final int DIGIT_MASK = (1 << DIGIT_BITS) - 1;
+    /** So few points are sorted by comparison. */
+    private static final int FEW = 4096;
+
+    private static final short[] FOUR_LEVELS = fourLevels();
 
     private HilbertOrder() {}
 
@@ -75,45 +85,85 @@ public final class HilbertOrder {
         return key;
     }
 
-    // Distance along the curve of a cell, by reflecting and turning quadrant by quadrant.
-    private static long distance(int cellX, int cellY) {
-        int x = cellX;
-        int y = cellY;
+    // Distance along the curve of a cell, four levels at a time.
+    private static long distance(int x, int y) {
+        int state = 0;
         long d = 0;
-        for (int s = 1 << (LEVELS - 1); s > 0; s >>= 1) {
-            int rx = (x & s) != 0 ? 1 : 0;
-            int ry = (y & s) != 0 ? 1 : 0;
-            d = 4 * d + ((3 * rx) ^ ry);
-            x &= s - 1;
-            y &= s - 1;
-            if (ry == 0) {
-                if (rx == 1) {
-                    x = s - 1 - x;
-                    y = s - 1 - y;
-                }
-                int swapped = x;
-                x = y;
-                y = swapped;
-            }
+        for (int shift = LEVELS - 4; shift >= 0; shift -= 4) {
+            int step = FOUR_LEVELS[state << 8 | (x >> shift & 15) << 4 | (y >> shift & 15)];
+            d = d << 8 | step & 255;
+            state = step >> 8;
         }
         return d;
+    }
+
+    // For each state of the curve and four bits of x and y: the eight bits of the distance, and the state after them. A
+    // state tells whether x and y are exchanged (bit 0) and whether both are reflected (bit 1).
+    private static short[] fourLevels() {
+        short[] table = new short[4 << 8];
+        for (int i = 0; i < table.length; i++) {
+            int exchanged = i >> 8 & 1;
+            int reflected = i >> 9;
+            int d = 0;
+            for (int bit = 3; bit >= 0; bit--) {
+                int bitX = i >> (4 + bit) & 1;
+                int bitY = i >> bit & 1;
+                int rx = (exchanged == 0 ? bitX : bitY) ^ reflected;
+                int ry = (exchanged == 0 ? bitY : bitX) ^ reflected;
+                d = 4 * d + ((3 * rx) ^ ry);
+                if (ry == 0) {
+                    reflected ^= rx;
+                    exchanged ^= 1;
+                }
+            }
+            table[i] = (short) ((reflected << 1 | exchanged) << 8 | d);
+        }
+        return table;
     }
 
     // Keys use at most 37 bits, so the sort of (key, number) fits a long while there are fewer than 2^26 points.
     private static int[] sorted(long[] key) {
         int n = key.length;
-        if (n >= 1 << 26) {
-            throw new IllegalArgumentException("at most " + ((1 << 26) - 1) + " points can be ordered, got " + n);
+        if (n >= 1 << NUMBER_BITS) {
+            throw new IllegalArgumentException(
+                    "at most " + ((1 << NUMBER_BITS) - 1) + " points can be ordered, got " + n);
         }
-        long[] packed = new long[n];
         for (int i = 0; i < n; i++) {
-            packed[i] = key[i] << 26 | i;
+            key[i] = key[i] << NUMBER_BITS | i;
         }
-        Arrays.sort(packed);
+        long[] packed = n < FEW ? key : sortedByDigits(key);
+        if (n < FEW) {
+            Arrays.sort(packed);
+        }
         int[] order = new int[n];
         for (int i = 0; i < n; i++) {
-            order[i] = (int) (packed[i] & ((1 << 26) - 1));
+            order[i] = (int) packed[i] & ((1 << NUMBER_BITS) - 1);
         }
         return order;
+    }
+
+    // By the digits of the key from the last to the first; equal ones keep their order, which is that of the numbers.
+    private static long[] sortedByDigits(long[] unsorted) {
+        long[] from = unsorted;
+        long[] to = new long[from.length];
+        for (int shift = NUMBER_BITS; shift < Long.SIZE; shift += DIGIT_BITS) {
+            int[] start = new int[(1 << DIGIT_BITS) + 1];
+            for (long p : from) {
+                start[((int) (p >>> shift) & DIGIT_MASK) + 1]++;
+            }
+            if (start[1] == from.length) {
+                continue;
+            }
+            for (int d = 0; d < DIGIT_MASK; d++) {
+                start[d + 1] += start[d];
+            }
+            for (long p : from) {
+                to[start[(int) (p >>> shift) & DIGIT_MASK]++] = p;
+            }
+            long[] sorted = to;
+            to = from;
+            from = sorted;
+        }
+        return from;
     }
 }

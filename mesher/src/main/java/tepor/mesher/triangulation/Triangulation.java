@@ -128,15 +128,28 @@ public final class Triangulation {
         return vertexCount++;
     }
 
+    /** Makes room for so many triangles, and the vertices of a mesh of that size. */
+    public void reserve(int triangles) {
+        if (triangles > region.length) {
+            resize(triangles);
+        }
+        if (triangles > xy.length) {
+            xy = Arrays.copyOf(xy, triangles & ~1);
+        }
+    }
+
+    private void resize(int capacity) {
+        corner = Arrays.copyOf(corner, 3 * capacity);
+        twin = Arrays.copyOf(twin, 3 * capacity);
+        constraint = Arrays.copyOf(constraint, 3 * capacity);
+        region = Arrays.copyOf(region, capacity);
+        version = Arrays.copyOf(version, capacity);
+    }
+
     /** Appends a triangle; its twins and constraints are {@link #NONE}. */
     int addTriangle(int a, int b, int c) {
         if (triangleCount == region.length) {
-            int capacity = triangleCount + triangleCount / 2;
-            corner = Arrays.copyOf(corner, 3 * capacity);
-            twin = Arrays.copyOf(twin, 3 * capacity);
-            constraint = Arrays.copyOf(constraint, 3 * capacity);
-            region = Arrays.copyOf(region, capacity);
-            version = Arrays.copyOf(version, capacity);
+            resize(triangleCount + triangleCount / 2);
         }
         int side = 3 * triangleCount;
         corner[side] = a;

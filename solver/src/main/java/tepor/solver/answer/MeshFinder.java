@@ -123,7 +123,7 @@ final class MeshFinder {
                 subject.section(),
                 new MeshOptions(
                         subject.mesh().smallestAngle(),
-                        (x, y) -> Math.min(asked.at(x, y), sizes.at(x, y)),
+                        SizeField.least(asked, sizes),
                         subject.mesh().trianglesAtMost(),
                         subject.mesh().nodesPerTriangle()),
                 stopped);

@@ -42,6 +42,11 @@ public final class AskedSizes implements SizeField {
         return size;
     }
 
+    @Override
+    public double gradation() {
+        return places.isEmpty() ? 0 : GRADATION;
+    }
+
     private static Geometry geometry(Section section, MeshRequest.Refinement refinement) {
         if (refinement.near() instanceof Target.OfRegion target) {
             return region(section, target.region().index());

@@ -1,5 +1,6 @@
 package tepor.solver.trust;
 
+import java.util.BitSet;
 import java.util.List;
 import org.locationtech.jts.geom.Envelope;
 import org.locationtech.jts.index.strtree.STRtree;
@@ -28,11 +29,19 @@ public final class FirstSizes implements SizeField {
     /** Many singular points, as of a grid of bars, are met by the adaptive rounds; the first mesh stays small. */
     private static final int MANY = 300;
 
+    private static final int CELLS = 128;
+
     private final double base;
     private final double tip;
     private final STRtree tree = new STRtree();
 
+    /** Cells of a grid over the section in which a point can matter, row by row: most questions end here. */
+    private final BitSet near = new BitSet();
+
+    private final double[] bounds;
+
     public FirstSizes(Case subject) {
+        bounds = subject.section().bounds();
         double area = 0;
         for (int r = 0; r < subject.section().regionCount(); r++) {
             if (!subject.section().isHole(r)) {
@@ -40,25 +49,49 @@ public final class FirstSizes implements SizeField {
             }
         }
         double count = subject.mesh().nodesPerTriangle() == 3 ? TRIANGLES_LINEAR : TRIANGLES_QUADRATIC;
-        base = LONGEST_TO_MEAN * Math.sqrt(4 / Math.sqrt(3) * area / count);
+        base = Math.min(subject.mesh().size(), LONGEST_TO_MEAN * Math.sqrt(4 / Math.sqrt(3) * area / count));
         List<SingularPoints.Point> points = SingularPoints.of(subject);
         tip = points.size() > MANY ? 2 * TIP : TIP;
         for (SingularPoints.Point point : points) {
             double reach = base / GRADATION;
             tree.insert(
                     new Envelope(point.x() - reach, point.x() + reach, point.y() - reach, point.y() + reach), point);
+            int right = column(point.x() + reach);
+            for (int row = row(point.y() - reach); row <= row(point.y() + reach); row++) {
+                near.set(CELLS * row + column(point.x() - reach), CELLS * row + right + 1);
+            }
         }
         tree.build();
     }
 
     @Override
+    public double gradation() {
+        return GRADATION;
+    }
+
+    @Override
     public double at(double x, double y) {
         double size = base;
+        if (!near.get(CELLS * row(y) + column(x))) {
+            return size;
+        }
         for (Object item : tree.query(new Envelope(x, x, y, y))) {
             SingularPoints.Point point = (SingularPoints.Point) item;
             double distance = Math.hypot(x - point.x(), y - point.y());
             size = Math.min(size, tip * point.clearance() + GRADATION * distance);
         }
         return size;
+    }
+
+    private int column(double x) {
+        return cell((x - bounds[0]) / (bounds[2] - bounds[0]));
+    }
+
+    private int row(double y) {
+        return cell((y - bounds[1]) / (bounds[3] - bounds[1]));
+    }
+
+    private static int cell(double part) {
+        return Math.max(0, Math.min(CELLS - 1, (int) (CELLS * part)));
     }
 }
