@@ -1,5 +1,9 @@
 package tepor.solver;
 
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
 import tepor.mesher.mesh.Mesh;
 
 /** Meshes of polygons whose corners lie on circles, made curved: the middles of facets move onto the circle. */
@@ -49,6 +53,81 @@ public final class CurvedMesh {
                 xy[2 * node + 1] = y + dy / off;
             }
         }
+    }
+
+    /**
+     * Divides every triangle in four, at the middles of its sides. A curved side becomes two straight ones through its
+     * middle node: hand the result to {@link #about}.
+     */
+    public static Mesh halved(Mesh mesh) {
+        int count = mesh.triangleCount();
+        Map<Long, Integer> middles = new HashMap<>();
+        List<Double> xy = new ArrayList<>();
+        for (int i = 0; i < mesh.nodeCount(); i++) {
+            xy.add(mesh.x(i));
+            xy.add(mesh.y(i));
+        }
+        int[] node = new int[24 * count];
+        int[] region = new int[4 * count];
+        int[][] children = {{0, 5, 4}, {5, 1, 3}, {4, 3, 2}, {3, 4, 5}};
+        Map<Long, Integer> sides = new HashMap<>();
+        for (int t = 0; t < 4 * count; t++) {
+            region[t] = mesh.region(t / 4);
+            for (int i = 0; i < 3; i++) {
+                node[6 * t + i] = mesh.node(t / 4, children[t % 4][i]);
+            }
+            for (int i = 0; i < 3; i++) {
+                int a = node[6 * t + (i + 1) % 3];
+                int b = node[6 * t + (i + 2) % 3];
+                sides.put(directed(a, b), 3 * t + i);
+                node[6 * t + 3 + i] = middles.computeIfAbsent(directed(Math.min(a, b), Math.max(a, b)), key -> {
+                    xy.add(0.5 * (xy.get(2 * a) + xy.get(2 * b)));
+                    xy.add(0.5 * (xy.get(2 * a + 1) + xy.get(2 * b + 1)));
+                    return xy.size() / 2 - 1;
+                });
+            }
+        }
+        int[] neighbour = new int[12 * count];
+        for (int s = 0; s < neighbour.length; s++) {
+            int a = node[6 * (s / 3) + (s % 3 + 1) % 3];
+            int b = node[6 * (s / 3) + (s % 3 + 2) % 3];
+            int across = sides.getOrDefault(directed(b, a), Mesh.NONE);
+            neighbour[s] = across < 0 ? Mesh.NONE : across / 3;
+        }
+        int facets = 2 * mesh.facetCount();
+        int[] segment = new int[facets];
+        int[] left = new int[facets];
+        int[] right = new int[facets];
+        for (int f = 0; f < facets; f++) {
+            int a = mesh.facetNode(f / 2, f % 2 == 0 ? 0 : 2);
+            int b = mesh.facetNode(f / 2, f % 2 == 0 ? 2 : 1);
+            segment[f] = mesh.facetSegment(f / 2);
+            left[f] = sides.getOrDefault(directed(a, b), Mesh.NONE);
+            right[f] = sides.getOrDefault(directed(b, a), Mesh.NONE);
+        }
+        double[] all = xy.stream().mapToDouble(Double::doubleValue).toArray();
+        return new Mesh(6, mesh.nodeCount(), all, node, neighbour, region, segment, left, right);
+    }
+
+    private static long directed(int a, int b) {
+        return (long) a << 32 | b;
+    }
+
+    /** Makes every facet a parabola whose middle lies off its chord by a share of the chord. */
+    public static Mesh bulged(Mesh straight, double share) {
+        double[] xy = new double[2 * straight.nodeCount()];
+        for (int i = 0; i < straight.nodeCount(); i++) {
+            xy[2 * i] = straight.x(i);
+            xy[2 * i + 1] = straight.y(i);
+        }
+        for (int f = 0; f < straight.facetCount(); f++) {
+            int a = straight.facetNode(f, 0);
+            int b = straight.facetNode(f, 1);
+            int m = straight.facetNode(f, 2);
+            xy[2 * m] += share * (straight.y(b) - straight.y(a));
+            xy[2 * m + 1] -= share * (straight.x(b) - straight.x(a));
+        }
+        return moved(straight, xy);
     }
 
     /** The same mesh with its nodes elsewhere. */
