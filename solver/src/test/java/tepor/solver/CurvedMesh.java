@@ -5,6 +5,9 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import tepor.mesher.mesh.Mesh;
+import tepor.mesher.outline.Circle;
+import tepor.mesher.section.Section;
+import tepor.solver.model.Case;
 
 /** Meshes of polygons whose corners lie on circles, made curved: the middles of facets move onto the circle. */
 public final class CurvedMesh {
@@ -128,6 +131,60 @@ public final class CurvedMesh {
             xy[2 * m + 1] -= share * (straight.x(b) - straight.x(a));
         }
         return moved(straight, xy);
+    }
+
+    /** The same case with the segments that are chords of circles about a centre turned into arcs; numbers stay. */
+    public static Case arcs(Case subject, double x, double y, double... radii) {
+        Section old = subject.section();
+        int segments = old.segmentCount();
+        double[] xy = new double[2 * old.vertexCount()];
+        for (int v = 0; v < old.vertexCount(); v++) {
+            xy[2 * v] = old.x(v);
+            xy[2 * v + 1] = old.y(v);
+        }
+        int[] ends = new int[2 * segments];
+        int[] sides = new int[2 * segments];
+        boolean[] outer = new boolean[segments];
+        Circle[] circle = new Circle[segments];
+        for (int s = 0; s < segments; s++) {
+            ends[2 * s] = old.start(s);
+            ends[2 * s + 1] = old.end(s);
+            sides[2 * s] = old.left(s);
+            sides[2 * s + 1] = old.right(s);
+            outer[s] = old.isOuter(s);
+            circle[s] = old.circle(s);
+            for (double radius : radii) {
+                Circle about = new Circle(x, y, radius);
+                if (Math.abs(about.offset(old.x(old.start(s)), old.y(old.start(s)))) < 1e-9 * radius
+                        && Math.abs(about.offset(old.x(old.end(s)), old.y(old.end(s)))) < 1e-9 * radius) {
+                    circle[s] = about;
+                }
+            }
+        }
+        List<String> names = new ArrayList<>();
+        boolean[] hole = new boolean[old.regionCount()];
+        for (int r = 0; r < hole.length; r++) {
+            names.add(old.regionName(r));
+            hole[r] = old.isHole(r);
+        }
+        Section section = new Section(xy, ends, circle, sides, outer, names, hole, old.snap());
+        return new Case(
+                subject.name(),
+                subject.title(),
+                subject.depth(),
+                subject.reportFields(),
+                section,
+                subject.unit(),
+                subject.regions(),
+                subject.materials(),
+                subject.airs(),
+                subject.edges(),
+                subject.asks(),
+                subject.mesh(),
+                subject.accuracy(),
+                subject.inputs(),
+                subject.warnings(),
+                subject.files());
     }
 
     /** The same mesh with its nodes elsewhere. */

@@ -7,21 +7,6 @@ import tepor.mesher.section.Section;
 public final class SegmentCurve {
     private SegmentCurve() {}
 
-    /** The circle of which a segment is an arc; null where it is straight. */
-    public static Circle circle(Section section, int segment) {
-        return null; // sections have straight segments only
-    }
-
-    /** Whether any segment of the section is an arc. */
-    public static boolean hasArcs(Section section) {
-        for (int s = 0; s < section.segmentCount(); s++) {
-            if (circle(section, s) != null) {
-                return true;
-            }
-        }
-        return false;
-    }
-
     /**
      * Points along a segment from one of its vertices to the other, both among them, so close that the lines between them
      * are nowhere farther off than a tolerance.
@@ -34,7 +19,7 @@ public final class SegmentCurve {
         int from = fromStart ? section.start(segment) : section.end(segment);
         int to = fromStart ? section.end(segment) : section.start(segment);
         return points(
-                circle(section, segment), section.x(from), section.y(from), section.x(to), section.y(to), tolerance);
+                section.circle(segment), section.x(from), section.y(from), section.x(to), section.y(to), tolerance);
     }
 
     static double[] points(Circle circle, double ax, double ay, double bx, double by, double tolerance) {
@@ -67,7 +52,7 @@ public final class SegmentCurve {
     public static double direction(Section section, int segment, boolean atStart) {
         int from = atStart ? section.start(segment) : section.end(segment);
         int to = atStart ? section.end(segment) : section.start(segment);
-        return direction(circle(section, segment), section.x(from), section.y(from), section.x(to), section.y(to));
+        return direction(section.circle(segment), section.x(from), section.y(from), section.x(to), section.y(to));
     }
 
     static double direction(Circle circle, double ax, double ay, double bx, double by) {

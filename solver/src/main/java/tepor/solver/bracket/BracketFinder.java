@@ -3,7 +3,6 @@ package tepor.solver.bracket;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import tepor.mesher.mesh.SegmentCurve;
 import tepor.mesher.section.Section;
 import tepor.solver.model.Case;
 import tepor.solver.model.Values;
@@ -46,7 +45,7 @@ public final class BracketFinder {
     }
 
     private Optional<Bracket> find() {
-        if (SegmentCurve.hasArcs(section)) {
+        if (section.hasArcs()) {
             return Optional.empty();
         }
         for (boolean upright : new boolean[] {true, false}) {
