@@ -5,7 +5,9 @@ import java.awt.Graphics2D;
 import java.awt.geom.Path2D;
 import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
 import tepor.mesher.mesh.Mesh;
 import tepor.mesher.mesh.TriangleMap;
 import tepor.solver.assembly.Tensor;
@@ -34,6 +36,7 @@ final class FluxArrows {
         FieldGradient gradient = new FieldGradient(field);
         double[] q = new double[2];
         double[] l = new double[3];
+        Set<Long> taken = new HashSet<>();
         TriangleMap map = new TriangleMap(mesh);
         double rowHeight = spacing * Math.sqrt(0.75);
         for (int t = 0; t < mesh.triangleCount(); t++) {
@@ -46,7 +49,10 @@ final class FluxArrows {
                 for (int column = (int) Math.ceil(box.getMinX() / spacing - shift); column <= last; column++) {
                     double px = (column + shift) * spacing;
                     double py = row * rowHeight;
-                    if (isIn(map, view.metresX(px), view.metresY(py), l)) {
+                    double x = view.metresX(px);
+                    double y = view.metresY(py);
+                    // A point on a side that triangles share is in both.
+                    if (map.contains(x, y) && map.locate(x, y, l) && taken.add((long) row << 32 ^ column)) {
                         flux(gradient, t, k[mesh.region(t)], l, q);
                         arrows.add(new Arrow(px, py, q[0], q[1]));
                     }
@@ -77,11 +83,6 @@ final class FluxArrows {
         return box;
     }
 
-    /** Whether a point is in a triangle; one on a side that triangles share is in one of them. */
-    static boolean isIn(TriangleMap map, double x, double y, double[] l) {
-        return map.locate(x, y, l) && l[1] >= 0 && l[2] >= 0 && l[1] + l[2] < 1;
-    }
-
     /** Of each region; null for those of nothing. */
     private static Tensor[] conductivities(Case subject) {
         Values values = subject.inputs().nominal();
@@ -97,6 +98,10 @@ final class FluxArrows {
         double gy = q[1];
         q[0] = -(k.xx() * gx + k.xy() * gy);
         q[1] = -(k.xy() * gx + k.yy() * gy);
+    }
+
+    int count() {
+        return arrows.size();
     }
 
     /** The same arrows at the scale of others, whose values stand in the key. */
