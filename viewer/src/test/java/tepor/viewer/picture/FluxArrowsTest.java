@@ -3,8 +3,10 @@ package tepor.viewer.picture;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import java.awt.geom.Rectangle2D;
 import org.junit.jupiter.api.Test;
 import tepor.mesher.mesh.Mesh;
+import tepor.mesher.mesh.TriangleMap;
 import tepor.solver.assembly.Tensor;
 import tepor.solver.field.FieldGradient;
 import tepor.solver.field.TemperatureField;
@@ -17,16 +19,40 @@ class FluxArrowsTest {
         TemperatureField field = PatternedGrid.field(mesh, (x, y) -> 3 * x * x - 2 * x * y + y);
         double[] q = new double[2];
         int found = 0;
+        TriangleMap map = new TriangleMap(mesh);
+        double[] l = new double[3];
         for (int t = 0; t < mesh.triangleCount(); t++) {
-            double[] x = new double[3];
-            double[] y = new double[3];
-            for (int i = 0; i < 3; i++) {
-                x[i] = mesh.x(mesh.node(t, i));
-                y[i] = mesh.y(mesh.node(t, i));
+            map.moveTo(t);
+            if (map.contains(0.3, 0.2) && map.locate(0.3, 0.2, l)) {
+                FluxArrows.flux(new FieldGradient(field), t, new Tensor(2, 0.5, 1), l, q);
+                found++;
             }
-            found += FluxArrows.flux(new FieldGradient(field), t, new Tensor(2, 0.5, 1), x, y, 0.3, 0.2, q) ? 1 : 0;
         }
         assertThat(found).isEqualTo(1);
         assertThat(q).containsExactly(new double[] {-(2 * 1.4 + 0.5 * 0.4), -(0.5 * 1.4 + 0.4)}, within(1e-11));
+    }
+
+    /** One arrow for each point of the pattern within the circles: rows √¾ apart, every other shifted by half; on the rim
+     * a parabola is off its circle by up to Rφ⁴/32, 0.07 px of 500, so that a few points may change sides. */
+    @Test
+    void arrowsFillARoundRingToItsCircles() {
+        PatternedGrid grid = PatternedGrid.ring(0.05, 0.1, 12, 2).rounded();
+        TemperatureField field = PatternedGrid.field(grid.mesh(6), (x, y) -> 100 * x);
+        SectionView view = new SectionView(grid.section(), new Rectangle2D.Double(0, 0, 1000, 1000), 1);
+        int expected = 0;
+        for (int row = 0; row * 7 * Math.sqrt(0.75) <= 1000; row++) {
+            for (int column = 0; column * 7 <= 1000; column++) {
+                double x = (column + 0.5 * (row % 2)) * 7 - 500;
+                double y = row * 7 * Math.sqrt(0.75) - 500;
+                expected += Math.hypot(x, y) < 500 && Math.hypot(x, y) > 250 ? 1 : 0;
+            }
+        }
+        assertThat(new FluxArrows(
+                                field,
+                                new SampleAnswers("ring", grid).inspection().subject(),
+                                view,
+                                7)
+                        .count())
+                .isBetween(expected - 3, expected + 3);
     }
 }

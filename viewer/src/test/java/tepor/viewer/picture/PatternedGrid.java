@@ -6,7 +6,9 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.function.ToDoubleBiFunction;
+import org.locationtech.jts.geom.Coordinate;
 import tepor.mesher.mesh.Mesh;
+import tepor.mesher.outline.Circle;
 import tepor.mesher.section.Section;
 import tepor.solver.field.TemperatureField;
 
@@ -34,6 +36,7 @@ public final class PatternedGrid {
     private final Regions regions;
     private final String[] names;
     private final boolean[] hole;
+    private boolean rounded;
 
     /** @param names of the regions; those beginning with "nothing" are holes */
     public PatternedGrid(int columns, int rows, boolean ring, Points points, Regions regions, String... names) {
@@ -63,6 +66,17 @@ public final class PatternedGrid {
                 },
                 (i, j) -> 0,
                 "ring");
+    }
+
+    /** Makes the segments along a ring's rows arcs, and the six-node triangles at them curved. */
+    public PatternedGrid rounded() {
+        rounded = true;
+        return this;
+    }
+
+    private Circle circle(double ax, double ay, double bx, double by) {
+        double radius = Math.hypot(ax, ay);
+        return rounded && Math.abs(Math.hypot(bx, by) - radius) < 1e-9 * radius ? new Circle(0, 0, radius) : null;
     }
 
     /** A rectangle from the origin. */
@@ -129,10 +143,17 @@ public final class PatternedGrid {
             System.arraycopy(segments.get(s), 2, sides, 2 * s, 2);
             outer[s] = sides[2 * s] == Section.NONE || sides[2 * s + 1] == Section.NONE;
         }
-        return new Section(vertices(), ends, sides, outer, List.of(names), hole, 1e-9);
+        double[] xy = vertices();
+        Circle[] circle = new Circle[n];
+        for (int s = 0; s < n; s++) {
+            int a = ends[2 * s];
+            int b = ends[2 * s + 1];
+            circle[s] = circle(xy[2 * a], xy[2 * a + 1], xy[2 * b], xy[2 * b + 1]);
+        }
+        return new Section(xy, ends, circle, sides, outer, List.of(names), hole, 1e-9);
     }
 
-    /** The mesh; nodes in the middle of sides lie halfway between its ends. */
+    /** The mesh; nodes in the middle of sides lie halfway between its ends, or on their arcs. */
     public Mesh mesh(int nodesPerTriangle) {
         double[] grid = vertices();
         int[] number = new int[grid.length / 2];
@@ -219,6 +240,18 @@ public final class PatternedGrid {
         double[] xy = Arrays.copyOf(cornerXy, cornerXy.length + extra.size());
         for (int i = 0; i < extra.size(); i++) {
             xy[cornerXy.length + i] = extra.get(i);
+        }
+        for (int[] facet : facets) {
+            int side = Math.max(facet[1], facet[2]);
+            int a = node[nodesPerTriangle * (side / 3) + (side % 3 + 1) % 3];
+            int b = node[nodesPerTriangle * (side / 3) + (side % 3 + 2) % 3];
+            Circle circle = circle(xy[2 * a], xy[2 * a + 1], xy[2 * b], xy[2 * b + 1]);
+            if (nodesPerTriangle == 6 && circle != null) {
+                Coordinate on = circle.middle(xy[2 * a], xy[2 * a + 1], xy[2 * b], xy[2 * b + 1]);
+                int m = node[6 * (side / 3) + 3 + side % 3];
+                xy[2 * m] = on.x;
+                xy[2 * m + 1] = on.y;
+            }
         }
         return new Mesh(
                 nodesPerTriangle,

@@ -79,6 +79,26 @@ class IsothermsTest {
         }
     }
 
+    /** Where the ring is 500 px in radius, 0.1 px are 2e-5 m. */
+    @Test
+    void isothermsAndRimOfARoundRingAreCirclesToATenthOfAPixel() {
+        Mesh mesh = PatternedGrid.ring(INNER, OUTER, 48, 8).rounded().mesh(6);
+        Isotherms isotherms = isotherms(PatternedGrid.field(mesh, IsothermsTest::ringTemperature));
+        assertThat(deviation(isotherms)).isLessThan(2e-5);
+        for (double[] rim : isotherms.section()) {
+            for (int i = 0; i < rim.length; i += 2) {
+                int j = (i + 2) % rim.length;
+                double at = Math.hypot(rim[i], rim[i + 1]);
+                double between = Math.hypot(0.5 * (rim[i] + rim[j]), 0.5 * (rim[i + 1] + rim[j + 1]));
+                double radius = at < 0.075 ? INNER : OUTER;
+                assertThat(at).isCloseTo(radius, within(1e-7));
+                assertThat(between).isCloseTo(radius, within(2e-5));
+            }
+        }
+        double whole = Math.PI * (OUTER * OUTER - INNER * INNER);
+        assertThat(Isotherms.area(isotherms.section())).isCloseTo(whole, within(1e-4 * whole));
+    }
+
     @Test
     void openLinesEndOnTheBoundaryAndAreasFollowIt() {
         // T = 100 xy on the unit square: isotherms are hyperbolas xy = c from side to side, which a quadratic field
