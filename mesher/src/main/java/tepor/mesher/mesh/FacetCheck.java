@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import tepor.mesher.outline.Circle;
 import tepor.mesher.section.Section;
 
 /** The part of the audit that compares facets with the section's segments. */
@@ -90,8 +91,11 @@ final class FacetCheck {
     private void checkOnLine(int s, int f, double x, double y) {
         double dx = section.x(section.end(s)) - section.x(section.start(s));
         double dy = section.y(section.end(s)) - section.y(section.start(s));
-        double off = Math.abs(dx * (y - section.y(section.start(s))) - dy * (x - section.x(section.start(s))))
-                / section.length(s);
+        Circle circle = section.circle(s);
+        double off = circle != null
+                ? Math.abs(circle.offset(x, y)) - section.snap()
+                : Math.abs(dx * (y - section.y(section.start(s))) - dy * (x - section.x(section.start(s))))
+                        / section.chord(s);
         if (!(off <= tolerance)) {
             problems.add("facet " + f + " ends " + off + " m off its segment " + s);
         }

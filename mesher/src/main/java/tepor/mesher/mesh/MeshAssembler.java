@@ -1,6 +1,9 @@
 package tepor.mesher.mesh;
 
 import java.util.Arrays;
+import java.util.List;
+import org.locationtech.jts.geom.Coordinate;
+import tepor.mesher.refinement.RefinementReport;
 import tepor.mesher.section.Section;
 import tepor.mesher.triangulation.HilbertOrder;
 import tepor.mesher.triangulation.Triangulation;
@@ -24,6 +27,8 @@ final class MeshAssembler {
     private int cornerCount;
     private int nodeCount;
     private double[] xy;
+    private Mesh mesh;
+    private List<RefinementReport.Stop> leftStraight = List.of();
 
     private MeshAssembler(Triangulation from, Section section, int nodesPerTriangle) {
         this.from = from;
@@ -39,11 +44,11 @@ final class MeshAssembler {
     }
 
     /**
-     * Makes the mesh.
+     * Makes the mesh, {@link #mesh()}.
      *
      * @param nodesPerTriangle 3 or 6
      */
-    static Mesh assemble(Triangulation from, Section section, int nodesPerTriangle) {
+    static MeshAssembler assemble(Triangulation from, Section section, int nodesPerTriangle) {
         if (nodesPerTriangle != 3 && nodesPerTriangle != 6) {
             throw new IllegalArgumentException("a triangle has 3 or 6 nodes, not " + nodesPerTriangle);
         }
@@ -53,7 +58,17 @@ final class MeshAssembler {
         if (nodesPerTriangle == 6) {
             assembler.numberMiddles();
         }
-        return assembler.finish();
+        assembler.finish();
+        return assembler;
+    }
+
+    Mesh mesh() {
+        return mesh;
+    }
+
+    /** Where sides on arcs were left straight. */
+    List<RefinementReport.Stop> leftStraight() {
+        return leftStraight;
     }
 
     private double[] centroids() {
@@ -115,14 +130,15 @@ final class MeshAssembler {
     }
 
     private void numberMiddles() {
+        ArcSides arcSides = new ArcSides(from, section);
+        leftStraight = arcSides.leftStraight();
         for (int t = 0; t < count; t++) {
             for (int i = 0; i < 3; i++) {
                 if (node[6 * t + 3 + i] != Mesh.NONE) {
                     continue;
                 }
-                int a = node[6 * t + (i + 1) % 3];
-                int b = node[6 * t + (i + 2) % 3];
-                int middle = newNode(0.5 * (xy[2 * a] + xy[2 * b]), 0.5 * (xy[2 * a + 1] + xy[2 * b + 1]));
+                Coordinate at = arcSides.middle(3 * oldNumber[t] + i);
+                int middle = newNode(at.x, at.y);
                 node[6 * t + 3 + i] = middle;
                 int twin = from.twin(3 * oldNumber[t] + i);
                 if (twin >= 0) {
@@ -141,7 +157,7 @@ final class MeshAssembler {
         return nodeCount++;
     }
 
-    private Mesh finish() {
+    private void finish() {
         FacetList facets = FacetList.of(from, section);
         int[] left = new int[facets.count()];
         int[] right = new int[facets.count()];
@@ -149,7 +165,7 @@ final class MeshAssembler {
             left[f] = renumbered(facets.leftSide(f));
             right[f] = renumbered(facets.rightSide(f));
         }
-        return new Mesh(
+        mesh = new Mesh(
                 nodesPerTriangle,
                 cornerCount,
                 Arrays.copyOf(xy, 2 * nodeCount),

@@ -1,7 +1,11 @@
 package tepor.mesher.mesh;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
+import tepor.mesher.outline.Circle;
+import tepor.mesher.refinement.CurvedTriangle;
 import tepor.mesher.section.Section;
 import tepor.mesher.triangulation.Predicates;
 
@@ -156,18 +160,55 @@ public final class MeshCheck {
         if (mesh.nodesPerTriangle() != 6) {
             return;
         }
+        Map<Integer, Circle> circleOf = circlesOfMiddles();
+        double[] node = new double[12];
         for (int t = 0; t < mesh.triangleCount(); t++) {
             for (int i = 0; i < 3; i++) {
-                int a = mesh.node(t, (i + 1) % 3);
-                int b = mesh.node(t, (i + 2) % 3);
-                int m = mesh.node(t, 3 + i);
-                double gap = Math.hypot(
-                        mesh.x(m) - 0.5 * (mesh.x(a) + mesh.x(b)), mesh.y(m) - 0.5 * (mesh.y(a) + mesh.y(b)));
-                double ulp = Math.ulp(Math.max(Math.abs(mesh.x(m)), Math.abs(mesh.y(m))));
-                if (!(gap <= 2 * ulp)) {
-                    problems.add("node " + m + " lies " + gap + " m off the middle of side " + i + " of triangle " + t);
-                }
+                checkMiddle(t, i, circleOf);
             }
+            for (int i = 0; i < 6; i++) {
+                node[2 * i] = mesh.x(mesh.node(t, i));
+                node[2 * i + 1] = mesh.y(mesh.node(t, i));
+            }
+            if (mesh.isCurved(t) && !(CurvedTriangle.leastJacobian(node) > 0)) {
+                problems.add("curved triangle " + t + " is not valid everywhere");
+            }
+        }
+    }
+
+    /** Circle of each node in the middle of a facet on an arc. */
+    private Map<Integer, Circle> circlesOfMiddles() {
+        Map<Integer, Circle> circleOf = new HashMap<>();
+        for (int f = 0; f < mesh.facetCount(); f++) {
+            Circle circle = section.circle(mesh.facetSegment(f));
+            if (circle != null) {
+                circleOf.put(mesh.facetNode(f, 2), circle);
+            }
+        }
+        return circleOf;
+    }
+
+    private void checkMiddle(int t, int i, Map<Integer, Circle> circleOf) {
+        int a = mesh.node(t, (i + 1) % 3);
+        int b = mesh.node(t, (i + 2) % 3);
+        int m = mesh.node(t, 3 + i);
+        double ulp = Math.ulp(Math.max(Math.abs(mesh.x(m)), Math.abs(mesh.y(m))));
+        double gap = Math.hypot(mesh.x(m) - 0.5 * (mesh.x(a) + mesh.x(b)), mesh.y(m) - 0.5 * (mesh.y(a) + mesh.y(b)));
+        if (gap <= 2 * ulp) {
+            return;
+        }
+        Circle circle = circleOf.get(m);
+        if (circle == null) {
+            problems.add("node " + m + " lies " + gap + " m off the middle of side " + i + " of triangle " + t);
+            return;
+        }
+        double off = Math.abs(circle.offset(mesh.x(m), mesh.y(m)));
+        double uneven = Math.abs(Math.hypot(mesh.x(m) - mesh.x(a), mesh.y(m) - mesh.y(a))
+                - Math.hypot(mesh.x(m) - mesh.x(b), mesh.y(m) - mesh.y(b)));
+        double allowed = 8 * ulp + 8 * Math.ulp(circle.radius());
+        if (!(off <= allowed && uneven <= allowed + 2 * section.snap())) {
+            problems.add("node " + m + " lies " + off + " m off the arc of side " + i + " of triangle " + t + ", and "
+                    + uneven + " m off its middle");
         }
     }
 }

@@ -11,6 +11,11 @@ import tepor.mesher.triangulation.Triangulation;
 
 /** Makes the mesh of a section. */
 public final class Mesher {
+    /** The parabola through three points of an arc that turns by this much leaves it by 9e-6 of its radius at most. */
+    private static final double TURN_OF_CURVED_SIDE = Math.toRadians(15);
+    /** A chord over this turn leaves its arc by 1e-3 of its radius at most. */
+    private static final double TURN_OF_STRAIGHT_SIDE = Math.toRadians(5);
+
     private Mesher() {}
 
     /**
@@ -23,12 +28,16 @@ public final class Mesher {
      * @throws java.util.concurrent.CancellationException if told to stop
      */
     public static MeshResult mesh(Section section, MeshOptions options, BooleanSupplier stopped) {
-        RefinementOptions refinement =
-                new RefinementOptions(options.smallestAngle(), options.size(), options.trianglesAtMost());
+        RefinementOptions refinement = new RefinementOptions(
+                options.smallestAngle(),
+                options.size(),
+                options.trianglesAtMost(),
+                options.nodesPerTriangle() == 6 ? TURN_OF_CURVED_SIDE : TURN_OF_STRAIGHT_SIDE);
         Predicates predicates = new Predicates();
         Triangulation triangulation = SectionTriangulator.triangulate(section, predicates);
         RefinementReport report = SectionRefiner.refine(triangulation, section, refinement, predicates, stopped);
-        Mesh mesh = MeshAssembler.assemble(triangulation, section, options.nodesPerTriangle());
-        return new MeshResult(mesh, QualityMeasure.measure(mesh, section), report);
+        MeshAssembler assembler = MeshAssembler.assemble(triangulation, section, options.nodesPerTriangle());
+        Mesh mesh = assembler.mesh();
+        return new MeshResult(mesh, QualityMeasure.measure(mesh, section), report.with(assembler.leftStraight()));
     }
 }

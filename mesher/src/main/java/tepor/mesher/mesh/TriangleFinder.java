@@ -1,27 +1,35 @@
 package tepor.mesher.mesh;
 
-import java.util.List;
 import org.locationtech.jts.geom.Envelope;
 import org.locationtech.jts.index.hprtree.HPRtree;
 
 /**
- * Finds the triangle in which a point lies: by walking from the last one found, and through a spatial index where the walk
- * leaves the mesh. Keeps the last find, so it is for one thread.
+ * Finds the triangle in which a point lies, straight or curved: by walking from the last one found, and through a spatial
+ * index where the walk leaves the mesh. Keeps the last find, so it is for one thread.
  */
 public final class TriangleFinder {
     private static final int WALK_AT_MOST = 64;
 
+    /** A point on a side may lie off both its triangles by rounding. */
+    private static final double ROUNDING = 1e-7;
+
+    /** How far a point may lie off the mesh, as a share of the mesh's width and height: as far as an arc off a coarse chord. */
+    private static final double FARTHEST = 1.0 / 16;
+
     private final Mesh mesh;
+    private final TriangleMap map;
     private HPRtree tree;
+    private double reach;
     private int last;
 
     public TriangleFinder(Mesh mesh) {
         this.mesh = mesh;
+        map = new TriangleMap(mesh);
     }
 
     /**
-     * The triangle in which the point lies, or, for a point just off the mesh, the one to which it is nearest in
-     * barycentric terms among those whose box it touches.
+     * The triangle in which the point lies, or, for a point off the mesh, the one to which it is nearest in barycentric
+     * terms among those whose box it touches, or else among those whose boxes are near.
      *
      * @param x metres
      * @param y metres
@@ -42,9 +50,18 @@ public final class TriangleFinder {
     private int walk(double x, double y, double[] l) {
         int t = last;
         for (int step = 0; step < WALK_AT_MOST && t != Mesh.NONE; step++) {
-            int worst = barycentric(t, x, y, l);
-            if (l[worst] >= 0) {
-                return t;
+            int worst;
+            if (mesh.isCurved(t)) {
+                map.moveTo(t);
+                if (map.contains(x, y) && map.locate(x, y, l)) {
+                    return t;
+                }
+                worst = map.worstSide(x, y);
+            } else {
+                worst = barycentric(t, x, y, l);
+                if (l[worst] >= 0) {
+                    return t;
+                }
             }
             t = mesh.neighbour(t, worst);
         }
@@ -53,33 +70,67 @@ public final class TriangleFinder {
 
     private int search(double x, double y, double[] l) {
         if (tree == null) {
-            tree = new HPRtree();
-            for (int t = 0; t < mesh.triangleCount(); t++) {
-                Envelope box = new Envelope();
-                for (int i = 0; i < 3; i++) {
-                    box.expandToInclude(mesh.x(mesh.node(t, i)), mesh.y(mesh.node(t, i)));
-                }
-                // A point on a side may lie off both its triangles by rounding.
-                box.expandBy(1e-7 * (box.getWidth() + box.getHeight()));
-                tree.insert(box, t);
-            }
-            tree.build();
+            build();
         }
-        List<?> near = tree.query(new Envelope(x, x, y, y));
+        Envelope box = new Envelope(x, x, y, y);
+        int best = best(box, x, y, l);
+        for (double more = ROUNDING; best == Mesh.NONE && more < FARTHEST; more *= 8) {
+            box.expandBy(more * reach);
+            best = best(box, x, y, l);
+        }
+        if (best != Mesh.NONE) {
+            map.moveTo(best);
+            map.locate(x, y, l);
+        }
+        return best;
+    }
+
+    private int best(Envelope box, double x, double y, double[] l) {
         int best = Mesh.NONE;
         double bestLeast = Double.NEGATIVE_INFINITY;
-        for (Object item : near) {
+        for (Object item : tree.query(box)) {
             int t = (Integer) item;
-            double least = l[barycentric(t, x, y, l)];
+            double least;
+            if (mesh.isCurved(t)) {
+                map.moveTo(t);
+                least = map.margin(x, y);
+            } else {
+                least = l[barycentric(t, x, y, l)];
+            }
             if (least > bestLeast || (least == bestLeast && t < best)) {
                 bestLeast = least;
                 best = t;
             }
         }
-        if (best != Mesh.NONE) {
-            barycentric(best, x, y, l);
-        }
         return best;
+    }
+
+    private void build() {
+        tree = new HPRtree();
+        Envelope all = new Envelope();
+        for (int t = 0; t < mesh.triangleCount(); t++) {
+            Envelope box = new Envelope();
+            for (int i = 0; i < 3; i++) {
+                box.expandToInclude(mesh.x(mesh.node(t, i)), mesh.y(mesh.node(t, i)));
+            }
+            for (int i = 3; i < 6 && mesh.isCurved(t); i++) {
+                includeBulge(t, i, box);
+            }
+            box.expandBy(ROUNDING * (box.getWidth() + box.getHeight()));
+            tree.insert(box, t);
+            all.expandToInclude(box);
+        }
+        tree.build();
+        reach = all.getWidth() + all.getHeight();
+    }
+
+    // A parabola lies within the triangle of its ends and the point twice as far off the chord as its middle.
+    private void includeBulge(int t, int middle, Envelope box) {
+        int a = mesh.node(t, (middle + 1) % 3);
+        int b = mesh.node(t, (middle + 2) % 3);
+        int m = mesh.node(t, middle);
+        box.expandToInclude(
+                2 * mesh.x(m) - 0.5 * (mesh.x(a) + mesh.x(b)), 2 * mesh.y(m) - 0.5 * (mesh.y(a) + mesh.y(b)));
     }
 
     /** Fills the barycentric coordinates and returns which is least. */

@@ -19,6 +19,22 @@ public interface Arcs {
         return line instanceof Arcs arcs ? arcs.circle(piece) : null;
     }
 
+    /** Area within a closed line, its arcs included, m²: positive where it runs counter-clockwise. */
+    static double signedArea(LineString ring) {
+        Coordinate[] points = ring.getCoordinates();
+        double area = 0;
+        for (int i = 1; i < points.length; i++) {
+            Coordinate a = points[i - 1];
+            Coordinate b = points[i];
+            area += 0.5 * ((a.x - points[0].x) * (b.y - points[0].y) - (b.x - points[0].x) * (a.y - points[0].y));
+            Circle circle = circle(ring, i - 1);
+            if (circle != null) {
+                area += circle.lens(a.x, a.y, b.x, b.y);
+            }
+        }
+        return area;
+    }
+
     /** The circles, after a look whether each piece has one or null. */
     static Circle[] checked(Coordinate[] points, Circle[] circle) {
         if (circle.length != Math.max(0, points.length - 1)) {

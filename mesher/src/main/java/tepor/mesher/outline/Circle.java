@@ -1,6 +1,7 @@
 package tepor.mesher.outline;
 
 import org.locationtech.jts.geom.Coordinate;
+import org.locationtech.jts.geom.Envelope;
 
 /**
  * The circle of which an arc is a piece. All pieces of one arc share the same circle, to the bit, whatever is laid over
@@ -46,6 +47,19 @@ public record Circle(double x, double y, double radius) {
         return 2 * radius * Math.asin(Math.min(1, 0.5 * chord / radius));
     }
 
+    /** Area between the shorter arc from a to b and its chord, m²: positive where the arc lies on the right of the chord. */
+    public double lens(double ax, double ay, double bx, double by) {
+        return 0.5 * radius * radius * lessSine(turn(ax, ay, bx, by));
+    }
+
+    /** φ − sin φ, without loss of digits where φ is small. */
+    private static double lessSine(double turn) {
+        double square = turn * turn;
+        return Math.abs(turn) > 0.1
+                ? turn - Math.sin(turn)
+                : turn * square / 6 * (1 - square / 20 * (1 - square / 42 * (1 - square / 72)));
+    }
+
     /** Point of the circle nearest to a place, metres; undefined for the centre itself. */
     public Coordinate nearest(double px, double py) {
         double dx = px - x;
@@ -57,5 +71,20 @@ public record Circle(double x, double y, double radius) {
     /** Signed distance of a place from the circle, metres: positive outside. */
     public double offset(double px, double py) {
         return Math.hypot(px - x, py - y) - radius;
+    }
+
+    /** Bounding box of the shorter arc from a to b, metres. */
+    public Envelope envelope(double ax, double ay, double bx, double by) {
+        Envelope box = new Envelope(ax, bx, ay, by);
+        double turn = turn(ax, ay, bx, by);
+        for (int i = 0; i < 4; i++) {
+            double px = x + (i == 0 ? radius : i == 1 ? -radius : 0);
+            double py = y + (i == 2 ? radius : i == 3 ? -radius : 0);
+            double toPoint = turn(ax, ay, px, py);
+            if (toPoint * turn > 0 && Math.abs(toPoint) < Math.abs(turn)) {
+                box.expandToInclude(px, py);
+            }
+        }
+        return box;
     }
 }

@@ -121,8 +121,21 @@ public final class PathBuilder {
 
     /** The path as a ring, an {@link ArcRing} where it has arcs; it must end where it began. */
     public LinearRing ring(GeometryFactory factory) {
+        halveArcsOfTwoPieces();
         Coordinate[] xy = points.toArray(new Coordinate[0]);
         return isStraight() ? factory.createLinearRing(xy) : new ArcRing(xy, circles(), factory);
+    }
+
+    // To JTS a ring of two chords would enclose nothing.
+    private void halveArcsOfTwoPieces() {
+        for (int i = circles.size() - 1; i >= 0 && points.size() < 5; i--) {
+            if (circles.get(i) != null) {
+                Coordinate a = points.get(i);
+                Coordinate b = points.get(i + 1);
+                points.add(i + 1, circles.get(i).middle(a.x, a.y, b.x, b.y));
+                circles.add(i, circles.get(i));
+            }
+        }
     }
 
     private boolean isStraight() {

@@ -1,5 +1,6 @@
 package tepor.mesher.refinement;
 
+import java.util.ArrayList;
 import java.util.List;
 
 /**
@@ -28,7 +29,16 @@ public record RefinementReport(List<Stop> stops) {
         /** A smaller triangle would fall below the smallest length that numbers of this extent can hold. */
         SIZE_FLOOR,
         /** The greatest number of triangles was reached. */
-        ELEMENT_LIMIT
+        ELEMENT_LIMIT,
+        /** A side that stands for a piece of an arc was left straight, as no valid triangle has it curved. */
+        ARC_LEFT_STRAIGHT
+    }
+
+    /** The same with more stops. */
+    public RefinementReport with(List<Stop> more) {
+        List<Stop> all = new ArrayList<>(stops);
+        all.addAll(more);
+        return new RefinementReport(all);
     }
 
     public long count(Reason reason) {

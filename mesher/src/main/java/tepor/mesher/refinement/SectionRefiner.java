@@ -1,6 +1,8 @@
 package tepor.mesher.refinement;
 
+import java.util.HashMap;
 import java.util.HashSet;
+import java.util.Map;
 import java.util.Set;
 import java.util.concurrent.CancellationException;
 import java.util.function.BooleanSupplier;
@@ -24,9 +26,13 @@ public final class SectionRefiner {
     /** Smallest length of a side in units in the last place of the coordinates. */
     private static final double SMALLEST_ULPS = 256;
 
+    /** How often the split of an arc waits for that of another. */
+    private static final int DELAYS_AT_MOST = 8;
+
     private static final int STEPS_BETWEEN_CHECKS = 1024;
 
     private final Triangulation mesh;
+    private final Section section;
     private final RefinementOptions options;
     private final BooleanSupplier stopped;
     private final Vertices vertices;
@@ -38,7 +44,9 @@ public final class SectionRefiner {
     private final PendingTriangles triangles;
     private final PendingSubsegments subsegments = new PendingSubsegments();
     private final Set<Long> unsplittable = new HashSet<>();
+    private final Map<Long, Integer> delays = new HashMap<>();
     private final double smallestLength;
+    private int steps;
 
     private SectionRefiner(
             Triangulation mesh,
@@ -47,13 +55,15 @@ public final class SectionRefiner {
             Predicates predicates,
             BooleanSupplier stopped) {
         this.mesh = mesh;
+        this.section = section;
         this.options = options;
         this.stopped = stopped;
         smallestLength = smallestLength(section);
         vertices = new Vertices(mesh, options.size());
         smallAngles = new SmallAngles(section);
         triangleRule = new TriangleRule(mesh, vertices, options);
-        subsegmentRule = new SubsegmentRule(mesh, vertices, options.size(), section, smallAngles, smallestLength);
+        subsegmentRule = new SubsegmentRule(
+                mesh, vertices, options.size(), section, smallAngles, smallestLength, options.greatestTurn());
         walk = new TriangleWalk(mesh, predicates);
         cavity = new Cavity(mesh, predicates);
         triangles = new PendingTriangles(section.extent());
@@ -92,18 +102,39 @@ public final class SectionRefiner {
         for (int t = 0; t < mesh.triangleCount(); t++) {
             checkTriangle(t);
         }
-        int steps = 0;
-        boolean limited = false;
+        boolean limited = refineQueued();
+        while (!limited && section.hasArcs() && queueBowed()) {
+            limited = refineQueued();
+        }
+        return StopFinder.find(mesh, vertices, triangleRule, smallAngles, limited);
+    }
+
+    /** Works until nothing waits; whether the greatest number of triangles ended it. */
+    private boolean refineQueued() {
         boolean busy = true;
-        while (busy && !limited) {
+        while (busy) {
             if (steps++ % STEPS_BETWEEN_CHECKS == 0 && stopped.getAsBoolean()) {
                 throw new CancellationException("meshing was told to stop");
             }
             // An interior vertex adds two triangles.
-            limited = mesh.triangleCount() + 2 > options.trianglesAtMost();
-            busy = !limited && (splitNextSubsegment() || betterNextTriangle());
+            if (mesh.triangleCount() + 2 > options.trianglesAtMost()) {
+                return true;
+            }
+            busy = splitNextSubsegment() || betterNextTriangle();
         }
-        return StopFinder.find(mesh, vertices, triangleRule, smallAngles, limited);
+        return false;
+    }
+
+    /** Queues arcs that bow too far for the triangles beside them; whether there are any. */
+    private boolean queueBowed() {
+        boolean found = false;
+        for (int side = 0; side < 3 * mesh.triangleCount(); side++) {
+            if (subsegmentRule.bowsTooFar(side) && !unsplittable.contains(key(side))) {
+                subsegments.add(side, mesh.version(side / 3));
+                found = true;
+            }
+        }
+        return found;
     }
 
     private void checkSubsegment(int side) {
@@ -130,13 +161,43 @@ public final class SectionRefiner {
         }
         if (mesh.version(side / 3) == subsegments.takenVersion() && !unsplittable.contains(key(side))) {
             int segment = mesh.constraint(side) / 2;
-            if (subsegmentRule.place(side) && cavity.digSplit(subsegmentRule.x(), subsegmentRule.y(), side)) {
+            if (!subsegmentRule.place(side)) {
+                unsplittable.add(key(side));
+            } else if (subsegmentRule.isArc(side)) {
+                splitArc(side, segment);
+            } else if (cavity.digSplit(subsegmentRule.x(), subsegmentRule.y(), side)) {
                 insert(subsegmentRule.x(), subsegmentRule.y(), segment);
             } else {
                 unsplittable.add(key(side));
             }
         }
         return true;
+    }
+
+    private void splitArc(int side, int segment) {
+        if (cavity.digAside(subsegmentRule.x(), subsegmentRule.y(), side)) {
+            insert(subsegmentRule.x(), subsegmentRule.y(), segment);
+            cavity.restore(this::checkAll);
+            return;
+        }
+        // Another arc's chord is in the way: that one is split first.
+        int hindrance = cavity.hindrance();
+        boolean wait = mesh.constraint(hindrance) >= 0
+                && !unsplittable.contains(key(hindrance))
+                && delays.merge(key(side), 1, Integer::sum) <= DELAYS_AT_MOST;
+        if (wait) {
+            subsegments.add(hindrance, mesh.version(hindrance / 3));
+            subsegments.add(side, mesh.version(side / 3));
+        } else {
+            unsplittable.add(key(side));
+        }
+    }
+
+    private void checkAll(int firstSide) {
+        for (int side = firstSide; side < firstSide + 3; side++) {
+            checkSubsegment(side);
+        }
+        checkTriangle(firstSide / 3);
     }
 
     private long key(int side) {
@@ -204,10 +265,7 @@ public final class SectionRefiner {
         cavity.fill(vertices.add(x, y, segment));
         for (int i = 0; i < cavity.borderCount(); i++) {
             int side = cavity.borderSide(i);
-            checkSubsegment(side);
-            checkSubsegment(side + 1);
-            checkSubsegment(side + 2);
-            checkTriangle(side / 3);
+            checkAll(side);
         }
     }
 }

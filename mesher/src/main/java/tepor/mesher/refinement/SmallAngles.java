@@ -6,6 +6,8 @@ import java.util.Comparator;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
+import tepor.mesher.outline.Circle;
 import tepor.mesher.section.Section;
 
 /**
@@ -14,23 +16,36 @@ import tepor.mesher.section.Section;
  * <p>There two rules keep refinement from running away: segments are cut at equal distances from the apex, and a sharp
  * triangle whose shortest side joins both segments at equal distance is left alone. Sources: Ruppert 1995, J. Algorithms
  * 18:548–585 (shells); Miller, Pav & Walkington 2003, <em>When and why Ruppert's algorithm works</em>, IMR (triangles left
- * alone). Segments that continue each other straight count as one line.
+ * alone). Segments that continue each other without a corner count as one line; angles at arcs are those of their tangents,
+ * or of their chords where these are smaller.
  */
 final class SmallAngles {
     private static final double SMALL = Math.PI / 3 - 1e-9;
     private static final double STRAIGHT = 1e-6;
     /** Distances from the apex that differ by less than this part are equal. */
     private static final double EQUAL = 1e-3;
+    /** The same where one of the lines is bent: halves of arcs between shells differ by their curvature. */
+    private static final double EQUAL_ON_ARCS = 0.05;
 
     private final Section section;
     private final int[] line;
     private final int[][] linesAt;
     private final boolean[] apexAtEnd;
     private final boolean[] sharpLine;
-    private final Map<Long, Integer> apexOf = new HashMap<>();
+    private final boolean[] bentLine;
+    private final Map<Long, int[]> apexesOf = new HashMap<>();
 
-    /** A segment as seen from one of its ends. */
-    private record Spoke(int segment, boolean outward, double direction) {}
+    /**
+     * A segment as seen from one of its ends.
+     *
+     * @param direction of its chord
+     * @param bend from its chord to its tangent, positive counter-clockwise; 0 for a straight segment
+     */
+    private record Spoke(int segment, boolean outward, double direction, double bend) {
+        double tangent() {
+            return direction + bend;
+        }
+    }
 
     SmallAngles(Section section) {
         this.section = section;
@@ -42,8 +57,10 @@ final class SmallAngles {
         linesAt = new int[section.vertexCount()][];
         List<List<Spoke>> spokes = spokes();
         spokes.forEach(this::joinStraight);
+        bentLine = new boolean[segments];
         for (int s = 0; s < segments; s++) {
             line[s] = root(s);
+            bentLine[line[s]] |= section.circle(s) != null;
         }
         for (int v = 0; v < spokes.size(); v++) {
             linesAt[v] = spokes.get(v).stream()
@@ -74,7 +91,7 @@ final class SmallAngles {
     boolean joinsShells(Vertices vertices, int p, int q) {
         int pSegment = vertices.carrier(p);
         int qSegment = vertices.carrier(q);
-        if (pSegment == Vertices.FREE || qSegment == Vertices.FREE || apexOf.isEmpty()) {
+        if (pSegment == Vertices.FREE || qSegment == Vertices.FREE || apexesOf.isEmpty()) {
             return false;
         }
         int pCount = pSegment >= 0 ? 1 : linesAt[p].length;
@@ -83,8 +100,8 @@ final class SmallAngles {
             int pLine = pSegment >= 0 ? line[pSegment] : linesAt[p][i];
             for (int j = 0; j < qCount; j++) {
                 int qLine = qSegment >= 0 ? line[qSegment] : linesAt[q][j];
-                Integer apex = pLine == qLine ? null : apexOf.get(pair(pLine, qLine));
-                if (apex != null && apex != p && apex != q && isEqual(vertices, apex, p, q)) {
+                int[] apexes = pLine == qLine ? null : apexesOf.get(pair(pLine, qLine));
+                if (apexes != null && isShell(vertices, apexes, pLine, qLine, p, q)) {
                     return true;
                 }
             }
@@ -92,10 +109,38 @@ final class SmallAngles {
         return false;
     }
 
-    private static boolean isEqual(Vertices vertices, int apex, int p, int q) {
-        double toP = vertices.distance(apex, p);
-        double toQ = vertices.distance(apex, q);
-        return Math.abs(toP - toQ) <= EQUAL * Math.max(toP, toQ);
+    /**
+     * Whether a vertex lies on another line than a segment, the two lines meet under a small angle somewhere, and one of them
+     * is bent.
+     */
+    boolean isBesideBend(Vertices vertices, int segment, int vertex) {
+        int carrier = vertices.carrier(vertex);
+        if (carrier == Vertices.FREE || apexesOf.isEmpty()) {
+            return false;
+        }
+        int own = line[segment];
+        int count = carrier >= 0 ? 1 : linesAt[vertex].length;
+        boolean beside = false;
+        for (int i = 0; i < count; i++) {
+            int other = carrier >= 0 ? line[carrier] : linesAt[vertex][i];
+            if (other == own) {
+                return false;
+            }
+            beside |= (bentLine[own] || bentLine[other]) && apexesOf.containsKey(pair(own, other));
+        }
+        return beside;
+    }
+
+    private boolean isShell(Vertices vertices, int[] apexes, int pLine, int qLine, int p, int q) {
+        double equal = bentLine[pLine] || bentLine[qLine] ? EQUAL_ON_ARCS : EQUAL;
+        for (int apex : apexes) {
+            double toP = vertices.distance(apex, p);
+            double toQ = vertices.distance(apex, q);
+            if (apex != p && apex != q && Math.abs(toP - toQ) <= equal * Math.max(toP, toQ)) {
+                return true;
+            }
+        }
+        return false;
     }
 
     private List<List<Spoke>> spokes() {
@@ -109,20 +154,37 @@ final class SmallAngles {
                 int b = section.end(s);
                 double dx = section.x(b) - section.x(a);
                 double dy = section.y(b) - section.y(a);
-                spokes.get(a).add(new Spoke(s, true, Math.atan2(dy, dx)));
-                spokes.get(b).add(new Spoke(s, false, Math.atan2(-dy, -dx)));
+                Circle circle = section.circle(s);
+                double half =
+                        circle == null ? 0 : 0.5 * circle.turn(section.x(a), section.y(a), section.x(b), section.y(b));
+                spokes.get(a).add(new Spoke(s, true, Math.atan2(dy, dx), -half));
+                spokes.get(b).add(new Spoke(s, false, Math.atan2(-dy, -dx), half));
             }
         }
         spokes.forEach(list -> list.sort(Comparator.comparingDouble(Spoke::direction)));
         return spokes;
     }
 
+    // Where a line touches a circle four spokes lie in line: each goes on in its own kind if it can.
     private void joinStraight(List<Spoke> spokes) {
+        boolean[] joined = new boolean[spokes.size()];
+        joinStraight(spokes, joined, true);
+        joinStraight(spokes, joined, false);
+    }
+
+    private void joinStraight(List<Spoke> spokes, boolean[] joined, boolean sameKind) {
         for (int i = 0; i < spokes.size(); i++) {
             for (int j = i + 1; j < spokes.size(); j++) {
-                double turn = spokes.get(j).direction() - spokes.get(i).direction();
-                if (Math.abs(turn - Math.PI) < STRAIGHT) {
-                    line[root(spokes.get(i).segment())] = root(spokes.get(j).segment());
+                Spoke a = spokes.get(i);
+                Spoke b = spokes.get(j);
+                Circle circle = section.circle(a.segment());
+                boolean same = Objects.equals(circle, section.circle(b.segment()));
+                double turn = Math.IEEEremainder(b.tangent() - a.tangent(), 2 * Math.PI);
+                boolean straight = (same && circle != null) || Math.abs(turn) > Math.PI - STRAIGHT;
+                if (straight && same == sameKind && !joined[i] && !joined[j]) {
+                    line[root(a.segment())] = root(b.segment());
+                    joined[i] = true;
+                    joined[j] = true;
                 }
             }
         }
@@ -133,7 +195,8 @@ final class SmallAngles {
             Spoke a = spokes.get(i);
             Spoke b = spokes.get((i + 1) % spokes.size());
             double turn = b.direction() - a.direction();
-            double angle = turn < 0 ? turn + 2 * Math.PI : turn;
+            double ofChords = turn < 0 ? turn + 2 * Math.PI : turn;
+            double angle = Math.min(ofChords, ofChords + b.bend() - a.bend());
             // Between a and b, counter-clockwise, lies what is on the left of a seen outward.
             boolean solid = a.outward() ? section.solidLeft(a.segment()) : section.solidRight(a.segment());
             if (angle < SMALL && solid) {
@@ -141,9 +204,15 @@ final class SmallAngles {
                 apexAtEnd[2 * b.segment() + (b.outward() ? 0 : 1)] = true;
                 sharpLine[line[a.segment()]] = true;
                 sharpLine[line[b.segment()]] = true;
-                apexOf.put(pair(line[a.segment()], line[b.segment()]), vertex);
+                apexesOf.merge(pair(line[a.segment()], line[b.segment()]), new int[] {vertex}, SmallAngles::joined);
             }
         }
+    }
+
+    private static int[] joined(int[] some, int[] more) {
+        int[] all = Arrays.copyOf(some, some.length + more.length);
+        System.arraycopy(more, 0, all, some.length, more.length);
+        return all;
     }
 
     private int root(int segment) {

@@ -1,5 +1,7 @@
 package tepor.mesher.refinement;
 
+import org.locationtech.jts.geom.Coordinate;
+import tepor.mesher.outline.Circle;
 import tepor.mesher.section.Section;
 import tepor.mesher.triangulation.Triangulation;
 
@@ -14,7 +16,9 @@ final class SubsegmentRule {
     private final Triangulation mesh;
     private final Vertices vertices;
     private final SizeField field;
+    private final Section section;
     private final SmallAngles smallAngles;
+    private final ArcRule arcRule;
     private final double shellUnit;
     private final double shortestPiece;
     private double x;
@@ -22,6 +26,7 @@ final class SubsegmentRule {
 
     /**
      * @param shortestPiece no piece becomes shorter than this, metres
+     * @param greatestTurn no piece of an arc turns by more than this, radians
      */
     SubsegmentRule(
             Triangulation mesh,
@@ -29,11 +34,14 @@ final class SubsegmentRule {
             SizeField field,
             Section section,
             SmallAngles smallAngles,
-            double shortestPiece) {
+            double shortestPiece,
+            double greatestTurn) {
         this.mesh = mesh;
         this.vertices = vertices;
         this.field = field;
+        this.section = section;
         this.smallAngles = smallAngles;
+        arcRule = new ArcRule(mesh, section, greatestTurn);
         shellUnit = section.extent();
         this.shortestPiece = shortestPiece;
     }
@@ -52,20 +60,37 @@ final class SubsegmentRule {
         return dot < -INSIDE * (dx * dx + dy * dy);
     }
 
-    /** Whether a subsegment must be split: it is too long, or the apex of a triangle at it encroaches. */
+    /** Whether a subsegment must be split: it is too long or too bent, or the apex of a triangle at it encroaches. */
     boolean isBad(int side) {
-        int apex = mesh.apex(side);
-        if (isEncroachedBy(side, mesh.x(apex), mesh.y(apex))) {
+        int other = mesh.twin(side);
+        if (isEncroachedByVertex(side, mesh.apex(side))
+                || (other >= 0 && isEncroachedByVertex(side, mesh.apex(other)))) {
             return true;
         }
-        int other = mesh.twin(side);
-        if (other >= 0) {
-            apex = mesh.apex(other);
-            if (isEncroachedBy(side, mesh.x(apex), mesh.y(apex))) {
-                return true;
-            }
+        return isLong(side) || arcRule.turnsTooFar(side);
+    }
+
+    /** Whether a subsegment must be split for the sake of curved triangles; see {@link ArcRule#bowsTooFar}. */
+    boolean bowsTooFar(int side) {
+        return arcRule.bowsTooFar(side);
+    }
+
+    /** Whether a subsegment is a piece of an arc, so that it is split off its chord. */
+    boolean isArc(int side) {
+        return section.circle(mesh.constraint(side) / 2) != null;
+    }
+
+    // In the narrow between an arc and a line that touches it, vertices of one always come close to the other; there
+    // only
+    // those count that lie between chord and arc.
+    private boolean isEncroachedByVertex(int side, int vertex) {
+        double x = mesh.x(vertex);
+        double y = mesh.y(vertex);
+        if (!isEncroachedBy(side, x, y)) {
+            return false;
         }
-        return isLong(side);
+        int segment = mesh.constraint(side) / 2;
+        return !smallAngles.isBesideBend(vertices, segment, vertex) || arcRule.isInLens(side, x, y);
     }
 
     /** Whether a subsegment is longer than the size wanted at its ends or its middle. */
@@ -93,11 +118,33 @@ final class SubsegmentRule {
         if (Math.min(part, 1 - part) * length < shortestPiece) {
             return false;
         }
-        x = mesh.x(a) + part * (mesh.x(b) - mesh.x(a));
-        y = mesh.y(a) + part * (mesh.y(b) - mesh.y(a));
+        Circle circle = section.circle(mesh.constraint(side) / 2);
+        if (circle == null) {
+            x = mesh.x(a) + part * (mesh.x(b) - mesh.x(a));
+            y = mesh.y(a) + part * (mesh.y(b) - mesh.y(a));
+        } else {
+            placeOn(circle, a, b, part);
+        }
         return true;
     }
 
+    private void placeOn(Circle circle, int a, int b, double part) {
+        if (part == 0.5) {
+            Coordinate middle = circle.middle(mesh.x(a), mesh.y(a), mesh.x(b), mesh.y(b));
+            x = middle.x;
+            y = middle.y;
+            return;
+        }
+        double angle = Math.atan2(mesh.y(a) - circle.y(), mesh.x(a) - circle.x()) + part * turn(circle, a, b);
+        x = circle.x() + circle.radius() * Math.cos(angle);
+        y = circle.y() + circle.radius() * Math.sin(angle);
+    }
+
+    private double turn(Circle circle, int a, int b) {
+        return circle.turn(mesh.x(a), mesh.y(a), mesh.x(b), mesh.y(b));
+    }
+
+    // The part of the length, of an arc that of the turn.
     private double part(int side, int a, int b, double length) {
         int segment = mesh.constraint(side) / 2;
         boolean atA = smallAngles.isApex(segment, a);
@@ -105,7 +152,11 @@ final class SubsegmentRule {
         if (atA != atB) {
             // The power of two that falls into the middle third.
             double shell = shellUnit * Math.scalb(1.0, Math.getExponent(length / 1.5 / shellUnit));
-            return atA ? shell / length : 1 - shell / length;
+            Circle circle = section.circle(segment);
+            double part = circle == null
+                    ? shell / length
+                    : 2 * Math.asin(0.5 * shell / circle.radius()) / Math.abs(turn(circle, a, b));
+            return atA ? part : 1 - part;
         }
         return smallAngles.isSharp(segment) ? 0.5 : evenPart(a, b, length);
     }

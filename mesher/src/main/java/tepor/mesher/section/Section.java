@@ -2,15 +2,22 @@ package tepor.mesher.section;
 
 import java.util.Arrays;
 import java.util.List;
+import java.util.Objects;
+import org.locationtech.jts.geom.Coordinate;
+import org.locationtech.jts.geom.Envelope;
+import tepor.mesher.outline.Circle;
 
 /**
  * The planar graph which the outlines make once overlaps are resolved: every border stands once, and knows what lies on
  * its left and right.
  *
  * <p>Vertices are numbered from 0 to {@link #vertexCount()} − 1, segments from 0 to {@link #segmentCount()} − 1. A segment
- * is straight and runs from {@link #start} to {@link #end}; no segment crosses or touches another except at a common
- * vertex, and none has the same region on both sides, or emptiness on both sides. Left and right are seen in the
- * segment's direction. Immutable.
+ * runs from {@link #start} to {@link #end}, straight or along the shorter arc of its {@link #circle}; no segment crosses or
+ * touches another except at a common vertex, and none has emptiness on both sides. Only a {@linkplain #isCut cut} has the
+ * same region on both sides. Left and right are seen in the segment's direction. Immutable.
+ *
+ * <p>The <em>lens</em> of an arc lies between it and its chord. An arc turns by at most 30°, and no vertex lies in its lens,
+ * unless the lens is thinner than snap; so the chords of all segments make the same graph as the segments themselves.
  */
 public final class Section {
     /** What lies beside a segment where no region does. */
@@ -18,6 +25,7 @@ public final class Section {
 
     private final double[] xy;
     private final int[] ends;
+    private final Circle[] circle;
     private final int[] sides;
     private final boolean[] outer;
     private final List<String> regionNames;
@@ -25,6 +33,8 @@ public final class Section {
     private final double snap;
 
     /**
+     * A section of straight segments.
+     *
      * @param xy 2·vertexCount coordinates, metres
      * @param ends 2·segmentCount vertices: start and end of each segment
      * @param sides 2·segmentCount regions: left and right of each segment; {@link #NONE} where there is none
@@ -41,8 +51,31 @@ public final class Section {
             List<String> regionNames,
             boolean[] hole,
             double snap) {
+        this(xy, ends, new Circle[ends.length / 2], sides, outer, regionNames, hole, snap);
+    }
+
+    /**
+     * @param xy 2·vertexCount coordinates, metres
+     * @param ends 2·segmentCount vertices: start and end of each segment
+     * @param circle for each segment the circle of which it is an arc; null where it is straight
+     * @param sides 2·segmentCount regions: left and right of each segment; {@link #NONE} where there is none
+     * @param outer for each segment, whether it lies on the outer boundary (emptiness joined to the far outside)
+     * @param regionNames names of all regions in the order they are laid, those of nothing among them
+     * @param hole for each region, whether it is of nothing
+     * @param snap distance below which two points are one, metres
+     */
+    public Section(
+            double[] xy,
+            int[] ends,
+            Circle[] circle,
+            int[] sides,
+            boolean[] outer,
+            List<String> regionNames,
+            boolean[] hole,
+            double snap) {
         this.xy = xy.clone();
         this.ends = ends.clone();
+        this.circle = circle.clone();
         this.sides = sides.clone();
         this.outer = outer.clone();
         this.regionNames = List.copyOf(regionNames);
@@ -74,6 +107,21 @@ public final class Section {
 
     public int end(int segment) {
         return ends[2 * segment + 1];
+    }
+
+    /** Circle of which the segment is an arc; null where it is straight. */
+    public Circle circle(int segment) {
+        return circle[segment];
+    }
+
+    /** Whether any segment is an arc. */
+    public boolean hasArcs() {
+        return Arrays.stream(circle).anyMatch(Objects::nonNull);
+    }
+
+    /** Whether the segment lies within a region: a line made part of the mesh for asks only. */
+    public boolean isCut(int segment) {
+        return left(segment) == right(segment);
     }
 
     /** Region on the left of the segment (a region of nothing, too), or {@link #NONE}. */
@@ -110,9 +158,37 @@ public final class Section {
         return outer[segment];
     }
 
-    /** Metres. */
+    /** Length of the segment, along its arc if it is one, metres. */
     public double length(int segment) {
+        double chord = chord(segment);
+        return circle[segment] == null ? chord : circle[segment].arcLength(chord);
+    }
+
+    /** Distance between the ends of the segment, metres. */
+    public double chord(int segment) {
         return Math.hypot(x(end(segment)) - x(start(segment)), y(end(segment)) - y(start(segment)));
+    }
+
+    /** Middle of the segment, on its arc if it is one, metres. */
+    public Coordinate middle(int segment) {
+        int a = start(segment);
+        int b = end(segment);
+        return circle[segment] == null
+                ? new Coordinate(0.5 * (x(a) + x(b)), 0.5 * (y(a) + y(b)))
+                : circle[segment].middle(x(a), y(a), x(b), y(b));
+    }
+
+    /**
+     * Area between the chord of the segment and its arc, m²: positive where the arc lies on the right of the chord (the
+     * region on the left gains it), 0 for a straight segment.
+     */
+    public double lens(int segment) {
+        if (circle[segment] == null) {
+            return 0;
+        }
+        int a = start(segment);
+        int b = end(segment);
+        return circle[segment].lens(x(a), y(a), x(b), y(b));
     }
 
     public int regionCount() {
@@ -138,17 +214,19 @@ public final class Section {
         if (isHole(region) && !isClosed(region)) {
             return Double.NaN;
         }
-        // Coordinates are taken relative to one vertex, so that a section far from the origin loses no digits.
-        double x0 = x(0);
-        double y0 = y(0);
+        // Coordinates are taken relative to one vertex of the region, so that a small one far from the origin loses no
+        // digits.
+        int base = NONE;
         double twice = 0;
         for (int s = 0; s < segmentCount(); s++) {
-            double cross = (x(start(s)) - x0) * (y(end(s)) - y0) - (x(end(s)) - x0) * (y(start(s)) - y0);
-            if (left(s) == region) {
-                twice += cross;
-            } else if (right(s) == region) {
-                twice -= cross;
+            if (isCut(s) || (left(s) != region && right(s) != region)) {
+                continue;
             }
+            base = base == NONE ? start(s) : base;
+            double x0 = x(base);
+            double y0 = y(base);
+            double cross = (x(start(s)) - x0) * (y(end(s)) - y0) - (x(end(s)) - x0) * (y(start(s)) - y0) + 2 * lens(s);
+            twice += left(s) == region ? cross : -cross;
         }
         return 0.5 * twice;
     }
@@ -157,7 +235,7 @@ public final class Section {
     private boolean isClosed(int region) {
         int[] leaving = new int[vertexCount()];
         for (int s = 0; s < segmentCount(); s++) {
-            int sign = left(s) == region ? 1 : right(s) == region ? -1 : 0;
+            int sign = isCut(s) ? 0 : left(s) == region ? 1 : right(s) == region ? -1 : 0;
             leaving[start(s)] += sign;
             leaving[end(s)] -= sign;
         }
@@ -176,15 +254,23 @@ public final class Section {
         };
         for (int s = 0; s < segmentCount(); s++) {
             if (solidLeft(s) || solidRight(s)) {
-                for (int v : new int[] {start(s), end(s)}) {
-                    box[0] = Math.min(box[0], x(v));
-                    box[1] = Math.min(box[1], y(v));
-                    box[2] = Math.max(box[2], x(v));
-                    box[3] = Math.max(box[3], y(v));
-                }
+                Envelope reach = envelope(s);
+                box[0] = Math.min(box[0], reach.getMinX());
+                box[1] = Math.min(box[1], reach.getMinY());
+                box[2] = Math.max(box[2], reach.getMaxX());
+                box[3] = Math.max(box[3], reach.getMaxY());
             }
         }
         return box;
+    }
+
+    /** Bounding box of a segment, its arc included, metres. */
+    public Envelope envelope(int segment) {
+        int a = start(segment);
+        int b = end(segment);
+        return circle[segment] == null
+                ? new Envelope(x(a), x(b), y(a), y(b))
+                : circle[segment].envelope(x(a), y(a), x(b), y(b));
     }
 
     /** Diagonal of the bounding box of the material, metres: the length to which tolerances refer. */

@@ -6,6 +6,7 @@ import java.util.List;
 import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Envelope;
 import org.locationtech.jts.index.hprtree.HPRtree;
+import tepor.mesher.outline.Circle;
 
 /** Makes the section from faces and their owners: keeps what separates something, and splits it where asked. */
 final class SectionAssembler {
@@ -19,9 +20,13 @@ final class SectionAssembler {
     private final List<Piece> pieces = new ArrayList<>();
 
     /** A segment to be. */
-    private record Piece(int start, int end, int left, int right, boolean outer) {
+    private record Piece(int start, int end, Circle circle, int left, int right, boolean outer) {
         Piece reversed() {
-            return new Piece(/* start= */ end, /* end= */ start, /* left= */ right, /* right= */ left, outer);
+            return new Piece(/* start= */ end, /* end= */ start, circle, /* left= */ right, /* right= */ left, outer);
+        }
+
+        Piece part(int newStart, int newEnd) {
+            return new Piece(newStart, newEnd, circle, left, right, outer);
         }
     }
 
@@ -60,17 +65,19 @@ final class SectionAssembler {
             int right = owners.owner(2 * e + 1);
             boolean emptyLeft = isEmpty(left);
             boolean emptyRight = isEmpty(right);
-            if (left != right && !(emptyLeft && emptyRight)) {
+            boolean parts = left != right || borders.get(e).cut;
+            if (parts && !(emptyLeft && emptyRight)) {
                 boolean outer = (emptyLeft && joined.find(faces.face(2 * e)) == outside)
                         || (emptyRight && joined.find(faces.face(2 * e + 1)) == outside);
-                pieces.add(new Piece(borders.get(e).a, borders.get(e).b, left, right, outer));
+                Border border = borders.get(e);
+                pieces.add(new Piece(border.a, border.b, border.circle, left, right, outer));
             }
         }
     }
 
     /**
      * Joins pieces in line that meet where a hidden border crosses theirs: that vertex was never drawn, and would only make
-     * the mesh finer for no reason.
+     * the mesh finer for no reason. Parts of an arc stay apart: the lens of both together may hold a vertex.
      */
     private void joinAtHiddenCrossings() {
         int[][] at = new int[vertices.count()][]; // pieces at each vertex that is a crossing
@@ -102,7 +109,11 @@ final class SectionAssembler {
     /** The piece p followed (or preceded) by q through vertex v, in p's direction; null if they do not make one. */
     private Piece join(Piece p, Piece q, int v) {
         Piece along = (p.end() == v) == (q.start() == v) ? q : q.reversed();
-        if (along.left() != p.left() || along.right() != p.right() || along.outer() != p.outer()) {
+        if (p.circle() != null
+                || q.circle() != null
+                || along.left() != p.left()
+                || along.right() != p.right()
+                || along.outer() != p.outer()) {
             return null;
         }
         int start = p.end() == v ? p.start() : along.start();
@@ -112,7 +123,7 @@ final class SectionAssembler {
         double length = Math.hypot(dx, dy);
         double offset = Math.abs(dx * (vertices.y(v) - vertices.y(start)) - dy * (vertices.x(v) - vertices.x(start)));
         boolean inLine = offset <= 1e-3 * snap * length && length > distance(start, v) && length > distance(v, end);
-        return inLine ? new Piece(start, end, p.left(), p.right(), p.outer()) : null;
+        return inLine ? p.part(start, end) : null;
     }
 
     private double distance(int u, int v) {
@@ -122,8 +133,7 @@ final class SectionAssembler {
     private void split(List<Coordinate> points) {
         HPRtree index = new HPRtree();
         for (int p = 0; p < pieces.size(); p++) {
-            Envelope envelope = envelope(pieces.get(p));
-            index.insert(envelope, p);
+            index.insert(envelope(pieces.get(p)), p);
         }
         double[][] cuts = new double[pieces.size()][]; // distances from each piece's start
         for (Coordinate point : points) {
@@ -135,8 +145,7 @@ final class SectionAssembler {
                 int p = (Integer) item;
                 double distance = Math.abs(offset(pieces.get(p), point));
                 double along = along(pieces.get(p), point);
-                double length = distance(pieces.get(p).start(), pieces.get(p).end());
-                if (distance <= best[0] && along > -snap && along < length + snap) {
+                if (distance <= best[0] && along > -snap && along < length(pieces.get(p)) + snap) {
                     best[0] = distance;
                     nearest[0] = p;
                 }
@@ -153,9 +162,8 @@ final class SectionAssembler {
     }
 
     private void addCut(double[][] cuts, int p, double along) {
-        double length = distance(pieces.get(p).start(), pieces.get(p).end());
         double[] old = cuts[p] == null ? new double[0] : cuts[p];
-        boolean apart = along > snap && along < length - snap;
+        boolean apart = along > snap && along < length(pieces.get(p)) - snap;
         for (double other : old) {
             apart &= Math.abs(other - along) > snap;
         }
@@ -167,19 +175,17 @@ final class SectionAssembler {
 
     private void cut(int p, double[] along) {
         Piece whole = pieces.get(p);
-        double x0 = vertices.x(whole.start());
-        double y0 = vertices.y(whole.start());
-        double dx = vertices.x(whole.end()) - x0;
-        double dy = vertices.y(whole.end()) - y0;
-        double length = Math.hypot(dx, dy);
+        double length = length(whole);
         double[] sorted = along.clone();
         Arrays.sort(sorted);
         int before = whole.start();
         for (int i = 0; i <= sorted.length; i++) {
-            int after = i == sorted.length
-                    ? whole.end()
-                    : vertices.add(x0 + sorted[i] / length * dx, y0 + sorted[i] / length * dy);
-            Piece part = new Piece(before, after, whole.left(), whole.right(), whole.outer());
+            int after = whole.end();
+            if (i < sorted.length) {
+                Coordinate at = at(whole, sorted[i] / length);
+                after = vertices.add(at.x, at.y);
+            }
+            Piece part = whole.part(before, after);
             if (i == 0) {
                 pieces.set(p, part);
             } else {
@@ -189,22 +195,62 @@ final class SectionAssembler {
         }
     }
 
-    private Envelope envelope(Piece piece) {
-        return new Envelope(
-                vertices.x(piece.start()), vertices.x(piece.end()), vertices.y(piece.start()), vertices.y(piece.end()));
+    /** The point at a part of the length of a piece. */
+    private Coordinate at(Piece piece, double part) {
+        double x0 = vertices.x(piece.start());
+        double y0 = vertices.y(piece.start());
+        Circle circle = piece.circle();
+        if (circle == null) {
+            return new Coordinate(
+                    x0 + part * (vertices.x(piece.end()) - x0), y0 + part * (vertices.y(piece.end()) - y0));
+        }
+        double angle = Math.atan2(y0 - circle.y(), x0 - circle.x()) + part * turn(piece);
+        return new Coordinate(
+                circle.x() + circle.radius() * Math.cos(angle), circle.y() + circle.radius() * Math.sin(angle));
     }
 
+    private double turn(Piece arc) {
+        return arc.circle().turn(x(arc.start()), y(arc.start()), x(arc.end()), y(arc.end()));
+    }
+
+    private double x(int vertex) {
+        return vertices.x(vertex);
+    }
+
+    private double y(int vertex) {
+        return vertices.y(vertex);
+    }
+
+    private Envelope envelope(Piece piece) {
+        return piece.circle() == null
+                ? new Envelope(x(piece.start()), x(piece.end()), y(piece.start()), y(piece.end()))
+                : piece.circle().envelope(x(piece.start()), y(piece.start()), x(piece.end()), y(piece.end()));
+    }
+
+    private double length(Piece piece) {
+        double chord = distance(piece.start(), piece.end());
+        return piece.circle() == null ? chord : piece.circle().arcLength(chord);
+    }
+
+    /** How far along a piece a point lies, from its start. */
     private double along(Piece piece, Coordinate point) {
-        double dx = vertices.x(piece.end()) - vertices.x(piece.start());
-        double dy = vertices.y(piece.end()) - vertices.y(piece.start());
-        double dot = dx * (point.x - vertices.x(piece.start())) + dy * (point.y - vertices.y(piece.start()));
+        if (piece.circle() != null) {
+            double toPoint = piece.circle().turn(x(piece.start()), y(piece.start()), point.x, point.y);
+            return Math.copySign(1, turn(piece)) * toPoint * piece.circle().radius();
+        }
+        double dx = x(piece.end()) - x(piece.start());
+        double dy = y(piece.end()) - y(piece.start());
+        double dot = dx * (point.x - x(piece.start())) + dy * (point.y - y(piece.start()));
         return dot / Math.hypot(dx, dy);
     }
 
     private double offset(Piece piece, Coordinate point) {
-        double dx = vertices.x(piece.end()) - vertices.x(piece.start());
-        double dy = vertices.y(piece.end()) - vertices.y(piece.start());
-        double cross = dx * (point.y - vertices.y(piece.start())) - dy * (point.x - vertices.x(piece.start()));
+        if (piece.circle() != null) {
+            return piece.circle().offset(point.x, point.y);
+        }
+        double dx = x(piece.end()) - x(piece.start());
+        double dy = y(piece.end()) - y(piece.start());
+        double cross = dx * (point.y - y(piece.start())) - dy * (point.x - x(piece.start()));
         return cross / Math.hypot(dx, dy);
     }
 
@@ -224,6 +270,7 @@ final class SectionAssembler {
             }
         }
         int[] ends = new int[2 * pieces.size()];
+        Circle[] circles = new Circle[pieces.size()];
         int[] sides = new int[2 * pieces.size()];
         boolean[] outer = new boolean[pieces.size()];
         boolean[] hole = new boolean[shapes.size()];
@@ -231,6 +278,7 @@ final class SectionAssembler {
             Piece piece = pieces.get(p);
             ends[2 * p] = number[piece.start()];
             ends[2 * p + 1] = number[piece.end()];
+            circles[p] = piece.circle();
             sides[2 * p] = piece.left();
             sides[2 * p + 1] = piece.right();
             outer[p] = piece.outer();
@@ -239,6 +287,6 @@ final class SectionAssembler {
             hole[r] = shapes.get(r).hole();
         }
         List<String> names = shapes.stream().map(RegionShape::name).toList();
-        return new Section(Arrays.copyOf(xy, 2 * count), ends, sides, outer, names, hole, snap);
+        return new Section(Arrays.copyOf(xy, 2 * count), ends, circles, sides, outer, names, hole, snap);
     }
 }

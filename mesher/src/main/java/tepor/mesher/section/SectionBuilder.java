@@ -7,6 +7,7 @@ import java.util.Optional;
 import java.util.stream.Collectors;
 import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Envelope;
+import org.locationtech.jts.geom.LineString;
 import tepor.mesher.outline.DrawingUnit;
 import tepor.mesher.outline.Findings;
 import tepor.mesher.outline.Place;
@@ -40,13 +41,19 @@ public final class SectionBuilder {
      *
      * @param shapes regions in the order they are laid: later ones lie over earlier ones, and cut them
      * @param splitPoints points (metres) at which a segment they lie on, within snap, is split
+     * @param cuts lines (metres) made part of the section where they run through material
      * @param snap distance below which two points are one, metres; NaN for 1e-7 of the extent
      * @param unit the drawing's unit, for coordinates in messages
      * @param findings takes what is wrong, and warnings
      * @return the section; empty where something was wrong
      */
     public static Optional<Section> build(
-            List<RegionShape> shapes, List<Coordinate> splitPoints, double snap, DrawingUnit unit, Findings findings) {
+            List<RegionShape> shapes,
+            List<Coordinate> splitPoints,
+            List<LineString> cuts,
+            double snap,
+            DrawingUnit unit,
+            Findings findings) {
         if (shapes.stream().allMatch(RegionShape::hole)) {
             Place place = shapes.isEmpty() ? new Place("", 0, 0) : shapes.get(0).place();
             String what = shapes.isEmpty() ? "the section has no region" : "all regions are of nothing";
@@ -60,11 +67,11 @@ public final class SectionBuilder {
                 Math.max(Math.abs(all.getMinX()), Math.abs(all.getMaxX())),
                 Math.max(Math.abs(all.getMinY()), Math.abs(all.getMaxY())));
         double used = Math.max(wanted, LEAST_SNAP_IN_ULPS * Math.ulp(largest));
-        return new SectionBuilder(shapes, used, unit, findings).build(splitPoints);
+        return new SectionBuilder(shapes, used, unit, findings).build(splitPoints, cuts);
     }
 
-    private Optional<Section> build(List<Coordinate> splitPoints) {
-        BorderNoder noder = new BorderNoder(shapes, snap);
+    private Optional<Section> build(List<Coordinate> splitPoints, List<LineString> cuts) {
+        BorderNoder noder = new BorderNoder(shapes, cuts, snap);
         if (!noder.node()) {
             findings.error(
                     "snap-too-coarse",

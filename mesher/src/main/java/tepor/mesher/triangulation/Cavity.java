@@ -1,6 +1,7 @@
 package tepor.mesher.triangulation;
 
 import java.util.Arrays;
+import java.util.function.IntConsumer;
 
 /**
  * The hole that a new vertex makes in a constrained Delaunay triangulation, and its filling by a fan of triangles.
@@ -36,6 +37,10 @@ public final class Cavity {
     /** Whether the split segment has triangles on one side only, so that the border does not close. */
     private boolean open;
 
+    /** Whether the point lies off the segment that it splits. */
+    private boolean aside;
+
+    private int hindrance = Triangulation.NONE;
     private int leftCode;
     private int rightCode;
 
@@ -87,6 +92,85 @@ public final class Cavity {
         }
         collect();
         return true;
+    }
+
+    /**
+     * Digs the cavity of a point that splits a constrained side, but lies off it, as the middle of an arc lies off its
+     * chord. The cavity also takes in what hides the point from its border; the fan need not be Delaunay, so
+     * {@link #restore} must follow {@link #fill}.
+     *
+     * @return false if a constrained side, {@link #hindrance}, hides the point: then it must not be inserted
+     */
+    public boolean digAside(double x, double y, int side) {
+        int other = mesh.twin[side];
+        begin(x, y);
+        aside = true;
+        open = other < 0;
+        leftCode = mesh.constraint[side];
+        rightCode = open ? Triangulation.NONE : mesh.constraint[other];
+        take(side / 3);
+        if (!open) {
+            take(other / 3);
+        }
+        push(Triangulation.previous(side));
+        push(Triangulation.next(side));
+        run();
+        firstPart = borderCount;
+        if (!open) {
+            push(Triangulation.previous(other));
+            push(Triangulation.next(other));
+            run();
+        }
+        aside = false;
+        for (int i = 0; i < borderCount; i++) {
+            if (!sideSees(x, y, border[i])) {
+                hindrance = border[i];
+                return false;
+            }
+        }
+        collect();
+        return true;
+    }
+
+    /** The side that made {@link #digAside} fail. */
+    public int hindrance() {
+        return hindrance;
+    }
+
+    /**
+     * Makes the triangulation constrained Delaunay again by flips (Lawson 1977), after {@link #digAside} and {@link #fill}.
+     *
+     * @param changed called with the first side of each triangle that a flip changed
+     */
+    public void restore(IntConsumer changed) {
+        depth = 0;
+        for (int i = 0; i < borderCount; i++) {
+            push(border[i]);
+            push(border[i] + 1);
+        }
+        while (depth > 0) {
+            int side = stack[--depth];
+            int other = mesh.twin[side];
+            if (other < 0 || mesh.constraint[side] >= 0) {
+                continue;
+            }
+            int q = mesh.apex(other);
+            int a = mesh.apex(side);
+            int b = mesh.origin(side);
+            int c = mesh.destination(side);
+            if (predicates.inCircle(
+                            mesh.x(a), mesh.y(a), mesh.x(b), mesh.y(b), mesh.x(c), mesh.y(c), mesh.x(q), mesh.y(q))
+                    > 0) {
+                mesh.flip(side);
+                for (int t : new int[] {side / 3, other / 3}) {
+                    mesh.version[t]++;
+                    changed.accept(3 * t);
+                    push(3 * t);
+                    push(3 * t + 1);
+                    push(3 * t + 2);
+                }
+            }
+        }
     }
 
     /** Number of sides around the cavity, counter-clockwise; also the number of triangles which {@link #fill} makes. */
@@ -181,7 +265,10 @@ public final class Cavity {
         while (depth > 0) {
             int side = stack[--depth];
             int other = twin[side];
-            if (other >= 0 && constraint[side] < 0 && seen[other / 3] != epoch && inConflict(other / 3)) {
+            if (other >= 0
+                    && constraint[side] < 0
+                    && seen[other / 3] != epoch
+                    && (inConflict(other / 3) || (aside && !sideSees(px, py, side)))) {
                 take(other / 3);
                 push(Triangulation.previous(other));
                 push(Triangulation.next(other));

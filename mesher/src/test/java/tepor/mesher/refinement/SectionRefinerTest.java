@@ -19,7 +19,8 @@ class SectionRefinerTest {
         Predicates predicates = new Predicates();
         Triangulation mesh = SectionTriangulator.triangulate(section, predicates);
         assertThat(DelaunayCheck.problems(mesh)).isEmpty();
-        RefinementOptions options = new RefinementOptions(Math.toRadians(28), (x, y) -> 0.05, 100_000);
+        RefinementOptions options =
+                new RefinementOptions(Math.toRadians(28), (x, y) -> 0.05, 100_000, Math.toRadians(15));
         SectionRefiner.refine(mesh, section, options, predicates, () -> false);
         assertThat(DelaunayCheck.problems(mesh)).isEmpty();
     }

@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Optional;
 import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Geometry;
+import org.locationtech.jts.geom.LineString;
 import org.locationtech.jts.io.ParseException;
 import org.locationtech.jts.io.WKTReader;
 import tepor.mesher.outline.DrawingUnit;
@@ -20,6 +21,7 @@ final class Drawn {
 
     private final List<RegionShape> shapes = new ArrayList<>();
     private final List<Coordinate> splits = new ArrayList<>();
+    private final List<LineString> cuts = new ArrayList<>();
     private double snap = Double.NaN;
     final Findings findings = new Findings();
 
@@ -59,7 +61,7 @@ final class Drawn {
     }
 
     Optional<Section> tryBuild() {
-        return SectionBuilder.build(shapes, splits, snap, METRE, findings);
+        return SectionBuilder.build(shapes, splits, cuts, snap, METRE, findings);
     }
 
     /** The section, audited. */

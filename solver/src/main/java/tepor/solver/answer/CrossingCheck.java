@@ -3,6 +3,7 @@ package tepor.solver.answer;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import tepor.mesher.mesh.SegmentCurve;
 import tepor.mesher.outline.Finding;
 import tepor.mesher.section.Section;
 import tepor.solver.assembly.Tensor;
@@ -53,10 +54,7 @@ final class CrossingCheck {
     private static boolean isCheckerboard(Case subject, int v, List<Integer> segments) {
         Section section = subject.section();
         List<Integer> turned = new ArrayList<>(segments);
-        turned.sort(Comparator.comparingDouble(s -> {
-            int other = section.start(s) == v ? section.end(s) : section.start(s);
-            return Math.atan2(section.y(other) - section.y(v), section.x(other) - section.x(v));
-        }));
+        turned.sort(Comparator.comparingDouble(s -> SegmentCurve.direction(section, s, section.start(s) == v)));
         double[] k = new double[4];
         for (int i = 0; i < 4; i++) {
             int s = turned.get(i);

@@ -6,6 +6,7 @@ import java.util.Deque;
 import java.util.TreeSet;
 import java.util.stream.Collectors;
 import tepor.mesher.mesh.Mesh;
+import tepor.mesher.mesh.TriangleMap;
 import tepor.mesher.outline.Findings;
 import tepor.solver.model.Case;
 import tepor.solver.model.Edge;
@@ -61,12 +62,11 @@ final class FloatingPartCheck {
             }
         }
         if (!isTied) {
-            double x = 0;
-            double y = 0;
-            for (int i = 0; i < 3; i++) {
-                x += mesh.x(mesh.node(first, i)) / 3;
-                y += mesh.y(mesh.node(first, i)) / 3;
-            }
+            TriangleMap map = new TriangleMap(mesh);
+            map.moveTo(first);
+            double third = 1.0 / 3;
+            double x = map.x(third, third, third);
+            double y = map.y(third, third, third);
             String names = regions.stream()
                     .map(r -> "'" + subject.regions().get(r).name() + "'")
                     .collect(Collectors.joining(", "));

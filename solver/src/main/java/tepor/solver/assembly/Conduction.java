@@ -13,12 +13,15 @@ import tepor.solver.model.Values;
 
 /** Conduction in every region: ∫ ∇Nᵢ · k∇T. */
 public final class Conduction implements Contribution {
+    /** In curved triangles the integrand is rational. Degree 2 would keep the order; this makes the quadrature's error small. */
+    private static final TriangleQuadrature CURVED = TriangleQuadrature.ofDegree(6);
+
     private final Mesh mesh;
     private final List<Region> regions;
     private final Values values;
     private final Tensor[] tensor;
     private final TriangleShape shape;
-    private final TriangleQuadrature quadrature;
+    private final TriangleQuadrature straight;
 
     public Conduction(Mesh mesh, List<Region> regions, Values values) {
         this.mesh = mesh;
@@ -30,7 +33,7 @@ public final class Conduction implements Contribution {
                     region.isHole() ? null : Tensor.of(region.material().conductivity(), values);
         }
         shape = TriangleShapes.of(mesh.nodesPerTriangle());
-        quadrature = TriangleQuadrature.ofDegree(shape.stiffnessDegree());
+        straight = TriangleQuadrature.ofDegree(shape.stiffnessDegree());
     }
 
     /** Conductivity of a region, W/(m·K). */
@@ -72,6 +75,10 @@ public final class Conduction implements Contribution {
         }
     }
 
+    private TriangleQuadrature quadrature(int triangle) {
+        return mesh.isCurved(triangle) ? CURVED : straight;
+    }
+
     /** Adds ∫ ∇Nᵢ · k∇T with the given tensors; a region whose tensor is null adds nothing. */
     private void addFluxResidual(double[] kelvin, Tensor[] k, double[] residual) {
         int n = shape.nodeCount();
@@ -85,6 +92,7 @@ public final class Conduction implements Contribution {
                 continue;
             }
             geometry.moveTo(t);
+            TriangleQuadrature quadrature = quadrature(t);
             // Differences to one node: a uniform temperature leaves exactly nothing, whatever its level.
             double level = kelvin[mesh.node(t, 0)];
             for (int p = 0; p < quadrature.pointCount(); p++) {
@@ -97,7 +105,7 @@ public final class Conduction implements Contribution {
                     tx += u * gx[j];
                     ty += u * gy[j];
                 }
-                double weight = quadrature.weight()[p] * geometry.area();
+                double weight = quadrature.weight()[p] * geometry.areaElement();
                 double fx = weight * (kt.xx() * tx + kt.xy() * ty);
                 double fy = weight * (kt.xy() * tx + kt.yy() * ty);
                 for (int i = 0; i < n; i++) {
@@ -118,11 +126,12 @@ public final class Conduction implements Contribution {
         for (int t = 0; t < mesh.triangleCount(); t++) {
             Tensor kt = tensor[mesh.region(t)];
             geometry.moveTo(t);
+            TriangleQuadrature quadrature = quadrature(t);
             Arrays.fill(entries, 0);
             for (int p = 0; p < quadrature.pointCount(); p++) {
                 shape.slopes(quadrature.l0()[p], quadrature.l1()[p], quadrature.l2()[p], slopes);
                 geometry.gradients(slopes, n, gx, gy);
-                double weight = quadrature.weight()[p] * geometry.area();
+                double weight = quadrature.weight()[p] * geometry.areaElement();
                 for (int j = 0; j < n; j++) {
                     double fx = weight * (kt.xx() * gx[j] + kt.xy() * gy[j]);
                     double fy = weight * (kt.xy() * gx[j] + kt.yy() * gy[j]);

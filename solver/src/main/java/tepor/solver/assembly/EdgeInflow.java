@@ -1,6 +1,8 @@
 package tepor.solver.assembly;
 
 import tepor.mesher.mesh.Mesh;
+import tepor.solver.element.FacetGeometry;
+import tepor.solver.element.ShapeIntegrals;
 import tepor.solver.model.EdgeCondition;
 import tepor.solver.model.Input;
 
@@ -29,7 +31,9 @@ public final class EdgeInflow extends FacetEffect {
 
     @Override
     public double heatIn(double[] kelvin, int facet) {
-        return flux * mesh.facetLength(facet);
+        FacetGeometry geometry = new FacetGeometry(mesh);
+        geometry.moveTo(facet);
+        return flux * geometry.length();
     }
 
     @Override
@@ -50,14 +54,12 @@ public final class EdgeInflow extends FacetEffect {
     }
 
     private void add(double q, double[] residual) {
+        ShapeIntegrals integrals = new ShapeIntegrals(mesh);
+        double[] length = new double[nodesPerFacet];
         for (int facet : facets) {
-            double heat = q * mesh.facetLength(facet);
-            for (int i = 0; i < shape.nodeCount(); i++) {
-                double share = 0;
-                for (int p = 0; p < shape.pointCount(); p++) {
-                    share += shape.weight(p) * shape.value(p, i);
-                }
-                residual[slot(mesh, facet, i)] += heat * share;
+            integrals.overFacet(facet, length);
+            for (int i = 0; i < nodesPerFacet; i++) {
+                residual[slot(mesh, facet, i)] += q * length[i];
             }
         }
     }

@@ -1,13 +1,12 @@
 package tepor.solver.assembly;
 
 import tepor.mesher.mesh.Mesh;
-import tepor.solver.element.SideShape;
 
 /** What effects on boundary facets have in common: which facets, and where their nodes stand in the element residual. */
 public abstract class FacetEffect implements Contribution {
     final Mesh mesh;
     final int[] facets;
-    final SideShape shape;
+    final int nodesPerFacet;
     private final String owner;
     private final String kind;
 
@@ -16,7 +15,7 @@ public abstract class FacetEffect implements Contribution {
         this.facets = facets.clone();
         this.owner = owner;
         this.kind = kind;
-        shape = SideShape.of(mesh.nodesPerTriangle());
+        nodesPerFacet = mesh.nodesPerTriangle() == 3 ? 2 : 3;
     }
 
     @Override

@@ -2,6 +2,9 @@ package tepor.solver.assembly;
 
 import java.util.Arrays;
 import tepor.mesher.mesh.Mesh;
+import tepor.solver.element.FacetGeometry;
+import tepor.solver.element.ShapeIntegrals;
+import tepor.solver.element.SideShape;
 import tepor.solver.model.EdgeCondition;
 import tepor.solver.model.Input;
 
@@ -87,11 +90,14 @@ public final class FilmExchange extends FacetEffect {
 
     @Override
     public double heatIn(double[] kelvin, int facet) {
+        FacetGeometry geometry = new FacetGeometry(mesh);
+        geometry.moveTo(facet);
+        SideShape shape = geometry.shape();
         double sum = 0;
         for (int p = 0; p < shape.pointCount(); p++) {
-            sum -= shape.weight(p) * film * excess(kelvin, facet, p);
+            sum -= shape.weight(p) * geometry.lengthElement(p) * film * excess(kelvin, facet, shape, p);
         }
-        return sum * mesh.facetLength(facet);
+        return sum;
     }
 
     @Override
@@ -105,25 +111,25 @@ public final class FilmExchange extends FacetEffect {
             addExchange(filmPerInput, kelvin, derivative);
         }
         if (input.equals(airInput)) {
+            ShapeIntegrals integrals = new ShapeIntegrals(mesh);
+            double[] length = new double[nodesPerFacet];
             for (int facet : facets) {
-                double length = mesh.facetLength(facet);
-                for (int i = 0; i < shape.nodeCount(); i++) {
-                    double sum = 0;
-                    for (int p = 0; p < shape.pointCount(); p++) {
-                        sum += shape.weight(p) * shape.value(p, i);
-                    }
-                    derivative[slot(mesh, facet, i)] -= film * length * sum;
+                integrals.overFacet(facet, length);
+                for (int i = 0; i < nodesPerFacet; i++) {
+                    derivative[slot(mesh, facet, i)] -= film * length[i];
                 }
             }
         }
     }
 
     private void addExchange(double h, double[] kelvin, double[] residual) {
+        FacetGeometry geometry = new FacetGeometry(mesh);
         for (int facet : facets) {
-            double length = mesh.facetLength(facet);
+            geometry.moveTo(facet);
+            SideShape shape = geometry.shape();
             for (int p = 0; p < shape.pointCount(); p++) {
-                double flux = shape.weight(p) * length * h * excess(kelvin, facet, p);
-                for (int i = 0; i < shape.nodeCount(); i++) {
+                double flux = shape.weight(p) * geometry.lengthElement(p) * h * excess(kelvin, facet, shape, p);
+                for (int i = 0; i < nodesPerFacet; i++) {
                     residual[slot(mesh, facet, i)] += flux * shape.value(p, i);
                 }
             }
@@ -131,9 +137,9 @@ public final class FilmExchange extends FacetEffect {
     }
 
     /** Temperature above the air's at a point of a facet, K. */
-    private double excess(double[] kelvin, int facet, int p) {
+    private double excess(double[] kelvin, int facet, SideShape shape, int p) {
         double sum = 0;
-        for (int j = 0; j < shape.nodeCount(); j++) {
+        for (int j = 0; j < nodesPerFacet; j++) {
             sum += (kelvin[mesh.facetNode(facet, j)] - airTemperature) * shape.value(p, j);
         }
         return sum;
@@ -141,15 +147,18 @@ public final class FilmExchange extends FacetEffect {
 
     @Override
     public void addTangent(double[] kelvin, TangentSink sink) {
-        int m = shape.nodeCount();
+        int m = nodesPerFacet;
         double[] entries = new double[m * m];
+        FacetGeometry geometry = new FacetGeometry(mesh);
         for (int facet : facets) {
-            double scale = film * mesh.facetLength(facet);
+            geometry.moveTo(facet);
+            SideShape shape = geometry.shape();
             Arrays.fill(entries, 0);
             for (int p = 0; p < shape.pointCount(); p++) {
+                double weight = film * shape.weight(p) * geometry.lengthElement(p);
                 for (int i = 0; i < m; i++) {
                     for (int j = 0; j < m; j++) {
-                        entries[m * i + j] += scale * shape.weight(p) * shape.value(p, i) * shape.value(p, j);
+                        entries[m * i + j] += weight * shape.value(p, i) * shape.value(p, j);
                     }
                 }
             }

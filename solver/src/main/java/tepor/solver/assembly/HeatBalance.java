@@ -3,6 +3,7 @@ package tepor.solver.assembly;
 import java.util.ArrayList;
 import java.util.List;
 import tepor.mesher.mesh.Mesh;
+import tepor.solver.element.FacetGeometry;
 import tepor.solver.model.Case;
 import tepor.solver.model.Edge;
 import tepor.solver.model.EdgeCondition;
@@ -51,9 +52,8 @@ public final class HeatBalance {
                             values.of(resistance.resistance()),
                             values.of(resistance.airTemperature())));
                 } else if (condition instanceof EdgeCondition.Inflow inflow) {
-                    double perAmount = inflow.basis() == EdgeCondition.InflowBasis.PER_AREA
-                            ? 1
-                            : 1 / edge.pieces().length(subject.section());
+                    double perAmount =
+                            inflow.basis() == EdgeCondition.InflowBasis.PER_AREA ? 1 : 1 / length(mesh, facets);
                     facetEffects.add(new EdgeInflow(
                             mesh, facets, edge.name(), inflow, perAmount * values.of(inflow.amount()), perAmount));
                 }
@@ -75,9 +75,29 @@ public final class HeatBalance {
         this.fixed = fixed;
     }
 
+    // A total is spread over what the mesh has: an arc is a little longer than the facets on it, and the total is to be
+    // kept.
+    private static double length(Mesh mesh, int[] facets) {
+        FacetGeometry geometry = new FacetGeometry(mesh);
+        double sum = 0;
+        for (int facet : facets) {
+            geometry.moveTo(facet);
+            sum += geometry.length();
+        }
+        return sum;
+    }
+
+    private static double area(Mesh mesh, int region) {
+        double sum = 0;
+        for (int t = 0; t < mesh.triangleCount(); t++) {
+            sum += mesh.region(t) == region ? mesh.area(t) : 0;
+        }
+        return sum;
+    }
+
     private RegionHeat heat(Case subject, Region region, Values values) {
         HeatSource source = region.heat();
-        double area = subject.section().area(region.index());
+        double area = area(mesh, region.index());
         Input depth = source.basis() == HeatSource.Basis.TOTAL ? subject.depth() : null;
         double depthValue = depth == null ? 1 : values.of(depth);
         double perAmount = source.basis() == HeatSource.Basis.PER_VOLUME ? 1 : 1 / (area * depthValue);

@@ -1,9 +1,7 @@
 package tepor.solver.assembly;
 
 import tepor.mesher.mesh.Mesh;
-import tepor.solver.element.TriangleQuadrature;
-import tepor.solver.element.TriangleShape;
-import tepor.solver.element.TriangleShapes;
+import tepor.solver.element.ShapeIntegrals;
 import tepor.solver.model.Input;
 import tepor.solver.model.Region;
 
@@ -15,7 +13,6 @@ public final class RegionHeat implements Contribution {
     private final double densityPerAmount;
     private final Input depth;
     private final double depthValue;
-    private final double[] share;
 
     /**
      * @param density W/m³
@@ -31,16 +28,6 @@ public final class RegionHeat implements Contribution {
         this.densityPerAmount = densityPerAmount;
         this.depth = depth;
         this.depthValue = depthValue;
-        TriangleShape shape = TriangleShapes.of(mesh.nodesPerTriangle());
-        TriangleQuadrature quadrature = TriangleQuadrature.ofDegree(shape.stiffnessDegree());
-        share = new double[shape.nodeCount()];
-        double[] value = new double[share.length];
-        for (int p = 0; p < quadrature.pointCount(); p++) {
-            shape.values(quadrature.l0()[p], quadrature.l1()[p], quadrature.l2()[p], value);
-            for (int i = 0; i < share.length; i++) {
-                share[i] += quadrature.weight()[p] * value[i];
-            }
-        }
     }
 
     /** Number of the region. */
@@ -83,12 +70,14 @@ public final class RegionHeat implements Contribution {
     }
 
     private void add(double q, double[] residual) {
-        int n = share.length;
+        int n = mesh.nodesPerTriangle();
+        ShapeIntegrals integrals = new ShapeIntegrals(mesh);
+        double[] area = new double[n];
         for (int t = 0; t < mesh.triangleCount(); t++) {
             if (mesh.region(t) == region.index()) {
-                double heat = q * mesh.area(t);
+                integrals.overTriangle(t, area);
                 for (int i = 0; i < n; i++) {
-                    residual[n * t + i] += heat * share[i];
+                    residual[n * t + i] += q * area[i];
                 }
             }
         }

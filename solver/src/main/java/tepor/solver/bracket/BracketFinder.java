@@ -3,6 +3,7 @@ package tepor.solver.bracket;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import tepor.mesher.mesh.SegmentCurve;
 import tepor.mesher.section.Section;
 import tepor.solver.model.Case;
 import tepor.solver.model.Values;
@@ -13,6 +14,8 @@ import tepor.solver.model.Values;
  * <p>Every lower bound is below the true conductance of the section as drawn and every upper one above it, so that the
  * greatest and the least may be taken whatever they come from. Strips and planes are integrated in closed form, rays and
  * circles by quadrature to about nine digits.
+ *
+ * <p>All take segments for straight, so a section with arcs has no bracket.
  */
 public final class BracketFinder {
     /** Where rounding puts a lower bound above an upper one that it equals, relative. */
@@ -43,6 +46,9 @@ public final class BracketFinder {
     }
 
     private Optional<Bracket> find() {
+        if (SegmentCurve.hasArcs(section)) {
+            return Optional.empty();
+        }
         for (boolean upright : new boolean[] {true, false}) {
             Frame frame = new Frame(section, upright);
             take(new StripBound(frame, surroundings, conduction));

@@ -141,7 +141,12 @@ public final class CaseReader {
             return Optional.empty();
         }
         return SectionBuilder.build(
-                List.copyOf(shapes.values()), whereReader.splitPoints(), drawing.snap(), drawing.unit(), findings);
+                List.copyOf(shapes.values()),
+                whereReader.splitPoints(),
+                List.of(),
+                drawing.snap(),
+                drawing.unit(),
+                findings);
     }
 
     private Parts parts(

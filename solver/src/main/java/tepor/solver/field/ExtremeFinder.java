@@ -2,10 +2,12 @@ package tepor.solver.field;
 
 import java.util.function.IntPredicate;
 import tepor.mesher.mesh.Mesh;
+import tepor.mesher.mesh.TriangleMap;
 
 /**
  * Finds the highest or lowest temperature of a field, inside triangles and along sides too, not only at nodes: a quadratic
- * field has its extremes where its gradient vanishes.
+ * field has its extremes where its gradient vanishes. In curved triangles and on curved sides too the field is quadratic in
+ * the barycentric coordinates, and only the place is mapped.
  */
 public final class ExtremeFinder {
     /** Curvatures of a smaller ratio than this are round-off along a ridge. */
@@ -14,6 +16,7 @@ public final class ExtremeFinder {
     private final TemperatureField field;
     private final Mesh mesh;
     private final double sign;
+    private final TriangleMap map;
     private final double[] u = new double[6];
     private double best = Double.NEGATIVE_INFINITY;
     private double bestX = Double.NaN;
@@ -22,6 +25,7 @@ public final class ExtremeFinder {
     private ExtremeFinder(TemperatureField field, boolean highest) {
         this.field = field;
         this.mesh = field.mesh();
+        this.map = new TriangleMap(mesh);
         this.sign = highest ? 1 : -1;
     }
 
@@ -64,7 +68,8 @@ public final class ExtremeFinder {
         offer(sign * field.at(a), mesh.x(a), mesh.y(a));
         offer(sign * field.at(b), mesh.x(b), mesh.y(b));
         if (mesh.nodesPerTriangle() == 6) {
-            side(sign * field.at(a), sign * field.at(mesh.facetNode(f, 2)), sign * field.at(b), a, b);
+            int m = mesh.facetNode(f, 2);
+            side(sign * field.at(a), sign * field.at(m), sign * field.at(b), a, m, b);
         }
     }
 
@@ -94,13 +99,13 @@ public final class ExtremeFinder {
         for (int i = 0; i < 3; i++) {
             int j = (i + 1) % 3;
             int k = (i + 2) % 3;
-            side(u[j], u[3 + i], u[k], mesh.node(t, j), mesh.node(t, k));
+            side(u[j], u[3 + i], u[k], mesh.node(t, j), mesh.node(t, 3 + i), mesh.node(t, k));
         }
         interior(t, level);
     }
 
     /** The quadratic through start, middle and end of a side has its extreme at t* = ½ + (a − b)/4c, c = a + b − 2m. */
-    private void side(double a, double m, double b, int nodeA, int nodeB) {
+    private void side(double a, double m, double b, int nodeA, int nodeM, int nodeB) {
         double curvature = (a - m) + (b - m);
         if (curvature >= 0) {
             return;
@@ -108,7 +113,15 @@ public final class ExtremeFinder {
         double t = 0.5 + (a - b) / (4 * curvature);
         if (t > 0 && t < 1) {
             double value = m - (b - a) * (b - a) / (8 * curvature);
-            offer(value, (1 - t) * mesh.x(nodeA) + t * mesh.x(nodeB), (1 - t) * mesh.y(nodeA) + t * mesh.y(nodeB));
+            double middle = 4 * t * (1 - t); // of what the middle node lies off the chord; nothing on straight sides
+            offer(
+                    value,
+                    (1 - t) * mesh.x(nodeA)
+                            + t * mesh.x(nodeB)
+                            + middle * (mesh.x(nodeM) - 0.5 * (mesh.x(nodeA) + mesh.x(nodeB))),
+                    (1 - t) * mesh.y(nodeA)
+                            + t * mesh.y(nodeB)
+                            + middle * (mesh.y(nodeM) - 0.5 * (mesh.y(nodeA) + mesh.y(nodeB))));
         }
     }
 
@@ -133,14 +146,9 @@ public final class ExtremeFinder {
         double eta = (-2 * cxx * by + cxy * bx) / det;
         if (xi > 0 && eta > 0 && xi + eta < 1) {
             double value = level + 0.5 * (bx * xi + by * eta);
-            int a = mesh.node(t, 0);
-            int b = mesh.node(t, 1);
-            int c = mesh.node(t, 2);
+            map.moveTo(t);
             double l0 = 1 - xi - eta;
-            offer(
-                    value,
-                    l0 * mesh.x(a) + xi * mesh.x(b) + eta * mesh.x(c),
-                    l0 * mesh.y(a) + xi * mesh.y(b) + eta * mesh.y(c));
+            offer(value, map.x(l0, xi, eta), map.y(l0, xi, eta));
         }
     }
 

@@ -6,6 +6,7 @@ import tepor.mesher.mesh.Mesh;
 import tepor.solver.assembly.FacetEffect;
 import tepor.solver.assembly.HeatBalance;
 import tepor.solver.assembly.Tensor;
+import tepor.solver.element.FacetGeometry;
 import tepor.solver.element.SideShape;
 
 /**
@@ -64,7 +65,7 @@ public final class FacetFlows {
         private final HeatBalance balance;
         private final FieldGradient gradientOf;
         private final int nodesPerFacet;
-        private final SideShape shape;
+        private final FacetGeometry geometry;
 
         /** For each node the open facets that meet in it, as nodesPerFacet·facet + i, from start[node] on. */
         private final int[] start;
@@ -78,7 +79,7 @@ public final class FacetFlows {
             this.balance = balance;
             gradientOf = new FieldGradient(field);
             nodesPerFacet = mesh.nodesPerTriangle() == 3 ? 2 : 3;
-            shape = SideShape.of(mesh.nodesPerTriangle());
+            geometry = new FacetGeometry(mesh);
             start = new int[mesh.nodeCount() + 1];
             for (int f = 0; f < mesh.facetCount(); f++) {
                 for (int i = 0; i < nodesPerFacet && isOpen(f); i++) {
@@ -160,20 +161,20 @@ public final class FacetFlows {
          * conductivity of the other.
          */
         private void predict(int f, double[] moment) {
-            int a = mesh.facetNode(f, 0);
-            int b = mesh.facetNode(f, 1);
-            double length = mesh.facetLength(f);
-            double nx = (mesh.y(b) - mesh.y(a)) / length;
-            double ny = -(mesh.x(b) - mesh.x(a)) / length;
+            geometry.moveTo(f);
+            SideShape shape = geometry.shape();
             int tl = mesh.facetLeftTriangle(f);
             int tr = mesh.facetRightTriangle(f);
             Tensor kl = tl == Mesh.NONE ? null : balance.conduction().tensor(mesh.region(tl));
             Tensor kr = tr == Mesh.NONE ? null : balance.conduction().tensor(mesh.region(tr));
-            double wl = kl == null ? 0 : kr == null ? 1 : kr.inDirection(nx, ny);
-            double wr = kr == null ? 0 : kl == null ? 1 : kl.inDirection(nx, ny);
             double[] gradient = new double[2];
             Arrays.fill(moment, 0);
             for (int p = 0; p < shape.pointCount(); p++) {
+                double length = geometry.lengthElement(p);
+                double nx = geometry.dy(shape.point(p)) / length;
+                double ny = -geometry.dx(shape.point(p)) / length;
+                double wl = kl == null ? 0 : kr == null ? 1 : kr.inDirection(nx, ny);
+                double wr = kr == null ? 0 : kl == null ? 1 : kl.inDirection(nx, ny);
                 double flux = 0;
                 if (kl != null) {
                     gradientOnSide(tl, mesh.facetLeftSide(f), shape.point(p), gradient);

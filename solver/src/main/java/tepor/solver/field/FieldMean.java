@@ -2,45 +2,46 @@ package tepor.solver.field;
 
 import java.util.function.IntPredicate;
 import tepor.mesher.mesh.Mesh;
+import tepor.solver.element.ShapeIntegrals;
 
-/** Mean temperatures over areas and along facets, exact for the field. */
+/** Mean temperatures over areas and along facets: exact for the field but for the length of curved facets, by Gauss's rule. */
 public final class FieldMean {
     private FieldMean() {}
 
     /** Mean by area over triangles, K. */
     public static double overTriangles(TemperatureField field, IntPredicate triangles) {
         Mesh mesh = field.mesh();
-        // ∫Nᵢ is a third of the area at corners of three-node and at mid-side nodes of six-node triangles, else
-        // nothing.
-        int first = mesh.nodesPerTriangle() == 3 ? 0 : 3;
+        ShapeIntegrals integrals = new ShapeIntegrals(mesh);
+        double[] part = new double[mesh.nodesPerTriangle()];
         double area = 0;
         double sum = 0;
         double level = field.at(0);
         for (int t = 0; t < mesh.triangleCount(); t++) {
             if (triangles.test(t)) {
-                double a = mesh.area(t);
-                area += a;
-                for (int i = first; i < first + 3; i++) {
-                    sum += a / 3 * (field.at(mesh.node(t, i)) - level);
+                integrals.overTriangle(t, part);
+                for (int i = 0; i < part.length; i++) {
+                    area += part[i];
+                    sum += part[i] * (field.at(mesh.node(t, i)) - level);
                 }
             }
         }
         return level + sum / area;
     }
 
-    /** Mean by length along facets, K (Simpson's rule, exact for quadratics). */
+    /** Mean by length along facets, K. */
     public static double overFacets(TemperatureField field, int[] facets) {
         Mesh mesh = field.mesh();
+        ShapeIntegrals integrals = new ShapeIntegrals(mesh);
+        double[] part = new double[mesh.nodesPerTriangle() == 3 ? 2 : 3];
         double length = 0;
         double sum = 0;
         double level = field.at(0);
         for (int f : facets) {
-            double l = mesh.facetLength(f);
-            length += l;
-            double ends = field.at(mesh.facetNode(f, 0)) - level + (field.at(mesh.facetNode(f, 1)) - level);
-            sum += mesh.nodesPerTriangle() == 3
-                    ? l * ends / 2
-                    : l * (ends + 4 * (field.at(mesh.facetNode(f, 2)) - level)) / 6;
+            integrals.overFacet(f, part);
+            for (int i = 0; i < part.length; i++) {
+                length += part[i];
+                sum += part[i] * (field.at(mesh.facetNode(f, i)) - level);
+            }
         }
         return level + sum / length;
     }

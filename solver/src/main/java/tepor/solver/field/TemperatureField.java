@@ -8,7 +8,8 @@ import tepor.solver.element.TriangleShapes;
 /**
  * A temperature for each node of a mesh. Immutable.
  *
- * <p>Inside a triangle the temperature is the linear (3 nodes) or quadratic (6 nodes) polynomial through its nodes.
+ * <p>Inside a triangle the temperature is the linear (3 nodes) or quadratic (6 nodes) polynomial through its nodes; in a
+ * curved one it is that polynomial in the barycentric coordinates, which the curved map then places.
  */
 public final class TemperatureField {
     private final Mesh mesh;
@@ -38,7 +39,8 @@ public final class TemperatureField {
     }
 
     /**
-     * Temperature at a point of the section, K; NaN off it.
+     * Temperature at a point of the section, K. A little off the mesh, as on an arc beside the facets that stand for it, the
+     * nearest triangle's polynomial goes on; NaN where no triangle is near.
      *
      * @param x metres
      * @param y metres

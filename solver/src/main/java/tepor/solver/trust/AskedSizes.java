@@ -11,6 +11,7 @@ import org.locationtech.jts.geom.Location;
 import org.locationtech.jts.geom.Polygonal;
 import org.locationtech.jts.operation.distance.IndexedFacetDistance;
 import org.locationtech.jts.operation.polygonize.Polygonizer;
+import tepor.mesher.mesh.SegmentCurve;
 import tepor.mesher.refinement.SizeField;
 import tepor.mesher.section.Section;
 import tepor.solver.model.Case;
@@ -22,6 +23,9 @@ import tepor.solver.model.Target;
 public final class AskedSizes implements SizeField {
     /** Growth of the size with the distance from where it was asked. */
     private static final double GRADATION = 0.4;
+
+    /** How closely arcs are followed, as a share of their length. */
+    private static final double ARC_TOLERANCE = 0.01;
 
     private final double greatest;
     private final List<Near> places = new ArrayList<>();
@@ -73,10 +77,12 @@ public final class AskedSizes implements SizeField {
     }
 
     private static LineString line(GeometryFactory factory, Section section, int s) {
-        return factory.createLineString(new Coordinate[] {
-            new Coordinate(section.x(section.start(s)), section.y(section.start(s))),
-            new Coordinate(section.x(section.end(s)), section.y(section.end(s)))
-        });
+        double[] xy = SegmentCurve.points(section, s, true, ARC_TOLERANCE * section.length(s));
+        Coordinate[] points = new Coordinate[xy.length / 2];
+        for (int i = 0; i < points.length; i++) {
+            points[i] = new Coordinate(xy[2 * i], xy[2 * i + 1]);
+        }
+        return factory.createLineString(points);
     }
 
     /** One place with a smaller size. */

@@ -86,9 +86,11 @@ public final class MeshSizes implements SizeField {
             return Double.POSITIVE_INFINITY;
         }
         double sum = 0;
+        double share = 0; // of all three, more than 1 off the mesh
         for (int i = 0; i < 3; i++) {
             sum += Math.max(0, barycentric[i]) * size[mesh.node(t, i)];
+            share += Math.max(0, barycentric[i]);
         }
-        return sum;
+        return sum / share;
     }
 }

@@ -8,6 +8,7 @@ import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Envelope;
 import org.locationtech.jts.geom.LineSegment;
 import org.locationtech.jts.index.strtree.STRtree;
+import tepor.mesher.mesh.SegmentCurve;
 import tepor.mesher.section.Section;
 import tepor.solver.model.Case;
 import tepor.solver.model.Edge;
@@ -112,8 +113,7 @@ final class SingularPoints {
     }
 
     private double direction(int v, int s) {
-        int other = section.start(s) == v ? section.end(s) : section.start(s);
-        return Math.atan2(section.y(other) - section.y(v), section.x(other) - section.x(v));
+        return SegmentCurve.direction(section, s, section.start(s) == v);
     }
 
     private double clearance(int v, STRtree tree) {

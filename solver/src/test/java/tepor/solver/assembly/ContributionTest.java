@@ -9,6 +9,7 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 import tepor.mesher.mesh.Mesh;
 import tepor.solver.CaseText;
+import tepor.solver.CurvedMesh;
 import tepor.solver.answer.Progress;
 import tepor.solver.answer.Solver;
 import tepor.solver.model.Case;
@@ -69,14 +70,20 @@ class ContributionTest {
                 [mesh]
                 element = "ELEMENT"
                 size = "0.4 m"
-                """.replace("ELEMENT", element));
+                """.replace("ELEMENT", element.equals("linear") ? "linear" : "quadratic"));
+    }
+
+    /** The mesh of a kind of element; "curved" makes every facet a parabola. */
+    private static Mesh mesh(Case subject, String element) {
+        Mesh mesh = Solver.inspect(subject, Progress.NONE).mesh().mesh();
+        return element.equals("curved") ? CurvedMesh.bulged(mesh, 0.05) : mesh;
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"linear", "quadratic"})
+    @ValueSource(strings = {"linear", "quadratic", "curved"})
     void tangentIsTheDerivativeOfTheResidual(String element) {
         Case subject = subject(element);
-        Mesh mesh = Solver.inspect(subject, Progress.NONE).mesh().mesh();
+        Mesh mesh = mesh(subject, element);
         HeatBalance balance = balance(subject, mesh, subject.inputs().nominal());
         double[] kelvin = randomTemperatures(mesh);
         double[] direction = randomTemperatures(mesh);
@@ -98,10 +105,10 @@ class ContributionTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"linear", "quadratic"})
+    @ValueSource(strings = {"linear", "quadratic", "curved"})
     void derivativeByEachInputIsThatOfTheResidual(String element) {
         Case subject = subject(element);
-        Mesh mesh = Solver.inspect(subject, Progress.NONE).mesh().mesh();
+        Mesh mesh = mesh(subject, element);
         Values nominal = subject.inputs().nominal();
         double[] kelvin = randomTemperatures(mesh);
         int moved = 0;

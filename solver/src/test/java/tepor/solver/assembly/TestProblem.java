@@ -4,6 +4,7 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.function.DoubleBinaryOperator;
 import tepor.mesher.mesh.Mesh;
+import tepor.mesher.mesh.TriangleMap;
 import tepor.solver.element.TriangleGeometry;
 import tepor.solver.element.TriangleQuadrature;
 import tepor.solver.element.TriangleShape;
@@ -48,21 +49,28 @@ record TestProblem(
     /** Errors of a field: in the L2 norm, and of the gradient. */
     double[] errors(TemperatureField field) {
         Mesh mesh = field.mesh();
-        TriangleQuadrature rule = TriangleQuadrature.ofDegree(4);
+        TriangleQuadrature rule = TriangleQuadrature.ofDegree(6);
         FieldGradient gradient = new FieldGradient(field);
         double[] g = new double[2];
         double value = 0;
         double slope = 0;
+        TriangleShape shape = TriangleShapes.of(mesh.nodesPerTriangle());
+        TriangleMap map = new TriangleMap(mesh);
+        TriangleGeometry geometry = new TriangleGeometry(mesh);
+        int n = shape.nodeCount();
+        double[] slopes = new double[3 * n];
+        double[] gx = new double[n];
+        double[] gy = new double[n];
         for (int t = 0; t < mesh.triangleCount(); t++) {
+            map.moveTo(t);
+            geometry.moveTo(t);
             for (int p = 0; p < rule.pointCount(); p++) {
                 double[] l = {rule.l0()[p], rule.l1()[p], rule.l2()[p]};
-                double x = 0;
-                double y = 0;
-                for (int i = 0; i < 3; i++) {
-                    x += l[i] * mesh.x(mesh.node(t, i));
-                    y += l[i] * mesh.y(mesh.node(t, i));
-                }
-                double weight = rule.weight()[p] * mesh.area(t);
+                double x = map.x(l[0], l[1], l[2]);
+                double y = map.y(l[0], l[1], l[2]);
+                shape.slopes(l[0], l[1], l[2], slopes);
+                geometry.gradients(slopes, n, gx, gy);
+                double weight = rule.weight()[p] * geometry.areaElement();
                 double e = field.inside(t, l[0], l[1], l[2]) - exact.applyAsDouble(x, y);
                 gradient.at(t, l[0], l[1], l[2], g);
                 double ex = g[0] - exactX.applyAsDouble(x, y);
@@ -89,22 +97,25 @@ record TestProblem(
         @Override
         public void addResidual(double[] kelvin, double[] residual) {
             TriangleShape shape = TriangleShapes.of(mesh.nodesPerTriangle());
-            TriangleQuadrature rule = TriangleQuadrature.ofDegree(4);
+            TriangleQuadrature rule = TriangleQuadrature.ofDegree(6);
             TriangleGeometry geometry = new TriangleGeometry(mesh);
             int n = shape.nodeCount();
             double[] value = new double[n];
+            double[] slopes = new double[3 * n];
+            double[] gx = new double[n];
+            double[] gy = new double[n];
+            TriangleMap map = new TriangleMap(mesh);
             for (int t = 0; t < mesh.triangleCount(); t++) {
                 geometry.moveTo(t);
+                map.moveTo(t);
                 for (int p = 0; p < rule.pointCount(); p++) {
                     double[] l = {rule.l0()[p], rule.l1()[p], rule.l2()[p]};
                     shape.values(l[0], l[1], l[2], value);
-                    double x = 0;
-                    double y = 0;
-                    for (int i = 0; i < 3; i++) {
-                        x += l[i] * mesh.x(mesh.node(t, i));
-                        y += l[i] * mesh.y(mesh.node(t, i));
-                    }
-                    double q = rule.weight()[p] * geometry.area() * heat.applyAsDouble(x, y);
+                    shape.slopes(l[0], l[1], l[2], slopes);
+                    geometry.gradients(slopes, n, gx, gy);
+                    double x = map.x(l[0], l[1], l[2]);
+                    double y = map.y(l[0], l[1], l[2]);
+                    double q = rule.weight()[p] * geometry.areaElement() * heat.applyAsDouble(x, y);
                     for (int i = 0; i < n; i++) {
                         residual[n * t + i] -= q * value[i];
                     }

@@ -9,7 +9,7 @@ import org.junit.jupiter.params.provider.ValueSource;
 class TriangleQuadratureTest {
     /** ∫ λ₀^a λ₁^b λ₂^c = 2·area·a!b!c!/(a+b+c+2)! (M. A. Eisenberg and L. E. Malvern, IJNME 7 (1973) 574). */
     @ParameterizedTest
-    @ValueSource(ints = {1, 2, 4})
+    @ValueSource(ints = {1, 2, 4, 6})
     void integratesEveryMonomialOfItsDegreeExactly(int degree) {
         TriangleQuadrature rule = TriangleQuadrature.ofDegree(degree);
         for (int a = 0; a <= degree; a++) {
@@ -30,7 +30,7 @@ class TriangleQuadratureTest {
     }
 
     @ParameterizedTest
-    @ValueSource(ints = {1, 2, 4})
+    @ValueSource(ints = {1, 2, 4, 6})
     void doesNotIntegrateTheNextDegree(int degree) {
         TriangleQuadrature rule = TriangleQuadrature.ofDegree(degree);
         double sum = 0;
@@ -38,7 +38,7 @@ class TriangleQuadratureTest {
             sum += rule.weight()[p] * Math.pow(rule.l0()[p], degree + 1);
         }
         double exact = 2.0 * factorial(degree + 1) / factorial(degree + 3);
-        assertThat(Math.abs(sum - exact)).isGreaterThan(1e-5);
+        assertThat(Math.abs(sum - exact)).isGreaterThan(1e-7);
     }
 
     private static double factorial(int n) {

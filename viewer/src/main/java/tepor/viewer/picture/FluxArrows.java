@@ -3,9 +3,11 @@ package tepor.viewer.picture;
 import java.awt.Font;
 import java.awt.Graphics2D;
 import java.awt.geom.Path2D;
+import java.awt.geom.Rectangle2D;
 import java.util.ArrayList;
 import java.util.List;
 import tepor.mesher.mesh.Mesh;
+import tepor.mesher.mesh.TriangleMap;
 import tepor.solver.assembly.Tensor;
 import tepor.solver.field.FieldGradient;
 import tepor.solver.field.TemperatureField;
@@ -31,22 +33,21 @@ final class FluxArrows {
         Tensor[] k = conductivities(subject);
         FieldGradient gradient = new FieldGradient(field);
         double[] q = new double[2];
+        double[] l = new double[3];
+        TriangleMap map = new TriangleMap(mesh);
+        double rowHeight = spacing * Math.sqrt(0.75);
         for (int t = 0; t < mesh.triangleCount(); t++) {
-            double[] x = new double[3];
-            double[] y = new double[3];
-            for (int i = 0; i < 3; i++) {
-                x[i] = view.x(mesh.x(mesh.node(t, i)));
-                y[i] = view.y(mesh.y(mesh.node(t, i)));
-            }
-            double rowHeight = spacing * Math.sqrt(0.75);
-            int lastRow = (int) Math.floor(max(y) / rowHeight);
-            for (int row = (int) Math.ceil(min(y) / rowHeight); row <= lastRow; row++) {
+            Rectangle2D box = box(mesh, t, view);
+            map.moveTo(t);
+            int lastRow = (int) Math.floor(box.getMaxY() / rowHeight);
+            for (int row = (int) Math.ceil(box.getMinY() / rowHeight); row <= lastRow; row++) {
                 double shift = Math.floorMod(row, 2) * 0.5;
-                int last = (int) Math.floor(max(x) / spacing - shift);
-                for (int column = (int) Math.ceil(min(x) / spacing - shift); column <= last; column++) {
+                int last = (int) Math.floor(box.getMaxX() / spacing - shift);
+                for (int column = (int) Math.ceil(box.getMinX() / spacing - shift); column <= last; column++) {
                     double px = (column + shift) * spacing;
                     double py = row * rowHeight;
-                    if (flux(gradient, t, k[mesh.region(t)], x, y, px, py, q)) {
+                    if (isIn(map, view.metresX(px), view.metresY(py), l)) {
+                        flux(gradient, t, k[mesh.region(t)], l, q);
                         arrows.add(new Arrow(px, py, q[0], q[1]));
                     }
                 }
@@ -58,12 +59,27 @@ final class FluxArrows {
                 .orElse(0);
     }
 
-    private static double min(double[] v) {
-        return Math.min(v[0], Math.min(v[1], v[2]));
+    /** Box around a triangle, px; a curved side lies within its ends and the point twice as far off as its middle. */
+    private static Rectangle2D box(Mesh mesh, int t, SectionView view) {
+        Rectangle2D box =
+                new Rectangle2D.Double(view.x(mesh.x(mesh.node(t, 0))), view.y(mesh.y(mesh.node(t, 0))), 0, 0);
+        for (int i = 0; i < 3; i++) {
+            int a = mesh.node(t, i);
+            box.add(view.x(mesh.x(a)), view.y(mesh.y(a)));
+            if (mesh.isCurved(t)) {
+                int b = mesh.node(t, (i + 1) % 3);
+                int m = mesh.node(t, 3 + (i + 2) % 3);
+                box.add(
+                        view.x(2 * mesh.x(m) - 0.5 * (mesh.x(a) + mesh.x(b))),
+                        view.y(2 * mesh.y(m) - 0.5 * (mesh.y(a) + mesh.y(b))));
+            }
+        }
+        return box;
     }
 
-    private static double max(double[] v) {
-        return Math.max(v[0], Math.max(v[1], v[2]));
+    /** Whether a point is in a triangle; one on a side that triangles share is in one of them. */
+    static boolean isIn(TriangleMap map, double x, double y, double[] l) {
+        return map.locate(x, y, l) && l[1] >= 0 && l[2] >= 0 && l[1] + l[2] < 1;
     }
 
     /** Of each region; null for those of nothing. */
@@ -74,21 +90,13 @@ final class FluxArrows {
                 .toArray(Tensor[]::new);
     }
 
-    /** Puts the flux at a point (pixels) of a triangle into q (W/m², y upwards); false if the point is not in it. */
-    static boolean flux(
-            FieldGradient gradient, int t, Tensor k, double[] x, double[] y, double px, double py, double[] q) {
-        double twice = (x[1] - x[0]) * (y[2] - y[0]) - (x[2] - x[0]) * (y[1] - y[0]);
-        double l1 = ((px - x[0]) * (y[2] - y[0]) - (x[2] - x[0]) * (py - y[0])) / twice;
-        double l2 = ((x[1] - x[0]) * (py - y[0]) - (px - x[0]) * (y[1] - y[0])) / twice;
-        if (!(l1 >= 0 && l2 >= 0 && l1 + l2 < 1)) {
-            return false;
-        }
-        gradient.at(t, 1 - l1 - l2, l1, l2, q);
+    /** Puts the flux at barycentric coordinates of a triangle into q, W/m², y upwards. */
+    static void flux(FieldGradient gradient, int t, Tensor k, double[] l, double[] q) {
+        gradient.at(t, l[0], l[1], l[2], q);
         double gx = q[0];
         double gy = q[1];
         q[0] = -(k.xx() * gx + k.xy() * gy);
         q[1] = -(k.xy() * gx + k.yy() * gy);
-        return true;
     }
 
     /** The same arrows at the scale of others, whose values stand in the key. */

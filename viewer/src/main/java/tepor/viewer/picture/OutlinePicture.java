@@ -9,6 +9,7 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import tepor.mesher.mesh.Mesh;
+import tepor.mesher.mesh.TriangleMap;
 import tepor.mesher.section.Section;
 import tepor.solver.answer.Inspection;
 import tepor.solver.model.Case;
@@ -25,6 +26,8 @@ import tepor.viewer.picture.drawing.TagPlacer;
 /** The outline of an inspected case: regions with their names, named edges, and the boundary that nobody named. */
 public final class OutlinePicture implements Picture {
     private static final double EDGE = 5;
+    /** Lines whose lengths differ by no more than this are as long as each other. */
+    private static final double ROUNDING = 1e-9;
 
     private final Case subject;
     private final Mesh mesh;
@@ -146,26 +149,35 @@ public final class OutlinePicture implements Picture {
         double[] best = {view.box().getCenterX(), view.box().getCenterY(), Double.NaN};
         double longest = -1;
         for (Chain chain : SegmentChains.lines(section, edge.pieces().segments())) {
-            double total = 0;
-            for (int s : chain.segments()) {
-                total += section.length(s);
+            double[] xy = view.points(chain);
+            int count = chain.closed() ? xy.length / 2 : xy.length / 2 - 1;
+            double[] lengths = new double[count];
+            for (int k = 0; k < count; k++) {
+                lengths[k] = Math.hypot(dx(xy, k), dy(xy, k));
             }
-            if (total > longest) {
+            double total = Arrays.stream(lengths).sum();
+            if (total > longest * (1 + ROUNDING)) {
                 longest = total;
                 double left = 0.5 * total;
                 int k = 0;
-                while (k < chain.segments().length - 1 && left > section.length(chain.segments()[k])) {
-                    left -= section.length(chain.segments()[k++]);
+                while (k < count - 1 && left > lengths[k]) {
+                    left -= lengths[k++];
                 }
-                int a = chain.vertices()[k];
-                int b = chain.vertices()[(k + 1) % chain.vertices().length];
-                double t = left / section.length(chain.segments()[k]);
-                double dx = view.x(section.x(b)) - view.x(section.x(a));
-                double dy = view.y(section.y(b)) - view.y(section.y(a));
-                best = new double[] {view.x(section.x(a)) + t * dx, view.y(section.y(a)) + t * dy, Math.atan2(dx, -dy)};
+                double t = left / lengths[k];
+                best = new double[] {
+                    xy[2 * k] + t * dx(xy, k), xy[2 * k + 1] + t * dy(xy, k), Math.atan2(dx(xy, k), -dy(xy, k))
+                };
             }
         }
         return best;
+    }
+
+    private static double dx(double[] xy, int k) {
+        return xy[(2 * k + 2) % xy.length] - xy[2 * k];
+    }
+
+    private static double dy(double[] xy, int k) {
+        return xy[(2 * k + 3) % xy.length] - xy[2 * k + 1];
     }
 
     /** A place for the region's name inside it, level or upright, nearest to the middle of its box; null if none. */
@@ -199,11 +211,14 @@ public final class OutlinePicture implements Picture {
     private double[] middleOfLargestTriangle(int region) {
         double[] at = {view.box().getCenterX(), view.box().getCenterY()};
         double largest = 0;
+        TriangleMap map = new TriangleMap(mesh);
+        double third = 1.0 / 3;
         for (int t = 0; t < mesh.triangleCount(); t++) {
             if (mesh.region(t) == region && mesh.area(t) > largest) {
                 largest = mesh.area(t);
-                at[0] = view.x((mesh.x(mesh.node(t, 0)) + mesh.x(mesh.node(t, 1)) + mesh.x(mesh.node(t, 2))) / 3);
-                at[1] = view.y((mesh.y(mesh.node(t, 0)) + mesh.y(mesh.node(t, 1)) + mesh.y(mesh.node(t, 2))) / 3);
+                map.moveTo(t);
+                at[0] = view.x(map.x(third, third, third));
+                at[1] = view.y(map.y(third, third, third));
             }
         }
         return at;

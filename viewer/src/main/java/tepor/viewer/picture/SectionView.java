@@ -11,6 +11,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.function.IntPredicate;
 import tepor.mesher.mesh.Mesh;
+import tepor.mesher.mesh.SegmentCurve;
 import tepor.mesher.section.Section;
 import tepor.viewer.picture.SegmentChains.Chain;
 import tepor.viewer.picture.drawing.Ink;
@@ -20,6 +21,9 @@ import tepor.viewer.picture.drawing.OccupancyGrid;
 final class SectionView {
     private static final double OUTLINE = 3.4;
     private static final double BORDER = 1.7;
+    /** The lines that stand for an arc are this close to it, px. */
+    private static final double ARC_TOLERANCE = 0.05;
+
     private static final double TICK_SPACING = 15;
     private static final double TICK = 13;
     /** A line covers at most this part of the layer it bounds. */
@@ -91,6 +95,16 @@ final class SectionView {
         return top + scale * (bounds[3] - metres);
     }
 
+    /** The x in metres that stands at x in pixels. */
+    double metresX(double px) {
+        return bounds[0] + (px - left) / scale;
+    }
+
+    /** The y in metres that stands at y in pixels. */
+    double metresY(double px) {
+        return bounds[3] - (px - top) / scale;
+    }
+
     /** The material's bounding box, or the window, px. */
     Rectangle2D box() {
         return new Rectangle2D.Double(left, top, scale * (bounds[2] - bounds[0]), scale * (bounds[3] - bounds[1]));
@@ -129,13 +143,24 @@ final class SectionView {
         return region != Section.NONE && !section.isHole(region);
     }
 
+    /** A chain as points in pixels, arcs as many short lines; a closed one does not repeat the first. */
     double[] points(Chain chain) {
-        double[] px = new double[2 * chain.vertices().length];
-        for (int i = 0; i < chain.vertices().length; i++) {
-            px[2 * i] = x(section.x(chain.vertices()[i]));
-            px[2 * i + 1] = y(section.y(chain.vertices()[i]));
+        double[] px = new double[2 * chain.segments().length + 2];
+        int count = 0;
+        for (int i = 0; i < chain.segments().length; i++) {
+            int s = chain.segments()[i];
+            double[] along = points(s, chain.vertices()[i] == section.start(s));
+            int rest = 2 * (chain.segments().length - i);
+            px = px.length < count + along.length + rest ? Arrays.copyOf(px, 2 * (count + along.length + rest)) : px;
+            System.arraycopy(along, 0, px, count, along.length);
+            count += along.length - 2; // the last point is the next segment's first
         }
-        return px;
+        return Arrays.copyOf(px, chain.closed() ? count : count + 2);
+    }
+
+    /** Points along a segment in pixels, both ends among them. */
+    private double[] points(int segment, boolean fromStart) {
+        return toPixels(SegmentCurve.points(section, segment, fromStart, ARC_TOLERANCE / scale));
     }
 
     /**
@@ -189,9 +214,10 @@ final class SectionView {
     void takeBorders(OccupancyGrid grid) {
         for (int s = 0; s < section.segmentCount(); s++) {
             if (section.solidLeft(s) || section.solidRight(s)) {
-                int a = section.start(s);
-                int b = section.end(s);
-                grid.takeLine(x(section.x(a)), y(section.y(a)), x(section.x(b)), y(section.y(b)));
+                double[] xy = points(s, true);
+                for (int i = 0; i + 3 < xy.length; i += 2) {
+                    grid.takeLine(xy[i], xy[i + 1], xy[i + 2], xy[i + 3]);
+                }
             }
         }
     }
@@ -203,19 +229,17 @@ final class SectionView {
         for (int[] run : runs) {
             double next = 0.5 * TICK_SPACING * unit;
             for (int s : run) {
-                boolean solidLeft = section.solidLeft(s);
-                int a = solidLeft ? section.start(s) : section.end(s);
-                int b = solidLeft ? section.end(s) : section.start(s);
-                double x0 = x(section.x(a));
-                double y0 = y(section.y(a));
-                double x1 = x(section.x(b));
-                double y1 = y(section.y(b));
-                line.append(new Line2D.Double(x0, y0, x1, y1), false);
-                double length = Math.hypot(x1 - x0, y1 - y0);
-                for (; next <= length; next += TICK_SPACING * unit) {
-                    appendTick(ticks, x0 + (x1 - x0) * next / length, y0 + (y1 - y0) * next / length, x1 - x0, y1 - y0);
+                double[] xy = points(s, section.solidLeft(s));
+                line.append(Ink.path(xy, false), false);
+                for (int i = 0; i + 3 < xy.length; i += 2) {
+                    double dx = xy[i + 2] - xy[i];
+                    double dy = xy[i + 3] - xy[i + 1];
+                    double length = Math.hypot(dx, dy);
+                    for (; next <= length; next += TICK_SPACING * unit) {
+                        appendTick(ticks, xy[i] + dx * next / length, xy[i + 1] + dy * next / length, dx, dy);
+                    }
+                    next -= length;
                 }
-                next -= length;
             }
         }
         Ink.draw(g, line, Ink.WARNING, 2.6 * unit);
@@ -252,7 +276,16 @@ final class SectionView {
                     int b = mesh.node(t, (i + 2) % 3);
                     if (chosen.has(a, b)) {
                         path.moveTo(x(mesh.x(a)), y(mesh.y(a)));
-                        path.lineTo(x(mesh.x(b)), y(mesh.y(b)));
+                        if (mesh.isCurved(t)) {
+                            int m = mesh.node(t, 3 + i);
+                            path.quadTo(
+                                    x(2 * mesh.x(m) - 0.5 * (mesh.x(a) + mesh.x(b))),
+                                    y(2 * mesh.y(m) - 0.5 * (mesh.y(a) + mesh.y(b))),
+                                    x(mesh.x(b)),
+                                    y(mesh.y(b)));
+                        } else {
+                            path.lineTo(x(mesh.x(b)), y(mesh.y(b)));
+                        }
                     }
                 }
             }

@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.within;
 
 import org.junit.jupiter.api.Test;
 import tepor.mesher.mesh.Mesh;
+import tepor.mesher.mesh.TriangleMap;
 import tepor.solver.assembly.Tensor;
 import tepor.solver.field.FieldGradient;
 import tepor.solver.field.TemperatureField;
@@ -17,14 +18,14 @@ class FluxArrowsTest {
         TemperatureField field = PatternedGrid.field(mesh, (x, y) -> 3 * x * x - 2 * x * y + y);
         double[] q = new double[2];
         int found = 0;
+        TriangleMap map = new TriangleMap(mesh);
+        double[] l = new double[3];
         for (int t = 0; t < mesh.triangleCount(); t++) {
-            double[] x = new double[3];
-            double[] y = new double[3];
-            for (int i = 0; i < 3; i++) {
-                x[i] = mesh.x(mesh.node(t, i));
-                y[i] = mesh.y(mesh.node(t, i));
+            map.moveTo(t);
+            if (FluxArrows.isIn(map, 0.3, 0.2, l)) {
+                FluxArrows.flux(new FieldGradient(field), t, new Tensor(2, 0.5, 1), l, q);
+                found++;
             }
-            found += FluxArrows.flux(new FieldGradient(field), t, new Tensor(2, 0.5, 1), x, y, 0.3, 0.2, q) ? 1 : 0;
         }
         assertThat(found).isEqualTo(1);
         assertThat(q).containsExactly(new double[] {-(2 * 1.4 + 0.5 * 0.4), -(0.5 * 1.4 + 0.4)}, within(1e-11));
