@@ -24,6 +24,9 @@ class ArchitectureTest {
     /** From the bottom to the top: a package uses itself and what stands before it. */
     private static final List<String> LAYERS = List.of(
             "tepor.mesher.outline",
+            "tepor.mesher.curve",
+            "tepor.mesher.chain",
+            "tepor.mesher.dxf",
             "tepor.mesher.section",
             "tepor.mesher.triangulation",
             "tepor.mesher.refinement",

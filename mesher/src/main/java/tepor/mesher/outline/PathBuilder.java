@@ -27,6 +27,11 @@ public final class PathBuilder {
         return points.get(points.size() - 1);
     }
 
+    /** Number of pieces so far, straight ones and parts of arcs. */
+    public int pieceCount() {
+        return circles.size();
+    }
+
     /** Goes straight; a point that stands where the path stands already is passed over. */
     public PathBuilder lineTo(Coordinate to) {
         return piece(to, null);
@@ -74,7 +79,16 @@ public final class PathBuilder {
         if (circle.isEmpty()) {
             return lineTo(through).lineTo(to);
         }
-        return arcTo(circle.get(), to, cross(from, through, to) > 0);
+        return arcTo(asBefore(circle.get()), to, cross(from, through, to) > 0);
+    }
+
+    /** The circle of the piece before where that is the same but for round-off: halves of one circle then share it. */
+    private Circle asBefore(Circle circle) {
+        Circle before = circles.isEmpty() ? null : circles.get(circles.size() - 1);
+        boolean same = before != null
+                && Math.hypot(before.x() - circle.x(), before.y() - circle.y()) <= STRAIGHT * circle.radius()
+                && Math.abs(before.radius() - circle.radius()) <= STRAIGHT * circle.radius();
+        return same ? before : circle;
     }
 
     /** Goes along an arc given by its bulge: the tangent of a quarter of its turn, positive counter-clockwise; 0 is straight. */

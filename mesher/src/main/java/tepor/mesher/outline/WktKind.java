@@ -13,13 +13,16 @@ enum WktKind {
     MULTILINESTRING,
     POLYGON,
     MULTIPOLYGON,
+    CIRCULARSTRING,
+    COMPOUNDCURVE,
+    CURVEPOLYGON,
+    MULTICURVE,
+    MULTISURFACE,
     /** Whatever is not read. */
     OTHER;
 
     static final String REMEDY = "write a geometry as in POLYGON ((0 0, 4 0, 4 3, 0 0))";
 
-    private static final Set<String> CURVED =
-            Set.of("CURVEPOLYGON", "CIRCULARSTRING", "COMPOUNDCURVE", "MULTICURVE", "MULTISURFACE");
     private static final Set<String> OF_NO_USE = Set.of(
             "GEOMETRYCOLLECTION",
             "GEOMETRY",
@@ -66,8 +69,8 @@ enum WktKind {
     OutlineElement.Kind element() {
         return switch (this) {
             case POINT, MULTIPOINT -> OutlineElement.Kind.POINT;
-            case LINESTRING, MULTILINESTRING -> OutlineElement.Kind.LINE;
-            case POLYGON, MULTIPOLYGON -> OutlineElement.Kind.REGION;
+            case LINESTRING, MULTILINESTRING, CIRCULARSTRING, COMPOUNDCURVE, MULTICURVE -> OutlineElement.Kind.LINE;
+            case POLYGON, MULTIPOLYGON, CURVEPOLYGON, MULTISURFACE -> OutlineElement.Kind.REGION;
             case OTHER -> throw new IllegalArgumentException("not read");
         };
     }
@@ -92,24 +95,19 @@ enum WktKind {
     /** Whether a word names a kind of geometry, read or not. */
     static boolean isKind(String word) {
         String upper = word.toUpperCase(Locale.ROOT);
-        return tag(word).kind() != OTHER || CURVED.contains(upper) || OF_NO_USE.contains(upper);
+        return tag(word).kind() != OTHER || OF_NO_USE.contains(upper);
     }
 
     /** Why a word that names none of the kinds read is refused. */
     static Refusal refusal(String word) {
         String upper = word.toUpperCase(Locale.ROOT);
         String shown = WktScanner.quote(word);
-        if (CURVED.contains(upper)) {
-            return new Refusal(
-                    "arcs-not-read",
-                    "arcs are not read yet: " + shown,
-                    "draw arcs as short straight pieces, in a POLYGON or LINESTRING");
-        }
         if (OF_NO_USE.contains(upper)) {
             return new Refusal(
                     "kind-not-read",
                     shown + " is a kind of geometry that is not read",
-                    "use POLYGON or MULTIPOLYGON for regions, LINESTRING or MULTILINESTRING for lines, POINT for points");
+                    "use POLYGON, MULTIPOLYGON or CURVEPOLYGON for regions, LINESTRING, CIRCULARSTRING or COMPOUNDCURVE for"
+                            + " lines, POINT for points");
         }
         if (upper.startsWith("SRID=")) {
             return new Refusal(
@@ -122,7 +120,8 @@ enum WktKind {
                 .findFirst()
                 .map(k -> "write " + k.name())
                 .orElse(
-                        "use POLYGON, MULTIPOLYGON, LINESTRING, MULTILINESTRING or POINT; a name takes a colon behind it");
+                        "use POLYGON, MULTIPOLYGON, CURVEPOLYGON, LINESTRING, CIRCULARSTRING, COMPOUNDCURVE or POINT; a name"
+                                + " takes a colon behind it");
         return new Refusal("unknown-kind", shown + " is no kind of geometry", remedy);
     }
 }

@@ -12,7 +12,7 @@ import tepor.mesher.outline.WktScanner.TokenKind;
  *
  * <p>A record is an optional name, which ends with a colon and stands on one line, and a geometry over as many lines as it
  * needs; the next record begins on a new line. A name may hold anything but a line break and {@code #}. Words are read in
- * capitals or small letters. Coordinates beyond x and y, in geometries tagged {@code Z}, {@code M} or {@code ZM}, are left
+ * capitals or small letters. Curved kinds are read with their arcs ({@link Arcs}). Coordinates beyond x and y, in geometries tagged {@code Z}, {@code M} or {@code ZM}, are left
  * out with a warning. After a fault, reading goes on at the next line that begins a record.
  */
 public final class WktReader {

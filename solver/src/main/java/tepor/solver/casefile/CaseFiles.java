@@ -65,12 +65,17 @@ final class CaseFiles {
      * @param place where it is named
      */
     Optional<String> read(String name, Place place) {
-        try {
-            return text(caseFile.resolveSibling(name), name, place);
-        } catch (InvalidPathException e) {
-            findings.error("file-unreadable", place, "'" + name + "' is not a file name", "name a file that exists");
-            return Optional.empty();
-        }
+        return resolve(name, place).flatMap(file -> text(file, name, place));
+    }
+
+    /**
+     * A file that the case names, relative to the case file, as it is; empty where it cannot be read.
+     *
+     * @param name as the user named it
+     * @param place where it is named
+     */
+    Optional<byte[]> readBytes(String name, Place place) {
+        return resolve(name, place).flatMap(file -> bytes(file, name, place));
     }
 
     /** How messages call a file that the case names: so that it can be found from where the program was started. */
@@ -83,7 +88,20 @@ final class CaseFiles {
         return List.copyOf(read);
     }
 
+    private Optional<Path> resolve(String name, Place place) {
+        try {
+            return Optional.of(caseFile.resolveSibling(name));
+        } catch (InvalidPathException e) {
+            findings.error("file-unreadable", place, "'" + name + "' is not a file name", "name a file that exists");
+            return Optional.empty();
+        }
+    }
+
     private Optional<String> text(Path file, String name, Place place) {
+        return bytes(file, name, place).flatMap(bytes -> decode(bytes, file, place));
+    }
+
+    private Optional<byte[]> bytes(Path file, String name, Place place) {
         if (!Files.exists(file)) {
             findings.error(
                     "file-missing",
@@ -110,7 +128,7 @@ final class CaseFiles {
             return Optional.empty();
         }
         read.add(new SourceFile(name, sha256(bytes)));
-        return decode(bytes, file, place);
+        return Optional.of(bytes);
     }
 
     private Optional<String> decode(byte[] bytes, Path file, Place place) {

@@ -71,14 +71,17 @@ public final class CaseReader {
 
         Names names = Names.of(root);
         Drawing drawing = DrawingReader.read(root, files, quantities);
+        RecordUse recordUse = new RecordUse();
         Map<String, Optional<Material>> materials = new MaterialReader(quantities).read(root);
-        List<WrittenRegion> regions = new RegionReader(drawing, quantities, materials, root.has("depth")).read(root);
+        List<WrittenRegion> regions =
+                new RegionReader(drawing, recordUse, quantities, materials, root.has("depth")).read(root);
         Map<String, WrittenAir> airs = new AirReader(quantities).read(root);
         List<String> regionNames = regions.stream().map(WrittenRegion::name).toList();
-        WhereReader whereReader = new WhereReader(names, drawing, regionNames);
+        WhereReader whereReader = new WhereReader(names, drawing, recordUse, regionNames);
         ConditionReader conditionReader = new ConditionReader(names, airs, quantities, findings);
         List<WrittenEdge> edges = new EdgeReader(whereReader, conditionReader).read(root);
         conditionReader.warnOfUnusedAirs();
+        recordUse.warnOfUnused(drawing, findings);
         checkTied(root);
 
         Map<String, RegionShape> shapes = new LinkedHashMap<>();

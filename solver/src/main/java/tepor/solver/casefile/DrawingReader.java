@@ -4,9 +4,11 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import org.locationtech.jts.geom.Geometry;
+import tepor.mesher.dxf.DxfReader;
 import tepor.mesher.outline.DrawingUnit;
 import tepor.mesher.outline.Findings;
 import tepor.mesher.outline.Outline;
+import tepor.mesher.outline.OutlineElement;
 import tepor.mesher.outline.WktReader;
 import tepor.solver.casefile.KeyTable.Keys;
 import tepor.solver.casefile.KeyTable.Value;
@@ -32,8 +34,24 @@ final class DrawingReader {
      * @param stated whether the case names a file, be it right or wrong
      * @param outline what is in the file; empty where there is none or something in it is wrong
      * @param fileName the file as the user named it; empty where there is none
+     * @param dxf whether the file is DXF, where names are those of layers
      */
-    record Drawing(DrawingUnit unit, double snap, boolean stated, Optional<Outline> outline, String fileName) {
+    record Drawing(
+            DrawingUnit unit, double snap, boolean stated, Optional<Outline> outline, String fileName, boolean dxf) {
+        /** What a name in the file is the name of. */
+        String named() {
+            return dxf ? "layer" : "record";
+        }
+
+        /** The names of the elements of one kind, in the order of the file. */
+        List<String> names(OutlineElement.Kind kind) {
+            return outline.map(Outline::elements).orElse(List.of()).stream()
+                    .filter(e -> e.kind() == kind && !e.name().isEmpty())
+                    .map(OutlineElement::name)
+                    .distinct()
+                    .toList();
+        }
+
         /** A geometry written in the case file, of one of the types wanted; empty, with an error, where it is not. */
         Optional<Geometry> geometry(Value value, String wanted, String... types) {
             Optional<String> text = value.text();
@@ -61,8 +79,11 @@ final class DrawingReader {
         Findings findings = root.findings();
         Optional<KeyTable> table = root.table("outline");
         table.ifPresent(t -> t.allow(OUTLINE));
-        Optional<DrawingUnit> unit = table.flatMap(t -> t.value("unit")).flatMap(DrawingReader::unit);
-        if (table.flatMap(t -> t.value("unit")).isEmpty()) {
+        Optional<Value> file = table.flatMap(t -> t.value("file"));
+        boolean dxf = file.filter(DrawingReader::isDxf).isPresent();
+        Optional<Value> written = table.flatMap(t -> t.value("unit"));
+        Optional<DrawingUnit> unit = written.flatMap(DrawingReader::unit);
+        if (written.isEmpty() && !dxf) {
             findings.error(
                     "unit-missing",
                     table.map(KeyTable::place).orElse(root.place()),
@@ -74,12 +95,23 @@ final class DrawingReader {
                         v -> quantities.exact(v, "it only says which points are one", Range.POSITIVE, Dimension.LENGTH))
                 .map(Quantity::value)
                 .orElse(Double.NaN);
-        DrawingUnit known = unit.orElse(UNKNOWN);
-        Optional<Value> file = table.flatMap(t -> t.value("file"));
-        Optional<Outline> outline = file.flatMap(v -> outline(v, files, known));
+        // With a unit that is wrong, that of the drawing is not meant either.
+        Optional<DrawingUnit> stated = written.isPresent() ? Optional.of(unit.orElse(UNKNOWN)) : unit;
+        Optional<Outline> outline = file.flatMap(v -> outline(v, files, stated, snap));
+        boolean known = unit.isPresent() || (written.isEmpty() && outline.isPresent());
         String fileName = file.filter(Value::isText).map(v -> (String) v.raw()).orElse("");
-        // A snap in metres says nothing about coordinates whose unit is not known.
-        return new Drawing(known, unit.isPresent() ? snap : Double.NaN, file.isPresent(), outline, fileName);
+        return new Drawing(
+                outline.filter(o -> dxf).map(Outline::unit).or(() -> unit).orElse(UNKNOWN),
+                // A snap in metres says nothing about coordinates whose unit is not known.
+                known ? snap : Double.NaN,
+                file.isPresent(),
+                outline,
+                fileName,
+                dxf);
+    }
+
+    private static boolean isDxf(Value file) {
+        return file.isText() && ((String) file.raw()).toLowerCase(Locale.ROOT).endsWith(".dxf");
     }
 
     private static Optional<DrawingUnit> unit(Value value) {
@@ -116,34 +148,28 @@ final class DrawingReader {
         }
     }
 
-    private static Optional<Outline> outline(Value value, CaseFiles files, DrawingUnit unit) {
+    private static Optional<Outline> outline(Value value, CaseFiles files, Optional<DrawingUnit> unit, double snap) {
         Optional<String> name = value.text();
         if (name.isEmpty()) {
             return Optional.empty();
         }
-        String lower = name.get().toLowerCase(Locale.ROOT);
-        if (lower.endsWith(".dxf")) {
-            value.findings()
-                    .error(
-                            "not-in-this-version",
-                            value.place(),
-                            "the outline file '" + name.get()
-                                    + "' is DXF, which belongs to format 1, but this version does not do it yet",
-                            "write the outlines as WKT into a .wkt file");
-            return Optional.empty();
-        }
-        if (!lower.endsWith(".wkt")) {
+        String shown = files.nameInMessages(name.get());
+        Findings inFile = new Findings();
+        Optional<Outline> outline = Optional.empty();
+        if (isDxf(value)) {
+            outline = files.readBytes(name.get(), value.place())
+                    .map(bytes -> DxfReader.read(shown, bytes, unit, snap, inFile));
+        } else if (name.get().toLowerCase(Locale.ROOT).endsWith(".wkt")) {
+            outline = files.read(name.get(), value.place())
+                    .map(text -> WktReader.read(shown, text, unit.orElse(UNKNOWN), inFile));
+        } else {
             value.findings()
                     .error(
                             "file-extension",
                             value.place(),
-                            "the outline file '" + name.get() + "' does not end in .wkt",
-                            "write the outlines as WKT into a file NAME.wkt");
-            return Optional.empty();
+                            "the outline file '" + name.get() + "' ends neither in .wkt nor in .dxf",
+                            "name a drawing in DXF (NAME.dxf), or write the outlines as WKT into a file NAME.wkt");
         }
-        Findings inFile = new Findings();
-        Optional<Outline> outline = files.read(name.get(), value.place())
-                .map(text -> WktReader.read(files.nameInMessages(name.get()), text, unit, inFile));
         inFile.all().forEach(value.findings()::add);
         // Where a record could not be read, regions would miss it for no other reason.
         return inFile.hasErrors() ? Optional.empty() : outline;

@@ -3,8 +3,9 @@ package tepor.solver.casefile;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.Set;
+import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Geometry;
+import org.locationtech.jts.geom.LineString;
 import org.locationtech.jts.geom.Polygon;
 import org.locationtech.jts.geom.util.PolygonExtracter;
 import tepor.mesher.outline.Outline;
@@ -18,15 +19,15 @@ import tepor.solver.casefile.KeyTable.Value;
 /** Finds the outline of a region: written in the case, or the records of its name in the drawing's file. */
 final class OutlineFinder {
     private final Drawing drawing;
-    private final Set<String> usedRecords;
+    private final RecordUse recordUse;
 
     /**
      * @param drawing the drawing
-     * @param usedRecords takes the names of the records that are used
+     * @param recordUse takes which records are used
      */
-    OutlineFinder(Drawing drawing, Set<String> usedRecords) {
+    OutlineFinder(Drawing drawing, RecordUse recordUse) {
         this.drawing = drawing;
-        this.usedRecords = usedRecords;
+        this.recordUse = recordUse;
     }
 
     /** The outline of the region in a table; empty, with errors, where it is missing or faulty. */
@@ -38,14 +39,14 @@ final class OutlineFinder {
                     .filter(g -> OutlineCheck.check(name, g, place, drawing.unit(), table.findings()))
                     .map(g -> new RegionShape(name, g, hole, place));
         }
-        usedRecords.add(name);
+        recordUse.use(OutlineElement.Kind.REGION, name);
         if (!drawing.stated()) {
             table.findings()
                     .error(
                             "outline-missing",
                             table.place(),
                             table.label() + " has no outline, and the case names no outline file",
-                            "write outline = \"POLYGON ((…))\", or name a file under [outline]");
+                            "write outline = \"POLYGON ((…))\" (or CURVEPOLYGON), or name a file under [outline]");
             return Optional.empty();
         }
         // A file that cannot be read was reported where it is named.
@@ -71,26 +72,46 @@ final class OutlineFinder {
     }
 
     private void noRecord(String name, KeyTable table, Outline outline) {
-        boolean line = !outline.find(name, OutlineElement.Kind.LINE).isEmpty();
-        boolean point = !outline.find(name, OutlineElement.Kind.POINT).isEmpty();
-        List<String> known = outline.elements().stream()
-                .filter(e -> e.kind() == OutlineElement.Kind.REGION && !e.name().isEmpty())
-                .map(OutlineElement::name)
-                .distinct()
-                .toList();
+        List<OutlineElement> lines = outline.find(name, OutlineElement.Kind.LINE);
+        boolean other = !lines.isEmpty()
+                || !outline.find(name, OutlineElement.Kind.POINT).isEmpty();
+        List<String> known = drawing.names(OutlineElement.Kind.REGION);
+        String what = !other
+                ? "it states none, and " + drawing.fileName() + " has no " + drawing.named() + " of that name"
+                        + (drawing.dxf() ? " with a closed loop" : "")
+                : drawing.dxf()
+                        ? "in " + drawing.fileName() + " its layer has no closed loop" + open(lines)
+                        : "in " + drawing.fileName() + " its record is a " + (lines.isEmpty() ? "point" : "line");
+        String remedy = drawing.dxf()
+                ? "close the loop in the drawing, or state a snap greater than the gap"
+                : "make the record a POLYGON, MULTIPOLYGON or CURVEPOLYGON";
         table.findings()
                 .error(
                         "outline-missing",
                         table.place("name"),
-                        table.label() + " has no outline: "
-                                + (line || point
-                                        ? "in " + drawing.fileName() + " its record is a " + (line ? "line" : "point")
-                                        : "it states none, and " + drawing.fileName() + " has no record of that name"),
-                        line || point
-                                ? "make the record a POLYGON or MULTIPOLYGON"
+                        table.label() + " has no outline: " + what,
+                        other
+                                ? remedy
                                 : NearestWord.to(name, known)
                                         .map(near -> "did you mean '" + near + "'")
-                                        .orElse("its regions are " + NearestWord.list(known)));
+                                        .orElse(
+                                                drawing.dxf()
+                                                        ? "layers with closed loops are " + NearestWord.list(known)
+                                                        : "its regions are " + NearestWord.list(known)));
+    }
+
+    /** What there is in place of a loop. */
+    private String open(List<OutlineElement> lines) {
+        if (lines.isEmpty()) {
+            return ", only points";
+        }
+        LineString first = (LineString) lines.get(0).shape();
+        Coordinate from = first.getCoordinateN(0);
+        Coordinate to = first.getCoordinateN(first.getNumPoints() - 1);
+        return (lines.size() == 1 ? ": its line runs from " : ", but " + lines.size() + " open lines, the first from ")
+                + drawing.unit().point(from.x, from.y) + " to "
+                + drawing.unit().point(to.x, to.y) + " (" + lines.get(0).place() + "), a gap of "
+                + drawing.unit().length(from.distance(to));
     }
 
     /** Several records of one name are one region of several pieces. */

@@ -7,7 +7,6 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import tepor.mesher.outline.Findings;
-import tepor.mesher.outline.OutlineElement;
 import tepor.mesher.section.RegionShape;
 import tepor.solver.casefile.DrawingReader.Drawing;
 import tepor.solver.casefile.KeyTable.Keys;
@@ -29,18 +28,24 @@ final class RegionReader {
     private final Map<String, Optional<Material>> materials;
     private final boolean depthStated;
     private final Set<String> usedMaterials = new HashSet<>();
-    private final Set<String> usedRecords = new HashSet<>();
+    private final RecordUse recordUse;
     private boolean complete = true;
 
     /**
      * @param drawing the drawing
+     * @param recordUse takes which records of the drawing are used
      * @param quantities reads the heats
      * @param materials all materials by name; empty where one has a fault
      * @param depthStated whether the case states a depth
      */
     RegionReader(
-            Drawing drawing, QuantityKeys quantities, Map<String, Optional<Material>> materials, boolean depthStated) {
+            Drawing drawing,
+            RecordUse recordUse,
+            QuantityKeys quantities,
+            Map<String, Optional<Material>> materials,
+            boolean depthStated) {
         this.drawing = drawing;
+        this.recordUse = recordUse;
         this.quantities = quantities;
         this.materials = materials;
         this.depthStated = depthStated;
@@ -80,7 +85,7 @@ final class RegionReader {
         boolean hole = materialName.filter(MaterialReader.NOTHING::equals).isPresent();
         Optional<Material> material = materialName.filter(m -> !hole).flatMap(m -> material(table, m));
         Optional<HeatSource> heat = heat(table, name.orElse(""), hole);
-        OutlineFinder finder = new OutlineFinder(drawing, usedRecords);
+        OutlineFinder finder = new OutlineFinder(drawing, recordUse);
         Optional<RegionShape> shape =
                 name.isPresent() || table.has("outline") ? finder.find(name.orElse(""), hole, table) : Optional.empty();
         if (name.isEmpty()) {
@@ -167,6 +172,7 @@ final class RegionReader {
     private void warnOfUnused(KeyTable root) {
         // A region without its name or material may have meant any of them.
         if (!complete) {
+            recordUse.setUncertain();
             return;
         }
         root.reportingTo(new Findings()).namedTables("material").forEach((name, table) -> {
@@ -179,29 +185,5 @@ final class RegionReader {
                                 "leave it out, or check the materials of the regions");
             }
         });
-        for (OutlineElement element : drawing.outline().map(o -> o.elements()).orElse(List.of())) {
-            boolean used = element.kind() == OutlineElement.Kind.REGION && usedRecords.contains(element.name());
-            if (!used) {
-                root.findings()
-                        .warning(
-                                "unused-record",
-                                element.place(),
-                                (element.name().isEmpty()
-                                                ? "a record without a name"
-                                                : "the record '" + element.name() + "'")
-                                        + " (" + word(element.kind()) + ") is used by nothing",
-                                element.kind() == OutlineElement.Kind.REGION
-                                        ? "add a [[region]] of its name, or leave it out"
-                                        : "copy it into the where of an [[edge]], or leave it out");
-            }
-        }
-    }
-
-    private static String word(OutlineElement.Kind kind) {
-        return switch (kind) {
-            case REGION -> "a region's outline";
-            case LINE -> "a line";
-            case POINT -> "a point";
-        };
     }
 }

@@ -7,21 +7,24 @@ import java.util.Map;
 import java.util.Optional;
 import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Geometry;
+import org.locationtech.jts.geom.GeometryFactory;
+import org.locationtech.jts.geom.LineString;
 import tepor.mesher.outline.Finding;
 import tepor.mesher.outline.Findings;
+import tepor.mesher.outline.Outline;
+import tepor.mesher.outline.OutlineElement;
+import tepor.mesher.outline.OutlineElement.Kind;
 import tepor.mesher.section.OutlineCheck;
 import tepor.mesher.section.Where;
 import tepor.solver.casefile.DrawingReader.Drawing;
 import tepor.solver.casefile.KeyTable.Keys;
 import tepor.solver.casefile.KeyTable.Value;
-import tepor.solver.casefile.Names.Kind;
 
 /** Reads the {@code where} of an edge. */
 final class WhereReader {
-    private static final String LATER_LAYER = "write the line itself: where = { line = \"LINESTRING (…)\" }";
     private static final Keys FORMS = new Keys(
-            Keys.of("line", "inside", "nearest", "of", "between").now(),
-            Map.of("layer", LATER_LAYER, "cut", "ask for temperatures at points, or draw a border of regions there"));
+            Keys.of("line", "layer", "inside", "nearest", "of", "between").now(),
+            Map.of("cut", "ask for temperatures at points, or draw a border of regions there"));
     private static final Map<String, Where> WORDS = Map.of(
             "left", new Where.OnSide(Where.Side.LEFT),
             "right", new Where.OnSide(Where.Side.RIGHT),
@@ -38,17 +41,20 @@ final class WhereReader {
 
     private final Names names;
     private final Drawing drawing;
+    private final RecordUse recordUse;
     private final List<String> regions;
     private final List<Coordinate> splitPoints = new ArrayList<>();
 
     /**
      * @param names the names of the case
-     * @param drawing for coordinates
+     * @param drawing for coordinates, and lines that are drawn
+     * @param recordUse takes which records of the drawing are used
      * @param regions the names of the regions by their number in the section
      */
-    WhereReader(Names names, Drawing drawing, List<String> regions) {
+    WhereReader(Names names, Drawing drawing, RecordUse recordUse, List<String> regions) {
         this.names = names;
         this.drawing = drawing;
+        this.recordUse = recordUse;
         this.regions = regions;
     }
 
@@ -99,13 +105,14 @@ final class WhereReader {
                             "where-form",
                             value.place(),
                             value.name() + " has " + table.keys().size() + " keys, where exactly one is wanted",
-                            "write one of line, inside, nearest, of, between; a union is an array of such tables");
+                            "write one of line, layer, inside, nearest, of, between; a union is an array of such tables");
             return Optional.empty();
         }
         String key = table.keys().iterator().next();
         Value form = table.value(key).orElseThrow();
         return switch (key) {
             case "line" -> line(form);
+            case "layer" -> layer(form);
             case "inside" -> inside(form);
             case "nearest" ->
                 drawing.geometry(form, "a point", "POINT")
@@ -120,14 +127,14 @@ final class WhereReader {
         if (where != null) {
             return Optional.of(where);
         }
-        Optional<Kind> kind = names.kindOf(word);
+        Optional<Names.Kind> kind = names.kindOf(word);
         String words = "the words are " + String.join(", ", WORDS_IN_ORDER);
         String remedy = kind.isPresent()
                 ? words
                 : NearestWord.to(word, WORDS_IN_ORDER)
                         .map(near -> "did you mean \"" + near + "\"")
                         .orElse(words);
-        if (kind.isPresent() && kind.get() == Kind.REGION) {
+        if (kind.isPresent() && kind.get() == Names.Kind.REGION) {
             remedy = "write { of = \"" + word + "\" } for the border of the region, or { between = [\"" + word
                     + "\", \"…\"] } for where it meets another";
         }
@@ -143,8 +150,62 @@ final class WhereReader {
 
     private Optional<Where> line(Value form) {
         Optional<Geometry> line = drawing.geometry(form, "a line", "LINESTRING", "MULTILINESTRING");
-        line.ifPresent(l -> splitPoints.addAll(Arrays.asList(l.getCoordinates())));
-        return line.map(Where.OnLine::new);
+        return line.map(this::onLine);
+    }
+
+    private Where onLine(Geometry line) {
+        splitPoints.addAll(Arrays.asList(line.getCoordinates()));
+        return new Where.OnLine(line);
+    }
+
+    private Optional<Where> layer(Value form) {
+        Optional<String> name = form.text();
+        name.ifPresent(n -> recordUse.use(Kind.LINE, n));
+        if (name.isEmpty()) {
+            recordUse.setUncertain();
+            return Optional.empty();
+        }
+        if (!drawing.stated()) {
+            form.findings()
+                    .error(
+                            "layer-missing",
+                            form.place(),
+                            form.name() + " is '" + name.get() + "', but the case names no outline file",
+                            "name one under [outline], or write { line = \"LINESTRING (…)\" }");
+            return Optional.empty();
+        }
+        // A file that cannot be read was reported where it is named.
+        return drawing.outline().flatMap(o -> layer(form, name.get(), o));
+    }
+
+    private Optional<Where> layer(Value form, String name, Outline outline) {
+        List<LineString> lines = new ArrayList<>();
+        for (OutlineElement element : outline.find(name, Kind.LINE)) {
+            for (int i = 0; i < element.shape().getNumGeometries(); i++) {
+                lines.add((LineString) element.shape().getGeometryN(i));
+            }
+        }
+        if (!lines.isEmpty()) {
+            return Optional.of(onLine(new GeometryFactory().createMultiLineString(lines.toArray(new LineString[0]))));
+        }
+        boolean loops = !outline.find(name, Kind.REGION).isEmpty();
+        List<String> known = drawing.names(Kind.LINE);
+        form.findings()
+                .error(
+                        "layer-missing",
+                        form.place(),
+                        form.name() + " is '" + name + "', but "
+                                + (loops
+                                        ? "in " + drawing.fileName() + " that " + drawing.named()
+                                                + " holds closed loops only"
+                                        : drawing.fileName() + " has no " + drawing.named()
+                                                + " of that name with a line"),
+                        loops
+                                ? "write { of = \"" + name + "\" } for the border of a region, or draw an open line"
+                                : known.isEmpty()
+                                        ? "draw a line along the edge, on a layer of its own"
+                                        : NearestWord.remedy(name, known, "line"));
+        return Optional.empty();
     }
 
     private Optional<Where> inside(Value form) {
@@ -197,7 +258,7 @@ final class WhereReader {
 
     private Optional<Integer> region(Value value) {
         return value.text()
-                .filter(name -> names.check(name, value.place(), value.name(), "", Kind.REGION))
+                .filter(name -> names.check(name, value.place(), value.name(), "", Names.Kind.REGION))
                 .map(regions::indexOf)
                 .filter(i -> i >= 0);
     }

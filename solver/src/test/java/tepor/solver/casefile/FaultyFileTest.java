@@ -97,17 +97,7 @@ class FaultyFileTest {
     void anOutlineFileOfAnotherKind() {
         Finding error = folder().errors(WITH_FILE.replace("file = \"duct.wkt\"", "«file = \"duct.svg\""))
                 .get(0);
-        assertThat(error.what()).contains("'duct.svg'", ".wkt");
-    }
-
-    @Test
-    void aDxfFileIsRefusedForNow() {
-        folder().write("duct.DXF", "0\nEOF\n");
-        Finding error = folder().errors(WITH_FILE.replace("file = \"duct.wkt\"", "«file = \"duct.DXF\""))
-                .get(0);
-        assertThat(error.code()).isEqualTo("not-in-this-version");
-        assertThat(error.what()).contains("duct.DXF", "does not do it yet");
-        assertThat(error.remedy()).contains("WKT");
+        assertThat(error.what()).contains("'duct.svg'", ".wkt", ".dxf");
     }
 
     @Test
@@ -118,14 +108,6 @@ class FaultyFileTest {
         assertThat(errors.get(0).place().file())
                 .isEqualTo(folder().file("duct.wkt").toString());
         assertThat(errors.get(0).place().line()).isEqualTo(2);
-    }
-
-    @Test
-    void arcsInTheOutlineFileAreRefusedForNow() {
-        folder().write("duct.wkt", "plate: CURVEPOLYGON (CIRCULARSTRING (0 0, 4 0, 0 0))\n");
-        List<Finding> errors = folder().all(WITH_FILE);
-        assertThat(errors).hasSize(1);
-        assertThat(errors.get(0).toString()).contains("arcs", "CURVEPOLYGON", "not read yet");
     }
 
     @Test

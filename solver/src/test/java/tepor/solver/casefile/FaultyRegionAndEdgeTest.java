@@ -78,9 +78,9 @@ class FaultyRegionAndEdgeTest {
                         "cross"),
                 fault(
                         "outline = 'POLYGON ((20 10, 40 10, 40 30, 20 30, 20 10))'",
-                        "«outline = 'CURVEPOLYGON (CIRCULARSTRING (0 0, 4 0, 0 0))'",
-                        "arcs;not read yet",
-                        "POLYGON"),
+                        "«outline = 'CURVEPOLYGON (CIRCULARSTRING (20 10, 40 10, 40 30))'",
+                        "does not close;(20 10) mm;(40 30) mm",
+                        "repeat"),
                 fault(
                         "outline = 'POLYGON ((20 10, 40 10, 40 30, 20 30, 20 10))'",
                         "«outline = 3",
@@ -113,7 +113,7 @@ class FaultyRegionAndEdgeTest {
                 fault("where = 'top'", "where = ['top', «'botom']", "element 2 of 'where';\"botom\"", "\"bottom\""),
                 fault("where = 'top'", "«where = { of = 'bar', line = 'LINESTRING (0 0, 1 0)' }", "2 keys", "union"),
                 fault("where = 'top'", "where = { «lien = 'LINESTRING (0 0, 1 0)' }", "unknown key 'lien'", "'line'"),
-                fault("where = 'top'", "where = { «layer = 'x' }", "'layer' in where;does not do it yet", "LINESTRING"),
+                fault("where = 'top'", "where = { «layer = 'x' }", "'layer';'x';no outline file", "LINESTRING"),
                 fault(
                         "where = 'top'",
                         "where = { «cut = 'LINESTRING (0 0, 1 0)' }",
