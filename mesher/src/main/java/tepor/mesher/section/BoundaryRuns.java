@@ -57,7 +57,7 @@ public final class BoundaryRuns {
             }
         }
         for (int s = 0; s < section.segmentCount(); s++) {
-            if (!section.isBoundary(s)) {
+            if (!section.isBoundary(s) && !section.isCut(s)) {
                 leaves[section.start(s)] = JUNCTION;
                 leaves[section.end(s)] = JUNCTION;
             }

@@ -62,7 +62,9 @@ public final class EdgeFinder {
         if (where instanceof Where.Union union) {
             union.parts().forEach(part -> mark(part, conditioned, sign));
         } else if (where instanceof Where.OnLine onLine) {
-            markOnLine(onLine.line(), sign);
+            markOnLine(onLine.line(), sign, s -> true);
+        } else if (where instanceof Where.OnCut onCut) {
+            markOnLine(onCut.line(), sign, s -> !boundary.get(s));
         } else if (where instanceof Where.OfRegion of) {
             int r = of.region();
             markAll(s -> section.left(s) == r ? 1 : section.right(s) == r ? -1 : 0, sign);
@@ -134,14 +136,16 @@ public final class EdgeFinder {
                 && Math.abs(section.y(section.end(s)) - y) <= tolerance;
     }
 
-    private void markOnLine(Geometry line, int[] sign) {
+    private void markOnLine(Geometry line, int[] sign, IntPredicate may) {
         LineCover cover = new LineCover(line, tolerance);
         markAll(
-                s -> cover.direction(
-                        section.x(section.start(s)),
-                        section.y(section.start(s)),
-                        section.x(section.end(s)),
-                        section.y(section.end(s))),
+                s -> !may.test(s)
+                        ? 0
+                        : cover.direction(
+                                section.x(section.start(s)),
+                                section.y(section.start(s)),
+                                section.x(section.end(s)),
+                                section.y(section.end(s))),
                 sign);
     }
 

@@ -28,6 +28,12 @@ public sealed interface Where {
     /** Boundary and interface pieces that lie on the line within snap. Line strings, coordinates in metres. */
     record OnLine(Geometry line) implements Where {}
 
+    /**
+     * Pieces that lie on the line within snap, but for those of the boundary: cuts through regions, and interfaces. Line
+     * strings, coordinates in metres.
+     */
+    record OnCut(Geometry line) implements Where {}
+
     /** Boundary pieces inside the polygon, coordinates in metres. */
     record Inside(Geometry polygon) implements Where {}
 

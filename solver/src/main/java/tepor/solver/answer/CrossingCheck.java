@@ -29,6 +29,9 @@ final class CrossingCheck {
             around.add(new ArrayList<>());
         }
         for (int s = 0; s < section.segmentCount(); s++) {
+            if (section.isCut(s)) {
+                continue;
+            }
             around.get(section.start(s)).add(s);
             around.get(section.end(s)).add(s);
         }

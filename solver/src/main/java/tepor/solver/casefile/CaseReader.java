@@ -143,7 +143,7 @@ public final class CaseReader {
         return SectionBuilder.build(
                 List.copyOf(shapes.values()),
                 whereReader.splitPoints(),
-                List.of(),
+                whereReader.cuts(),
                 drawing.snap(),
                 drawing.unit(),
                 findings);

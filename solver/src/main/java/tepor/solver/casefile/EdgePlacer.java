@@ -156,6 +156,15 @@ final class EdgePlacer {
         if (longest < 0) {
             return;
         }
+        if (section.isCut(longest)) {
+            findings.error(
+                    "condition-on-cut",
+                    edge.table().place(edge.stated().get(0)),
+                    edge.table().label() + " is a cut through region '" + section.regionName(section.left(longest))
+                            + "', where " + edge.stated().get(0) + " cannot hold: a cut is for asks only",
+                    "leave the condition out, or draw a border of regions there");
+            return;
+        }
         String between = "'" + section.regionName(section.left(longest)) + "' and '"
                 + section.regionName(section.right(longest)) + "'";
         String where = edge.table().label() + " lies for " + unit.length(length) + " between regions, such as "

@@ -22,9 +22,7 @@ import tepor.solver.casefile.KeyTable.Value;
 
 /** Reads the {@code where} of an edge. */
 final class WhereReader {
-    private static final Keys FORMS = new Keys(
-            Keys.of("line", "layer", "inside", "nearest", "of", "between").now(),
-            Map.of("cut", "ask for temperatures at points, or draw a border of regions there"));
+    private static final Keys FORMS = Keys.of("line", "layer", "cut", "inside", "nearest", "of", "between");
     private static final Map<String, Where> WORDS = Map.of(
             "left", new Where.OnSide(Where.Side.LEFT),
             "right", new Where.OnSide(Where.Side.RIGHT),
@@ -44,6 +42,7 @@ final class WhereReader {
     private final RecordUse recordUse;
     private final List<String> regions;
     private final List<Coordinate> splitPoints = new ArrayList<>();
+    private final List<LineString> cuts = new ArrayList<>();
 
     /**
      * @param names the names of the case
@@ -61,6 +60,11 @@ final class WhereReader {
     /** The vertices of all lines read so far: where a line ends or turns away, the piece below it is split. */
     List<Coordinate> splitPoints() {
         return List.copyOf(splitPoints);
+    }
+
+    /** The cuts read so far. */
+    List<LineString> cuts() {
+        return List.copyOf(cuts);
     }
 
     /** Where the edge in a table is; empty, with errors, where that is missing or wrong. */
@@ -105,7 +109,7 @@ final class WhereReader {
                             "where-form",
                             value.place(),
                             value.name() + " has " + table.keys().size() + " keys, where exactly one is wanted",
-                            "write one of line, layer, inside, nearest, of, between; a union is an array of such tables");
+                            "write one of line, layer, cut, inside, nearest, of, between; a union is an array of such tables");
             return Optional.empty();
         }
         String key = table.keys().iterator().next();
@@ -113,6 +117,7 @@ final class WhereReader {
         return switch (key) {
             case "line" -> line(form);
             case "layer" -> layer(form);
+            case "cut" -> cut(form);
             case "inside" -> inside(form);
             case "nearest" ->
                 drawing.geometry(form, "a point", "POINT")
@@ -151,6 +156,14 @@ final class WhereReader {
     private Optional<Where> line(Value form) {
         Optional<Geometry> line = drawing.geometry(form, "a line", "LINESTRING", "MULTILINESTRING");
         return line.map(this::onLine);
+    }
+
+    private Optional<Where> cut(Value form) {
+        Optional<Geometry> line = drawing.geometry(form, "a line", "LINESTRING", "MULTILINESTRING");
+        for (int i = 0; i < line.map(Geometry::getNumGeometries).orElse(0); i++) {
+            cuts.add((LineString) line.get().getGeometryN(i));
+        }
+        return line.map(Where.OnCut::new);
     }
 
     private Where onLine(Geometry line) {

@@ -50,6 +50,11 @@ final class WhereText {
                             .map(d -> "; the nearest is " + d + " away")
                             .orElse("");
         }
+        if (where instanceof Where.OnCut cut) {
+            return "the cut from " + corner(cut.line().getEnvelopeInternal(), true) + " to "
+                    + corner(cut.line().getEnvelopeInternal(), false)
+                    + " runs through no region";
+        }
         if (where instanceof Where.Inside inside) {
             Envelope box = inside.polygon().getEnvelopeInternal();
             return "no piece of the boundary lies inside the polygon from " + corner(box, true) + " to "

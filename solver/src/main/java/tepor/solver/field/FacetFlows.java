@@ -1,6 +1,7 @@
 package tepor.solver.field;
 
 import java.util.Arrays;
+import java.util.BitSet;
 import java.util.HashMap;
 import tepor.mesher.mesh.Mesh;
 import tepor.solver.assembly.FacetEffect;
@@ -12,9 +13,9 @@ import tepor.solver.element.SideShape;
 /**
  * The heat flow through every facet, from the balance equations that were solved.
  *
- * <p>Films and inflows give theirs directly. Elsewhere the element residuals of the triangles of one region around a node
- * say how much heat enters that region there through its <em>open</em> facets, those with a fixed temperature and those
- * towards other regions (Carey 1982, Comput. Methods Appl. Mech. Engng 35, 1–14; Hughes et al. 2000, J. Comput. Phys. 163,
+ * <p>Films and inflows give theirs directly. Elsewhere the element residuals of a fan of triangles about a node say how much
+ * heat enters the fan there through the <em>open</em> facets that bound it, those with a fixed temperature, those between
+ * regions and those of cuts (Carey 1982, Comput. Methods Appl. Mech. Engng 35, 1–14; Hughes et al. 2000, J. Comput. Phys. 163,
  * 467–488). Where several open facets meet in a node, each first gets what the temperature gradient says, and what is left
  * is shared out by {@link NodeShares}; so the sum over all open facets of a region is exactly what the region takes up, and
  * what leaves one region through an interface enters the other.
@@ -72,8 +73,10 @@ public final class FacetFlows {
 
         private final int[] meeting;
 
-        /** Sum of element residuals by node and region, found by {@link #key}. */
-        private final HashMap<Long, double[]> reaction = new HashMap<>();
+        private final NodeFans fans;
+
+        /** Sum of element residuals by fan. */
+        private final HashMap<Integer, double[]> reaction = new HashMap<>();
 
         OpenFacets(HeatBalance balance, TemperatureField field, double[] residual) {
             this.balance = balance;
@@ -96,24 +99,34 @@ public final class FacetFlows {
                     meeting[next[mesh.facetNode(f, i)]++] = nodesPerFacet * f + i;
                 }
             }
+            fans = new NodeFans(mesh, openSides(), node -> start[node + 1] > start[node]);
             int n = mesh.nodesPerTriangle();
             for (int t = 0; t < mesh.triangleCount(); t++) {
                 for (int i = 0; i < n; i++) {
                     int node = mesh.node(t, i);
                     if (start[node + 1] > start[node]) {
-                        reaction.computeIfAbsent(key(node, mesh.region(t)), k -> new double[1])[0] +=
-                                residual[n * t + i];
+                        reaction.computeIfAbsent(fans.of(t, i), k -> new double[1])[0] += residual[n * t + i];
                     }
                 }
             }
         }
 
-        private boolean isOpen(int f) {
-            return !mesh.isBoundaryFacet(f) || balance.fixed().edgeOf(f) >= 0;
+        /** Sides of triangles, as 3·triangle + side, that lie on open facets. */
+        private BitSet openSides() {
+            BitSet sides = new BitSet(3 * mesh.triangleCount());
+            for (int f = 0; f < mesh.facetCount(); f++) {
+                if (isOpen(f) && mesh.facetLeftTriangle(f) != Mesh.NONE) {
+                    sides.set(3 * mesh.facetLeftTriangle(f) + mesh.facetLeftSide(f));
+                }
+                if (isOpen(f) && mesh.facetRightTriangle(f) != Mesh.NONE) {
+                    sides.set(3 * mesh.facetRightTriangle(f) + mesh.facetRightSide(f));
+                }
+            }
+            return sides;
         }
 
-        private long key(int node, int region) {
-            return (long) node << 32 | region;
+        private boolean isOpen(int f) {
+            return !mesh.isBoundaryFacet(f) || balance.fixed().edgeOf(f) >= 0;
         }
 
         void share() {
@@ -143,16 +156,24 @@ public final class FacetFlows {
             shares.clear();
             for (int k = start[node]; k < start[node + 1]; k++) {
                 int f = meeting[k] / nodesPerFacet;
-                shares.add(region(mesh.facetLeftTriangle(f)), region(mesh.facetRightTriangle(f)), flow[meeting[k]]);
+                shares.add(
+                        fan(mesh.facetLeftTriangle(f), node), fan(mesh.facetRightTriangle(f), node), flow[meeting[k]]);
             }
-            shares.balance(region -> reaction.get(key(node, region))[0]);
+            shares.balance(fan -> reaction.get(fan)[0]);
             for (int k = start[node]; k < start[node + 1]; k++) {
                 flow[meeting[k]] = shares.flow(k - start[node]);
             }
         }
 
-        private int region(int triangle) {
-            return triangle == Mesh.NONE ? NodeShares.OUTSIDE : mesh.region(triangle);
+        private int fan(int triangle, int node) {
+            if (triangle == Mesh.NONE) {
+                return NodeShares.OUTSIDE;
+            }
+            int i = 0;
+            while (mesh.node(triangle, i) != node) {
+                i++;
+            }
+            return fans.of(triangle, i);
         }
 
         /**

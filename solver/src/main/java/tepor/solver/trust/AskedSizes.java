@@ -74,7 +74,7 @@ public final class AskedSizes implements SizeField {
         GeometryFactory factory = new GeometryFactory();
         Polygonizer polygonizer = new Polygonizer(true);
         for (int s = 0; s < section.segmentCount(); s++) {
-            if (section.left(s) == region || section.right(s) == region) {
+            if (!section.isCut(s) && (section.left(s) == region || section.right(s) == region)) {
                 polygonizer.add(line(factory, section, s));
             }
         }

@@ -51,7 +51,7 @@ final class SingularPoints {
             incident.add(new ArrayList<>());
         }
         for (int s = 0; s < section.segmentCount(); s++) {
-            if (section.solidLeft(s) || section.solidRight(s)) {
+            if ((section.solidLeft(s) || section.solidRight(s)) && !section.isCut(s)) {
                 incident.get(section.start(s)).add(s);
                 incident.get(section.end(s)).add(s);
             }

@@ -84,6 +84,7 @@ final class FieldLayer {
             paintLines(g);
         }
         view.paintBorders(g);
+        view.paintCuts(g);
         view.paintInsulated(g, answer.insulated().pieces());
         if (arrows != null) {
             arrows.paint(g, labels);

@@ -1,5 +1,6 @@
 package tepor.viewer.picture;
 
+import java.awt.BasicStroke;
 import java.awt.Color;
 import java.awt.Graphics2D;
 import java.awt.geom.Line2D;
@@ -10,6 +11,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.function.IntPredicate;
+import java.util.stream.IntStream;
 import tepor.mesher.mesh.Mesh;
 import tepor.mesher.mesh.SegmentCurve;
 import tepor.mesher.section.Section;
@@ -186,7 +188,7 @@ final class SectionView {
         for (int s = 0; s < section.segmentCount(); s++) {
             int a = Math.min(section.left(s), section.right(s));
             int b = Math.max(section.left(s), section.right(s));
-            if (isSolid(a) && isSolid(b)) {
+            if (isSolid(a) && isSolid(b) && a != b) {
                 byPair.merge(((long) a << 32) | b, new int[] {s}, SectionView::concatenate);
             }
         }
@@ -202,6 +204,27 @@ final class SectionView {
             }
             Ink.draw(g, path, Ink.DARK, width);
         });
+    }
+
+    /** Draws cuts through regions: thin and dashed, as nothing is there in truth. */
+    void paintCuts(Graphics2D g) {
+        int[] cuts = IntStream.range(0, section.segmentCount())
+                .filter(s -> section.isCut(s) && isSolid(section.left(s)))
+                .toArray();
+        Path2D path = new Path2D.Double();
+        for (Chain chain : SegmentChains.lines(section, cuts)) {
+            Ink.append(path, points(chain), chain.closed());
+        }
+        Ink.draw(g, path, new Color(0xF4, 0xF1, 0xE6, 150), 3 * unit);
+        g.setColor(Ink.DARK);
+        g.setStroke(new BasicStroke(
+                (float) (1.3 * unit),
+                BasicStroke.CAP_BUTT,
+                BasicStroke.JOIN_ROUND,
+                10,
+                new float[] {(float) (7 * unit), (float) (4 * unit)},
+                0));
+        g.draw(path);
     }
 
     private static int[] concatenate(int[] a, int[] b) {

@@ -20,17 +20,19 @@ public final class FlowDirection {
         Set<String> from = new TreeSet<>();
         Set<String> to = new TreeSet<>();
         boolean boundary = true;
+        boolean cut = true;
         for (int i = 0; i < pieces.segments().length; i++) {
             int s = pieces.segments()[i];
             boolean leftToRight = pieces.signs()[i] > 0;
             boundary &= section.isBoundary(s);
+            cut &= section.isCut(s);
             from.add(name(section, leftToRight ? section.left(s) : section.right(s)));
             to.add(name(section, leftToRight ? section.right(s) : section.left(s)));
         }
         if (boundary) {
             return "out";
         }
-        if (from.size() == 1) {
+        if (from.size() == 1 && !cut) {
             String source = from.iterator().next();
             return to.size() == 1 ? "from " + source + " to " + to.iterator().next() : "out of " + source;
         }
