@@ -2,13 +2,20 @@ package tepor.mesher.chain;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
+import java.util.stream.IntStream;
 import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.GeometryFactory;
+import tepor.mesher.outline.Circle;
 
 /** Makes areas and lines of strands as they were drawn. */
 public final class Chainer {
     private Chainer() {}
+
+    /** What tells whether a strand is the very copy of another, as blocks laid twice make them. */
+    private record Shape(List<Coordinate> points, List<Circle> circles) {}
 
     /**
      * Chains strands whose ends meet.
@@ -22,9 +29,15 @@ public final class Chainer {
         List<Strand> open = new ArrayList<>();
         int tooShort = 0;
         int firstTooShort = 0;
+        Set<Shape> shapes = new HashSet<>();
+        int copies = 0;
+        int firstCopy = 0;
         for (Strand strand : drawn) {
             Coordinate first = strand.first();
-            if (strand.points().stream().allMatch(p -> p.distance(first) <= snap)) {
+            if (!shapes.add(new Shape(strand.points(), strand.circles()))) {
+                copies++;
+                firstCopy = firstCopy == 0 ? strand.source() : firstCopy;
+            } else if (strand.points().stream().allMatch(p -> p.distance(first) <= snap)) {
                 tooShort++;
                 firstTooShort = firstTooShort == 0 ? strand.source() : firstTooShort;
             } else if (strand.pieceCount() > 2 && strand.last().distance(first) <= snap) {
@@ -54,15 +67,18 @@ public final class Chainer {
             }
         }
         lines.sort(Comparator.comparingInt(Chained.Line::source));
-        int firstDoubled =
-                overlaps.firstDoubled() == null ? 0 : overlaps.firstDoubled().source();
-        for (Strand loop : nesting.doubled()) {
-            firstDoubled = firstDoubled == 0 ? loop.source() : Math.min(firstDoubled, loop.source());
-        }
+        IntStream doubled = IntStream.concat(
+                nesting.doubled().stream().mapToInt(Strand::source),
+                overlaps.firstDoubled() == null
+                        ? IntStream.empty()
+                        : IntStream.of(overlaps.firstDoubled().source()));
+        int firstDoubled = IntStream.concat(doubled, firstCopy == 0 ? IntStream.empty() : IntStream.of(firstCopy))
+                .min()
+                .orElse(0);
         return new Chained(
                 areas,
                 lines,
-                overlaps.doubled() + nesting.doubled().size(),
+                copies + overlaps.doubled() + nesting.doubled().size(),
                 firstDoubled,
                 new GapFinder(loose).gaps(),
                 finder.branches(),

@@ -15,7 +15,7 @@ import tepor.mesher.outline.DrawingUnit;
 /** Draws the entities of a drawing layer by layer, and puts blocks in where they are inserted. */
 final class DrawingExpander {
     private static final int DEEPEST = 64;
-    private static final int MOST_RECORDS = 4_000_000;
+    private static final int MOST_RECORDS = 500_000;
     private static final int EXTERNAL = 4 | 8 | 16;
     private static final String OF_BLOCKS = "0";
     /** What only keeps house. */
@@ -49,6 +49,7 @@ final class DrawingExpander {
                     1,
                     "with all blocks put in, the drawing has more than " + MOST_RECORDS + " entities",
                     "draw only what the cross-section needs");
+            return new DrawingLayers();
         }
         expander.passedOver.report(faults);
         return expander.layers;

@@ -38,10 +38,12 @@ final class DxfDocumentReader {
         boolean first = true;
         boolean more = scanner.next();
         if (!more) {
-            faults.error("empty-outline", 1, "the file is empty", "save the drawing as DXF in text form (ASCII)");
+            if (faults.isEmpty()) {
+                faults.error("empty-outline", 1, "the file is empty", "save the drawing as DXF in text form (ASCII)");
+            }
             return false;
         }
-        while (more && !ended) {
+        while (more) {
             boolean begins = scanner.code() == 0;
             if (first && !(begins && scanner.value().equals("SECTION"))) {
                 faults.error(
@@ -55,6 +57,9 @@ final class DxfDocumentReader {
             if (begins) {
                 take(record);
                 record = new DxfRecord(scanner.value(), scanner.line());
+                if (scanner.value().equals("EOF")) {
+                    break; // whatever stands behind it does not belong to the drawing
+                }
             } else {
                 record.add(scanner.code(), scanner.value(), scanner.line());
             }
@@ -63,9 +68,16 @@ final class DxfDocumentReader {
                 record = new DxfRecord("", scanner.line()); // what was damaged is reported, and left out
             }
         }
-        take(record);
+        boolean cutOff = !section.isEmpty() && !more && !isEnd(record);
+        if (!cutOff) {
+            take(record);
+        }
         checkEnd();
         return true;
+    }
+
+    private static boolean isEnd(DxfRecord record) {
+        return record.type().equals("ENDSEC") || record.type().equals("EOF");
     }
 
     private void checkEnd() {

@@ -53,6 +53,11 @@ final class DxfFaults {
         findings.warning(code, place(line), what, remedy);
     }
 
+    /** Whether nothing was wrong so far. */
+    boolean isEmpty() {
+        return count == 0;
+    }
+
     /** Whether so much is wrong that reading on is of no use. */
     boolean isHopeless() {
         return count > MOST;

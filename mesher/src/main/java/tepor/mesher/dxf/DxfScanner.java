@@ -49,9 +49,7 @@ final class DxfScanner {
             }
             code = number;
             if (at >= text.length()) {
-                faults.error(
-                        "value-missing", line, "the file ends after group code " + code + ", before its value", REMEDY);
-                return false;
+                return false; // a code without its value: the file is cut off
             }
             value = takeLine();
         } while (code == COMMENT);

@@ -7,10 +7,10 @@ import java.util.function.IntUnaryOperator;
 import org.locationtech.jts.algorithm.Distance;
 import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Geometry;
-import org.locationtech.jts.geom.GeometryFactory;
 import org.locationtech.jts.geom.LineString;
 import org.locationtech.jts.geom.prep.PreparedGeometry;
 import org.locationtech.jts.geom.prep.PreparedGeometryFactory;
+import tepor.mesher.outline.Circle;
 
 /** Finds the pieces of a section's boundary and interfaces that a {@link Where} chooses. */
 public final class EdgeFinder {
@@ -20,7 +20,6 @@ public final class EdgeFinder {
     private final Section section;
     private final double tolerance;
     private final BitSet boundary = new BitSet();
-    private final GeometryFactory factory = new GeometryFactory();
 
     /** @param section the section to search */
     public EdgeFinder(Section section) {
@@ -127,12 +126,14 @@ public final class EdgeFinder {
     }
 
     private boolean liesAtX(int s, double x) {
-        return Math.abs(section.x(section.start(s)) - x) <= tolerance
+        return Math.abs(section.middle(s).x - x) <= tolerance
+                && Math.abs(section.x(section.start(s)) - x) <= tolerance
                 && Math.abs(section.x(section.end(s)) - x) <= tolerance;
     }
 
     private boolean liesAtY(int s, double y) {
-        return Math.abs(section.y(section.start(s)) - y) <= tolerance
+        return Math.abs(section.middle(s).y - y) <= tolerance
+                && Math.abs(section.y(section.start(s)) - y) <= tolerance
                 && Math.abs(section.y(section.end(s)) - y) <= tolerance;
     }
 
@@ -145,12 +146,9 @@ public final class EdgeFinder {
                                 section.x(section.start(s)),
                                 section.y(section.start(s)),
                                 section.x(section.end(s)),
-                                section.y(section.end(s))),
+                                section.y(section.end(s)),
+                                section.circle(s)),
                 sign);
-    }
-
-    private LineString lineString(int s) {
-        return factory.createLineString(new Coordinate[] {start(s), end(s)});
     }
 
     private Coordinate start(int s) {
@@ -162,10 +160,12 @@ public final class EdgeFinder {
     }
 
     private IntPredicate insideTest(Geometry polygon) {
-        PreparedGeometry prepared = PreparedGeometryFactory.prepare(polygon);
+        ArcFlattener flattener = new ArcFlattener(0.5 * tolerance);
+        Geometry flat = flattener.flatten(polygon);
+        PreparedGeometry prepared = PreparedGeometryFactory.prepare(flat);
         return s -> {
-            LineString line = lineString(s);
-            return prepared.covers(line) || isNearlyCovered(line, polygon);
+            LineString line = flattener.piece(start(s), end(s), section.circle(s));
+            return prepared.covers(line) || isNearlyCovered(line, flat);
         };
     }
 
@@ -192,13 +192,27 @@ public final class EdgeFinder {
         return point.distance(polygon) > tolerance;
     }
 
+    private double distance(Coordinate point, int s) {
+        Circle circle = section.circle(s);
+        Coordinate a = start(s);
+        Coordinate b = end(s);
+        if (circle == null) {
+            return Distance.pointToSegment(point, a, b);
+        }
+        double turn = circle.turn(a.x, a.y, b.x, b.y);
+        double toPoint = Math.signum(turn) * circle.turn(a.x, a.y, point.x, point.y);
+        return toPoint >= 0 && toPoint <= Math.abs(turn)
+                ? Math.abs(circle.offset(point.x, point.y))
+                : Math.min(point.distance(a), point.distance(b));
+    }
+
     private void markNearest(Coordinate point, int[] sign) {
         List<int[]> runs = BoundaryRuns.of(section, boundary);
         int[] nearest = {};
         double least = Double.POSITIVE_INFINITY;
         for (int[] run : runs) {
             for (int s : run) {
-                double distance = Distance.pointToSegment(point, start(s), end(s));
+                double distance = distance(point, s);
                 if (distance < least) {
                     least = distance;
                     nearest = run;

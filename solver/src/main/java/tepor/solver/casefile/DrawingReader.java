@@ -153,15 +153,14 @@ final class DrawingReader {
         if (name.isEmpty()) {
             return Optional.empty();
         }
-        String shown = files.nameInMessages(name.get());
         Findings inFile = new Findings();
         Optional<Outline> outline = Optional.empty();
         if (isDxf(value)) {
             outline = files.readBytes(name.get(), value.place())
-                    .map(bytes -> DxfReader.read(shown, bytes, unit, snap, inFile));
+                    .map(bytes -> DxfReader.read(files.nameInMessages(name.get()), bytes, unit, snap, inFile));
         } else if (name.get().toLowerCase(Locale.ROOT).endsWith(".wkt")) {
             outline = files.read(name.get(), value.place())
-                    .map(text -> WktReader.read(shown, text, unit.orElse(UNKNOWN), inFile));
+                    .map(text -> WktReader.read(files.nameInMessages(name.get()), text, unit.orElse(UNKNOWN), inFile));
         } else {
             value.findings()
                     .error(

@@ -90,7 +90,7 @@ class DrawnCaseTest {
             assertThat(w.code()).isEqualTo("unit-differs");
             assertThat(w.what()).contains("mm", "cm");
             assertThat(w.place().file()).endsWith("plate.dxf");
-            assertThat(w.place().line()).isEqualTo(10);
+            assertThat(w.place().line()).isEqualTo(12);
         });
     }
 
@@ -142,7 +142,7 @@ class DrawnCaseTest {
                 "plate.dxf",
                 drawing(
                         4,
-                        "CIRCLE;8 a;10 9;20 9;40 1;POINT;8 b;10 9;20 9;LINE;8 b;10 9;20 9;11 1;21 1;LINE;8 b;10 19;20 9;11 1;21 1;"));
+                        "CIRCLE;8 a;10 9;20 9;40 1;POINT;8 b;10 9;20 9;LINE;8 b;10 9;20 9;11 1;21 1;LINE;8 b;10 19;20 9;11 1;21 2;"));
         assertThat(folder.read(CASE).warnings()).singleElement().satisfies(w -> {
             assertThat(w.code()).isEqualTo("unused-layers");
             assertThat(w.what()).contains("'a' (1 closed loop)", "'b' (2 open lines, 1 point)");
