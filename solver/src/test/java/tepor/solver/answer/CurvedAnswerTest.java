@@ -3,6 +3,7 @@ package tepor.solver.answer;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import java.util.Arrays;
 import org.junit.jupiter.api.Test;
 import tepor.mesher.mesh.Mesh;
 import tepor.mesher.mesh.MeshOptions;
@@ -11,6 +12,7 @@ import tepor.solver.CaseText;
 import tepor.solver.CurvedMesh;
 import tepor.solver.model.Ask;
 import tepor.solver.model.Case;
+import tepor.solver.trust.ErrorIndicator;
 
 /** Rings and discs on meshes with curved sides against their closed forms (H. S. Carslaw, J. C. Jaeger 1959, 7.2). */
 class CurvedAnswerTest {
@@ -63,14 +65,16 @@ class CurvedAnswerTest {
         return CurvedMesh.about(straight, X, Y, radii);
     }
 
+    private static CaseSolutions solutions(Case subject, Mesh mesh) {
+        return new CaseSolutions(subject, mesh, () -> false);
+    }
+
     private static AskEvaluator evaluator(Case subject, Mesh mesh) {
-        return new AskEvaluator(new CaseSolutions(subject, mesh, () -> false));
+        return new AskEvaluator(solutions(subject, mesh));
     }
 
     private static double imbalance(Case subject, Mesh mesh) {
-        return LedgerBuilder.build(
-                        new CaseSolutions(subject, mesh, () -> false),
-                        subject.inputs().nominal())
+        return LedgerBuilder.build(solutions(subject, mesh), subject.inputs().nominal())
                 .imbalance();
     }
 
@@ -164,5 +168,51 @@ class CurvedAnswerTest {
         assertThat(value(evaluator, subject, "between")).isCloseTo(outer, within(1e-11 * exact));
         assertThat(value(evaluator, subject, "inner")).isCloseTo(-outer, within(1e-11 * exact));
         assertThat(imbalance(subject, mesh)).isLessThan(1e-12);
+    }
+
+    /** Rounds refine the arcs with everything else, and what they say of their error holds. */
+    @Test
+    void refinementOfTrueArcsKeepsItsWord() {
+        Case polygons = CaseText.read(HEAD
+                + region("ring", 2, 12, "plain")
+                + region("bore", 1, 12, "nothing")
+                + edge("inner", "\"holes\"", "temperature = \"1 degC\"")
+                + edge("outer", "\"outside\"", "temperature = \"0 degC\"")
+                + ask("through", "flow = \"outer\"\nwithin = \"0.001 %\""));
+        Case subject = CurvedMesh.arcs(polygons, X, Y, 1, 2);
+        Answer answer = Solver.answer(subject, Progress.NONE);
+        double flow = 2 * Math.PI / Math.log(2);
+        AskAnswer through = answer.asks().get(0);
+        assertThat(through.meshError().reached()).isTrue();
+        assertThat(Math.abs(through.value() - flow))
+                .isLessThan(through.meshError().high());
+        assertThat(answer.ledger().imbalance()).isLessThan(1e-12);
+        Mesh mesh = answer.mesh().mesh();
+        assertThat(mesh.facetCount()).isGreaterThan(2 * 2 * 24);
+        for (int f = 0; f < mesh.facetCount(); f++) {
+            assertThat(mesh.isCurvedFacet(f)).isTrue();
+        }
+        // strips, planes, rays and circles take segments for straight
+        assertThat(through.handCheck()).isNull();
+        assertThat(Solver.answer(polygons, Progress.NONE).asks().get(0).handCheck())
+                .isNotNull();
+    }
+
+    /** Halving the triangles divides the squared indicator by 16, as it does the energy of the error. */
+    @Test
+    void theIndicatorFallsAsTheEnergyOfTheErrorDoes() {
+        Case subject = CurvedMesh.arcs(ring(12), X, Y, 1, 2);
+        CaseSolutions coarse = solutions(subject, mesh(subject, 1.1, 1, 2));
+        double[] squared = ErrorIndicator.squared(
+                coarse.nominal().balance(), coarse.nominal().field());
+        double all = Arrays.stream(squared).sum();
+        CaseSolutions fine = solutions(
+                subject,
+                CurvedMesh.about(
+                        CurvedMesh.halved(CurvedMesh.about(CurvedMesh.halved(coarse.mesh()), X, Y, 1, 2)), X, Y, 1, 2));
+        double less = Arrays.stream(ErrorIndicator.squared(
+                        fine.nominal().balance(), fine.nominal().field()))
+                .sum();
+        assertThat(all / less).isBetween(100.0, 350.0);
     }
 }
