@@ -53,8 +53,14 @@ final class RegionCheck {
 
     private static void checkAreas(Mesh mesh, Section section, List<String> problems) {
         double[] area = new double[section.regionCount()];
+        // Compensated sums: of a million terms, plain ones would be off by more than is allowed.
+        double[] rest = new double[area.length];
         for (int t = 0; t < mesh.triangleCount(); t++) {
-            area[mesh.region(t)] += mesh.area(t);
+            int r = mesh.region(t);
+            double term = mesh.area(t) + rest[r];
+            double sum = area[r] + term;
+            rest[r] = term - (sum - area[r]);
+            area[r] = sum;
         }
         double[] perimeter = new double[section.regionCount()];
         for (int s = 0; s < section.segmentCount(); s++) {

@@ -36,6 +36,52 @@ class MeshSizeTest {
     }
 
     @Test
+    void evenSizeTakesHardlyMoreTrianglesThanAreNeeded() {
+        for (Section section : new Section[] {
+            SampleSections.lShape(),
+            SampleSections.plateWithRoundHole(),
+            SampleSections.moved(SampleSections.cells(3, 3, 2, (i, j) -> (i + j) % 2), 1, 0.4, 0, 0)
+        }) {
+            double h = section.extent() / 200;
+            MeshResult result = mesh(section, SizeField.even(h), 1_000_000);
+            assertThat(MeshCheck.problems(result.mesh(), section)).isEmpty();
+            double area = 0;
+            double longest = 0;
+            for (int t = 0; t < result.mesh().triangleCount(); t++) {
+                longest = Math.max(longest, longestSide(result.mesh(), t));
+                area += result.mesh().area(t);
+            }
+            assertThat(longest).isLessThanOrEqualTo(h * (1 + 1e-8));
+            // Equilateral triangles of side h; more are needed only beside segments.
+            double least = area / (Math.sqrt(3) / 4 * h * h);
+            assertThat((double) result.mesh().triangleCount()).isBetween(least, 1.25 * least);
+        }
+    }
+
+    @Test
+    void evenSizeWithOneSmallPlaceIsFollowed() {
+        Section section = SampleSections.square();
+        SizeField size = SizeField.least(SizeField.even(0.01), (x, y) -> 0.0005 + 0.3 * Math.hypot(x - 0.3, y - 0.4));
+        MeshResult result = mesh(section, size, 1_000_000);
+        assertThat(MeshCheck.problems(result.mesh(), section)).isEmpty();
+        assertThat(result.report().stops()).isEmpty();
+        assertThat(result.quality().smallestAngleMade()).isGreaterThan(ANGLE - 1e-9);
+        assertThat(longestToWanted(result.mesh(), size)).isLessThanOrEqualTo(1 + 1e-8);
+    }
+
+    @Test
+    void manyTrianglesOfUnevenSizeAreMadeInStagesAndAreSound() {
+        Section section = SampleSections.plateWithRoundHole();
+        SizeField size = (x, y) -> 0.006 * (1 + 0.5 * x);
+        MeshResult result = mesh(section, size, 1_000_000);
+        assertThat(result.mesh().triangleCount()).isGreaterThan(100_000);
+        assertThat(MeshCheck.problems(result.mesh(), section)).isEmpty();
+        assertThat(result.report().stops()).isEmpty();
+        assertThat(result.quality().smallestAngleMade()).isGreaterThan(ANGLE - 1e-9);
+        assertThat(longestToWanted(result.mesh(), size)).isLessThanOrEqualTo(1 + 1e-8);
+    }
+
+    @Test
     void sizeGradedOverSevenOrdersOfMagnitudeIsFollowedWithoutWaste() {
         Section section = SampleSections.lShape();
         SizeField size = (x, y) -> Math.min(0.3, 3e-7 + 0.25 * Math.hypot(x - 1, y - 1));
@@ -118,6 +164,15 @@ class MeshSizeTest {
         assertThatThrownBy(() -> Mesher.mesh(square, steep, () -> false)).hasMessageContaining("33°");
         MeshOptions four = new MeshOptions(ANGLE, (x, y) -> 1, 1000, 4);
         assertThatThrownBy(() -> Mesher.mesh(square, four, () -> false)).hasMessageContaining("3 or 6 nodes, not 4");
+    }
+
+    private static double longestToWanted(Mesh mesh, SizeField size) {
+        double greatest = 0;
+        for (int t = 0; t < mesh.triangleCount(); t++) {
+            double h = size.at(centroidX(mesh, t), centroidY(mesh, t));
+            greatest = Math.max(greatest, longestSide(mesh, t) / h);
+        }
+        return greatest;
     }
 
     private static double longestSide(Mesh mesh, int t) {

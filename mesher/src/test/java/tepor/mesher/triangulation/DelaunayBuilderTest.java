@@ -8,6 +8,8 @@ import java.util.HashSet;
 import java.util.Random;
 import java.util.Set;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 import org.tinfour.common.IQuadEdge;
 import org.tinfour.common.Vertex;
 import org.tinfour.standard.IncrementalTin;
@@ -33,9 +35,9 @@ class DelaunayBuilderTest {
         assertThat(sides(mesh)).isEqualTo(expected);
     }
 
-    @Test
-    void gridOfCocircularPointsIsSound() {
-        int n = 100;
+    @ParameterizedTest
+    @ValueSource(ints = {100, 500})
+    void gridOfCocircularPointsIsSound(int n) {
         double[] xy = new double[2 * n * n];
         for (int i = 0; i < n * n; i++) {
             xy[2 * i] = 0.1 * (i % n);

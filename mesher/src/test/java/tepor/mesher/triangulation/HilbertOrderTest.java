@@ -6,11 +6,13 @@ import java.util.Arrays;
 import java.util.Random;
 import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 
 class HilbertOrderTest {
-    @Test
-    void neighboursOnTheCurveAreNeighboursOnTheGrid() {
-        int n = 64;
+    @ParameterizedTest
+    @ValueSource(ints = {32, 64, 256})
+    void neighboursOnTheCurveAreNeighboursOnTheGrid(int n) {
         double[] xy = new double[2 * n * n];
         for (int i = 0; i < n * n; i++) {
             // Cell centres; the corners of the bounding box are cell centres too, so cells do not straddle.
@@ -39,5 +41,18 @@ class HilbertOrderTest {
     @Test
     void pointsAtOnePlaceKeepTheirOrder() {
         assertThat(HilbertOrder.alongCurve(new double[] {3, 3, 3, 3, 3, 3})).containsExactly(0, 1, 2);
+    }
+
+    @Test
+    void roundsGrowTwofoldAndEachFollowsTheCurve() {
+        double[] xy = new Random(2).doubles(2 * 20_000).toArray();
+        int[] order = HilbertOrder.inRounds(xy);
+        // The last round holds about half of all points; along a curve through them steps are short.
+        double last = 0;
+        for (int i = 11_000; i < 20_000; i++) {
+            last += Math.hypot(
+                    xy[2 * order[i]] - xy[2 * order[i - 1]], xy[2 * order[i] + 1] - xy[2 * order[i - 1] + 1]);
+        }
+        assertThat(last / 9000).isLessThan(1.5 / Math.sqrt(10_000));
     }
 }
