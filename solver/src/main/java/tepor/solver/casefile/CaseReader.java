@@ -10,6 +10,8 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import tepor.mesher.mending.Closeness;
+import tepor.mesher.mending.SectionCheck;
 import tepor.mesher.outline.Findings;
 import tepor.mesher.section.RegionShape;
 import tepor.mesher.section.Section;
@@ -137,8 +139,9 @@ public final class CaseReader {
         if (tables == 0 || shapes.size() < tables || regions.stream().allMatch(WrittenRegion::hole)) {
             return Optional.empty();
         }
-        return SectionBuilder.build(
-                List.copyOf(shapes.values()), whereReader.splitPoints(), drawing.snap(), drawing.unit(), findings);
+        List<RegionShape> inOrder = List.copyOf(shapes.values());
+        SectionCheck.check(inOrder, Closeness.of(inOrder, drawing.snap()), drawing.unit(), findings);
+        return SectionBuilder.build(inOrder, whereReader.splitPoints(), drawing.snap(), drawing.unit(), findings);
     }
 
     private Parts parts(

@@ -64,6 +64,7 @@ final class CommonJson {
             for (Finding finding : warnings) {
                 json.object(() -> {
                     json.text("code", finding.code());
+                    json.text("severity", finding.severity().word());
                     json.text(
                             "text",
                             finding.remedy().isEmpty() ? finding.what() : finding.what() + "; " + finding.remedy());
