@@ -12,6 +12,9 @@ final class NearPair {
     /** Pieces that part by more than this share of their length do not run side by side. */
     private static final double PARALLEL = 0.02;
 
+    /** What a wedge counts for in length over width, for each e-fold of its width. */
+    private static final double WEDGE = 5;
+
     /** What lies between the two. */
     enum Between {
         /** Nothing long: a point nears a piece. */
@@ -44,6 +47,8 @@ final class NearPair {
     double lengthOverWidth;
     /** Least width there, metres. */
     double width = Double.POSITIVE_INFINITY;
+    /** Greatest width there, metres. */
+    double widest;
     /** Middle of the strip between them there, metres; null without. */
     LineSegment middle;
 
@@ -138,8 +143,10 @@ final class NearPair {
                 double w0 = Math.abs(from + part[0] * (to - from));
                 double w1 = Math.abs(from + part[1] * (to - from));
                 length += partLength;
-                lengthOverWidth += partLength * meanInverse(w0, w1);
+                // Between sides that meet, refinement stops at the angle that they make.
+                lengthOverWidth += meets ? WEDGE * Math.abs(Math.log(w1 / w0)) : partLength * meanInverse(w0, w1);
                 width = Math.min(width, Math.max(closeness.snap(), Math.min(w0, w1)));
+                widest = Math.max(widest, Math.max(w0, w1));
                 if (partLength > longest) {
                     longest = partLength;
                     double t = 0.5 * (part[0] + part[1]);

@@ -1,5 +1,6 @@
 package tepor.mesher.mending;
 
+import java.util.List;
 import org.locationtech.jts.geom.Coordinate;
 
 /**
@@ -9,12 +10,22 @@ import org.locationtech.jts.geom.Coordinate;
  * @param first region, by its order
  * @param second region, not before the first
  * @param width least width, metres
+ * @param widest greatest width, metres; the same where a point nears a side
  * @param length over what length they run side by side, metres; 0 where a point nears a side
  * @param lengthOverWidth integral of length over width; the mesh between them grows with it
  * @param place where they are closest, metres
+ * @param pairs the pieces, as {@link DrawnPieces} counts them
  */
 record NearRun(
-        Kind kind, int first, int second, double width, double length, double lengthOverWidth, Coordinate place) {
+        Kind kind,
+        int first,
+        int second,
+        double width,
+        double widest,
+        double length,
+        double lengthOverWidth,
+        Coordinate place,
+        List<NearPair> pairs) {
     enum Kind {
         /** A point nears a side or a point of another ring. */
         NEAR_POINT,

@@ -276,6 +276,8 @@ final class NearRunFinder {
             width = group.get(0).distance;
         }
         double cost = group.stream().mapToDouble(pair -> pair.lengthOverWidth).sum();
-        return new NearRun(kind, Math.min(p, q), Math.max(p, q), width, length(group), cost, place);
+        double widest = group.stream().mapToDouble(pair -> pair.widest).max().orElse(0);
+        double most = kind == NearRun.Kind.NEAR_POINT ? width : Math.max(width, widest);
+        return new NearRun(kind, Math.min(p, q), Math.max(p, q), width, most, length(group), cost, place, group);
     }
 }

@@ -88,14 +88,15 @@ public final class SectionCheck {
     private void tell(NearRun run) {
         boolean empty = run.lengthOverWidth() > 0 && isEmpty(run.place());
         double triangles = empty ? 0 : TRIANGLES_PER_SQUARE * run.lengthOverWidth();
-        String size = unit.length(run.width())
+        String size = (run.widest() > 1.05 * run.width() ? unit.length(run.width()) + " to " : "")
+                + unit.length(run.widest())
                 + (run.length() > 0 ? " wide over a length of " + unit.length(run.length()) : "") + ", narrowest at "
                 + unit.point(run.place().x, run.place().y);
         String cost = triangles > 1000
                 ? String.format(Locale.ROOT, "; meshing it takes about %,.0f triangles", rounded(triangles))
                 : "";
         String snapRemedy =
-                "state snap = \"" + unit.length(rounded(1.5 * run.width())) + "\" under [outline], or draw them";
+                "state snap = \"" + unit.length(rounded(1.5 * run.widest())) + "\" under [outline], or draw them";
         String name = "'" + shapes.get(run.second()).name() + "'";
         boolean huge = triangles > TRIANGLES_AT_MOST;
         switch (run.kind()) {
