@@ -25,6 +25,7 @@ class ArchitectureTest {
     private static final List<String> LAYERS = List.of(
             "tepor.mesher.outline",
             "tepor.mesher.section",
+            "tepor.mesher.soundness",
             "tepor.mesher.mending",
             "tepor.mesher.triangulation",
             "tepor.mesher.refinement",

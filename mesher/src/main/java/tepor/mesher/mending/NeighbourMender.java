@@ -15,6 +15,10 @@ import org.locationtech.jts.geom.LinearRing;
 import tepor.mesher.outline.Circle;
 import tepor.mesher.outline.PathBuilder;
 import tepor.mesher.section.ArcCutter;
+import tepor.mesher.soundness.Closeness;
+import tepor.mesher.soundness.DrawnPieces;
+import tepor.mesher.soundness.NearPair;
+import tepor.mesher.soundness.NearRun;
 
 /**
  * Moves one region's border onto its neighbour's along stretches where the two nearly touch: its points move onto the

@@ -13,6 +13,11 @@ import tepor.mesher.outline.Finding;
 import tepor.mesher.outline.Findings;
 import tepor.mesher.section.OutlineCheck;
 import tepor.mesher.section.RegionShape;
+import tepor.mesher.soundness.Closeness;
+import tepor.mesher.soundness.DrawnPieces;
+import tepor.mesher.soundness.NearRun;
+import tepor.mesher.soundness.NearRunFinder;
+import tepor.mesher.soundness.SectionCheck;
 
 /**
  * Mends what the checks find in outlines, and lists each change.

@@ -9,6 +9,8 @@ import org.locationtech.jts.geom.LinearRing;
 import tepor.mesher.outline.DrawingUnit;
 import tepor.mesher.section.ArcCutter;
 import tepor.mesher.section.RegionShape;
+import tepor.mesher.soundness.Closeness;
+import tepor.mesher.soundness.PointCheck;
 
 /** Merges points of a ring that follow each other too closely, and cuts spikes and notches off. */
 final class PointMender {

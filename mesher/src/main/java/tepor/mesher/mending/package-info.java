@@ -1,7 +1,7 @@
 /**
- * What is wrong between outlines that are sound one by one (gaps, slivers, points that nearly meet), and the mending of
- * outlines.
+ * The mending of outlines, and their writing as well-known text.
  *
- * <p>Works on what was drawn, before it is laid together to a section. May not know of triangles, nor anything of heat.
+ * <p>Mends what {@code OutlineCheck} and {@code SectionCheck} find, and lists each change. May not know of triangles, nor
+ * anything of heat.
  */
 package tepor.mesher.mending;

@@ -16,6 +16,8 @@ import tepor.mesher.outline.WktReader;
 import tepor.mesher.section.OutlineCheck;
 import tepor.mesher.section.RegionShape;
 import tepor.mesher.section.SectionBuilder;
+import tepor.mesher.soundness.Closeness;
+import tepor.mesher.soundness.SectionCheck;
 
 /** Outlines for tests, drawn in millimetres; regions are called a, b, c in their order, each in a line of its own. */
 final class Drawing {

@@ -20,6 +20,7 @@ import org.locationtech.jts.operation.overlayng.OverlayNGRobust;
 import tepor.mesher.outline.Finding;
 import tepor.mesher.outline.Finding.Severity;
 import tepor.mesher.section.RegionShape;
+import tepor.mesher.soundness.Closeness;
 
 /** Random polygons, spoiled in known ways: the fault is found, mended, and the area stays within what is claimed. */
 class MendingPropertyTest {

@@ -2,13 +2,13 @@ package tepor.solver.casefile;
 
 import java.nio.file.Path;
 import java.util.List;
-import tepor.mesher.mending.Closeness;
 import tepor.mesher.mending.MendedOutline;
 import tepor.mesher.mending.OutlineMender;
 import tepor.mesher.outline.DrawingUnit;
 import tepor.mesher.outline.Finding;
 import tepor.mesher.outline.OutlineElement;
 import tepor.mesher.section.RegionShape;
+import tepor.mesher.soundness.Closeness;
 
 /**
  * The outlines of a case as they are drawn, faulty or not, and nothing else of it.

@@ -1,4 +1,4 @@
-package tepor.mesher.mending;
+package tepor.mesher.soundness;
 
 import java.util.Collection;
 import org.locationtech.jts.geom.Envelope;

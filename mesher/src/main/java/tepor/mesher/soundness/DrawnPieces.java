@@ -1,4 +1,4 @@
-package tepor.mesher.mending;
+package tepor.mesher.soundness;
 
 import java.util.ArrayList;
 import java.util.List;
@@ -18,7 +18,7 @@ import tepor.mesher.section.RegionShape;
  * The sides of all regions as one list of pieces, each seeing its region on its left; arcs are cut until their chords tell
  * the truth.
  */
-final class DrawnPieces {
+public final class DrawnPieces {
     private final List<Coordinate> start = new ArrayList<>();
     private final List<Coordinate> end = new ArrayList<>();
     private final List<Circle> circle = new ArrayList<>();
@@ -31,7 +31,7 @@ final class DrawnPieces {
      * @param shapes all regions, each sound by itself
      * @param snap metres
      */
-    DrawnPieces(List<RegionShape> shapes, double snap) {
+    public DrawnPieces(List<RegionShape> shapes, double snap) {
         List<Geometry> cut =
                 ArcCutter.cut(shapes.stream().map(RegionShape::polygons).toList(), snap);
         for (int r = 0; r < cut.size(); r++) {
@@ -70,11 +70,13 @@ final class DrawnPieces {
         return start.size();
     }
 
-    Coordinate start(int piece) {
+    /** Where a piece starts, metres. */
+    public Coordinate start(int piece) {
         return start.get(piece);
     }
 
-    Coordinate end(int piece) {
+    /** Where a piece ends, metres. */
+    public Coordinate end(int piece) {
         return end.get(piece);
     }
 
@@ -83,11 +85,12 @@ final class DrawnPieces {
     }
 
     /** Circle of a piece; null where it is straight. */
-    Circle circle(int piece) {
+    public Circle circle(int piece) {
         return circle.get(piece);
     }
 
-    int region(int piece) {
+    /** Region of a piece, by its order. */
+    public int region(int piece) {
         return owner.get(piece)[0];
     }
 
@@ -143,7 +146,7 @@ final class DrawnPieces {
     }
 
     /** Distance of a point from a piece (of its circle, where the point faces the arc), metres. */
-    double distance(Coordinate point, int piece) {
+    public double distance(Coordinate point, int piece) {
         double along = along(point, piece);
         if (along <= 0 || along >= 1) {
             return Math.min(point.distance(start(piece)), point.distance(end(piece)));

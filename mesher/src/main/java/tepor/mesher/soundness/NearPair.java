@@ -1,4 +1,4 @@
-package tepor.mesher.mending;
+package tepor.mesher.soundness;
 
 import java.util.Optional;
 import org.locationtech.jts.algorithm.Orientation;
@@ -8,7 +8,7 @@ import tepor.mesher.outline.Circle;
 import tepor.mesher.section.ArcCutter;
 
 /** Two pieces of borders that come closer than a gap's greatest width. */
-final class NearPair {
+public final class NearPair {
     /** Pieces that part by more than this share of their length do not run side by side. */
     private static final double PARALLEL = 0.02;
 
@@ -16,7 +16,7 @@ final class NearPair {
     private static final double WEDGE = 5;
 
     /** What lies between the two. */
-    enum Between {
+    public enum Between {
         /** Nothing long: a point nears a piece. */
         POINT,
         /** What is in neither region. */
@@ -29,20 +29,22 @@ final class NearPair {
         STRIP_OF_Q
     }
 
-    final int p;
-    final int q;
+    /** The one piece, as {@link DrawnPieces} counts them. */
+    public final int p;
+    /** The other piece. */
+    public final int q;
     /** Whether they touch, cross, or are joined within reach. */
     boolean meets;
     /** Whether they properly cross. */
     final boolean crosses;
     /** Least distance, metres. */
-    final double distance;
+    public final double distance;
     /** Where they are nearest, metres. */
     final Coordinate nearest;
     /** Least distance of an end from the other piece that is beyond snap but not beyond a near point's; NaN without. */
     final double endDistance;
     /** Over what length they run side by side beyond snap, metres. */
-    double length;
+    public double length;
     /** Integral of length over width there. */
     double lengthOverWidth;
     /** Least width there, metres. */

@@ -1,4 +1,4 @@
-package tepor.mesher.mending;
+package tepor.mesher.soundness;
 
 import java.util.ArrayList;
 import java.util.List;
@@ -13,9 +13,9 @@ import tepor.mesher.section.ArcCutter;
 import tepor.mesher.section.RegionShape;
 
 /** Finds points that follow each other too closely, and needles: corners much longer than wide. */
-final class PointCheck {
+public final class PointCheck {
     /** A corner this many times longer than wide, and narrower than a gap, is a needle. */
-    static final double NEEDLE = 20;
+    public static final double NEEDLE = 20;
 
     private static final int PLACES_AT_MOST = 5;
 
@@ -92,7 +92,7 @@ final class PointCheck {
     }
 
     /** Distance of the end of the shorter side from the other side, metres; 0 where the corner is not acute. */
-    static double needleWidth(Coordinate before, Coordinate here, Coordinate after) {
+    public static double needleWidth(Coordinate before, Coordinate here, Coordinate after) {
         double dot = (before.x - here.x) * (after.x - here.x) + (before.y - here.y) * (after.y - here.y);
         if (dot <= 0) {
             return 0;

@@ -1,4 +1,4 @@
-package tepor.mesher.mending;
+package tepor.mesher.soundness;
 
 import java.util.ArrayList;
 import java.util.EnumMap;
@@ -12,7 +12,7 @@ import org.locationtech.jts.index.hprtree.HPRtree;
 import org.locationtech.jts.index.strtree.STRtree;
 
 /** Finds where borders come close without meeting, or run side by side. */
-final class NearRunFinder {
+public final class NearRunFinder {
     /** A stretch shorter than this many gaps is only where borders part that meet. */
     private static final double LONG = 20;
     /** A strip along so much of the inner ring is there on purpose. */
@@ -27,7 +27,8 @@ final class NearRunFinder {
     private final double[] startOnRing;
     private int[] parent;
 
-    NearRunFinder(DrawnPieces pieces, Closeness closeness) {
+    /** Looks at all borders, for what is closer than {@link Closeness#gap}. */
+    public NearRunFinder(DrawnPieces pieces, Closeness closeness) {
         this.pieces = pieces;
         this.closeness = closeness;
         startOnRing = new double[pieces.count()];
@@ -44,7 +45,7 @@ final class NearRunFinder {
     }
 
     /** The stretches, in the order of their pieces. */
-    List<NearRun> runs() {
+    public List<NearRun> runs() {
         Map<Integer, List<NearPair>> groups = groups();
         List<NearRun> runs = new ArrayList<>();
         STRtree layers = new STRtree();

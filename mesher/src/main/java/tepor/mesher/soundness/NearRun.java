@@ -1,4 +1,4 @@
-package tepor.mesher.mending;
+package tepor.mesher.soundness;
 
 import java.util.List;
 import org.locationtech.jts.geom.Coordinate;
@@ -16,7 +16,7 @@ import org.locationtech.jts.geom.Coordinate;
  * @param place where they are closest, metres
  * @param pairs the pieces, as {@link DrawnPieces} counts them
  */
-record NearRun(
+public record NearRun(
         Kind kind,
         int first,
         int second,
@@ -26,7 +26,8 @@ record NearRun(
         double lengthOverWidth,
         Coordinate place,
         List<NearPair> pairs) {
-    enum Kind {
+    /** What lies between the two. */
+    public enum Kind {
         /** A point nears a side or a point of another ring. */
         NEAR_POINT,
         /** Between two regions, in neither. */
