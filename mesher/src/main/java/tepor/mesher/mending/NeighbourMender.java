@@ -8,10 +8,14 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.TreeMap;
+import java.util.TreeSet;
 import org.locationtech.jts.geom.Coordinate;
+import org.locationtech.jts.geom.Envelope;
 import org.locationtech.jts.geom.Geometry;
 import org.locationtech.jts.geom.LineSegment;
 import org.locationtech.jts.geom.LinearRing;
+import org.locationtech.jts.index.strtree.STRtree;
 import tepor.mesher.outline.Circle;
 import tepor.mesher.outline.PathBuilder;
 import tepor.mesher.section.ArcCutter;
@@ -33,7 +37,9 @@ final class NeighbourMender {
     private final Set<Coordinate> movable = new HashSet<>(); // points as drawn of the region that moves
     private final Map<Coordinate, Coordinate> moves = new HashMap<>();
     private final Set<Coordinate> inserts = new HashSet<>();
-    private final Set<Integer> targets = new HashSet<>();
+    private final Map<Integer, Envelope> targets = new TreeMap<>();
+    private final STRtree insertIndex = new STRtree();
+    private final STRtree targetIndex = new STRtree();
     private int movedCount;
     private int insertedCount;
 
@@ -58,44 +64,60 @@ final class NeighbourMender {
      * @param drawnThere points as drawn of the other region
      */
     Asked take(NearRun run, int region, Set<Coordinate> drawnThere) {
-        Set<Integer> own = new HashSet<>();
-        Set<Integer> other = new HashSet<>();
+        Map<Integer, Set<Integer>> facing = new TreeMap<>(); // pieces on the other side, by piece
+        Set<Integer> own = new TreeSet<>();
         boolean anySides = run.pairs().stream().anyMatch(pair -> pair.length > 0);
         for (NearPair pair : run.pairs()) {
-            if (anySides ? pair.length == 0 : pair.distance <= closeness.snap()) {
-                continue;
+            if (anySides ? pair.length > 0 : pair.distance > closeness.snap()) {
+                boolean first = pieces.region(pair.p) == region && run.first() != run.second();
+                own.add(first ? pair.p : pair.q);
+                facing.computeIfAbsent(pair.p, k -> new TreeSet<>()).add(pair.q);
+                facing.computeIfAbsent(pair.q, k -> new TreeSet<>()).add(pair.p);
             }
-            boolean first = pieces.region(pair.p) == region && (run.first() != run.second() || pair.p > pair.q);
-            own.add(first ? pair.p : pair.q);
-            other.add(first ? pair.q : pair.p);
         }
-        Set<Coordinate> drawn = new HashSet<>(drawnThere);
+        Set<Coordinate> drawn = drawnThere;
         if (run.first() == run.second()) {
-            own.forEach(piece -> drawn.removeAll(List.of(pieces.start(piece), pieces.end(piece))));
+            drawn = new HashSet<>(drawnThere);
+            for (int piece : own) {
+                drawn.remove(pieces.start(piece));
+                drawn.remove(pieces.end(piece));
+            }
         }
         int movedBefore = moves.size();
         int insertedBefore = inserts.size();
         Set<Coordinate> taken = new HashSet<>();
         for (int piece : own) {
-            for (Coordinate end : List.of(pieces.start(piece), pieces.end(piece))) {
-                if (movable.contains(end) && !drawn.contains(end) && !moves.containsKey(end)) {
-                    destination(end, other, drawn).ifPresent(to -> {
-                        moves.put(end, to);
-                        taken.add(to);
-                    });
+            take(pieces.start(piece), around(piece, pieces.previous(piece), facing), drawn, taken);
+            take(pieces.end(piece), around(piece, pieces.next(piece), facing), drawn, taken);
+        }
+        for (int piece : facing.keySet()) {
+            if (!own.contains(piece)) {
+                targets.put(piece, new Envelope(pieces.start(piece), pieces.end(piece)));
+                for (Coordinate end : List.of(pieces.start(piece), pieces.end(piece))) {
+                    double distance = nearest(end, facing.get(piece));
+                    if (drawn.contains(end) && !taken.contains(end) && distance > 0 && distance <= closeness.gap()) {
+                        inserts.add(end);
+                    }
                 }
             }
         }
-        for (int piece : other) {
-            for (Coordinate end : List.of(pieces.start(piece), pieces.end(piece))) {
-                double distance = nearest(end, own);
-                if (drawn.contains(end) && !taken.contains(end) && distance > 0 && distance <= closeness.gap()) {
-                    inserts.add(end);
-                }
-            }
-        }
-        targets.addAll(other);
         return new Asked(moves.size() - movedBefore, inserts.size() - insertedBefore);
+    }
+
+    private void take(Coordinate end, Set<Integer> among, Set<Coordinate> drawn, Set<Coordinate> taken) {
+        if (movable.contains(end) && !drawn.contains(end) && !moves.containsKey(end)) {
+            destination(end, among, drawn).ifPresent(to -> {
+                moves.put(end, to);
+                taken.add(to);
+            });
+        }
+    }
+
+    /** What faces a piece, or the one beside it. */
+    private static Set<Integer> around(int piece, int beside, Map<Integer, Set<Integer>> facing) {
+        Set<Integer> around = new TreeSet<>(facing.get(piece));
+        around.addAll(facing.getOrDefault(beside, Set.of()));
+        return around;
     }
 
     private double nearest(Coordinate point, Set<Integer> among) {
@@ -139,8 +161,10 @@ final class NeighbourMender {
                 : circle.nearest(point.x, point.y);
     }
 
-    /** The outline that moves, after all stretches were taken in. */
+    /** The outline that moves, after all stretches were taken in; to be asked once. */
     Geometry moved(Geometry moving) {
+        inserts.forEach(point -> insertIndex.insert(new Envelope(point), point));
+        targets.forEach((piece, box) -> targetIndex.insert(box, piece));
         return ArcCutter.forEachRing(moving, this::moved);
     }
 
@@ -188,7 +212,10 @@ final class NeighbourMender {
         LineSegment chord = new LineSegment(a, b);
         double lens = path.circle(i) == null ? 0 : path.circle(i).sagitta(a.distance(b));
         List<Coordinate> within = new ArrayList<>();
-        for (Coordinate point : inserts) {
+        Envelope box = new Envelope(a, b);
+        box.expandBy(closeness.gap() + lens);
+        for (Object item : insertIndex.query(box)) {
+            Coordinate point = (Coordinate) item;
             double along = chord.projectionFactor(point);
             if (along > 0
                     && along < 1
@@ -211,7 +238,10 @@ final class NeighbourMender {
     private void bend(RingPath path, int i, Coordinate middle) {
         Coordinate a = path.point(i);
         Coordinate b = path.point(path.next(i));
-        for (int target : targets) {
+        Envelope box = new Envelope(a, b);
+        box.expandBy(closeness.gap());
+        for (Object item : targetIndex.query(box)) {
+            int target = (Integer) item;
             Circle circle = pieces.circle(target);
             boolean along = circle == null
                     ? pieces.distance(a, target) <= closeness.snap() && pieces.distance(b, target) <= closeness.snap()

@@ -1,6 +1,7 @@
 package tepor.mesher.mending;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
@@ -24,7 +25,7 @@ import tepor.mesher.soundness.SectionCheck;
  *
  * <p>First the points of each ring are merged and its spikes cut ({@link PointMender}), then a region that is still faulty
  * becomes the area that it means ({@link AreaMender}), then gaps and slivers between regions are closed by moving the later
- * onto the earlier ({@link NeighbourMender}). No point moves farther than {@link Closeness#gap}. A region that is sound is
+ * onto the earlier ({@link NeighbourMender}). No point moves farther than {@link Closeness#gap} at a time. A region that is sound is
  * not touched. What cannot be mended remains as it was, and is named.
  */
 public final class OutlineMender {
@@ -166,9 +167,11 @@ public final class OutlineMender {
         RegionShape shape = shapes.get(region);
         NeighbourMender mender = new NeighbourMender(pieces, shape.polygons(), closeness);
         List<Change> closed = new ArrayList<>();
+        Map<Integer, Set<Coordinate>> drawnOf = new HashMap<>();
         for (NearRun run : runs) {
-            Set<Coordinate> drawn =
-                    new HashSet<>(List.of(shapes.get(run.first()).polygons().getCoordinates()));
+            Set<Coordinate> drawn = drawnOf.computeIfAbsent(
+                    run.first(),
+                    r -> new HashSet<>(List.of(shapes.get(r).polygons().getCoordinates())));
             NeighbourMender.Asked asked = mender.take(run, region, drawn);
             if (asked.moved() + asked.inserted() > 0) {
                 closed.add(change(run, asked));

@@ -115,12 +115,14 @@ public final class DrawnPieces {
         return ringLength.get(ring);
     }
 
-    int next(int piece) {
+    /** The piece behind, along the ring. */
+    public int next(int piece) {
         int ring = ring(piece);
         return piece + 1 < ringStart(ring + 1) ? piece + 1 : ringStart(ring);
     }
 
-    int previous(int piece) {
+    /** The piece before, along the ring. */
+    public int previous(int piece) {
         int ring = ring(piece);
         return piece > ringStart(ring) ? piece - 1 : ringStart(ring + 1) - 1;
     }

@@ -43,6 +43,8 @@ public final class NearPair {
     final Coordinate nearest;
     /** Least distance of an end from the other piece that is beyond snap but not beyond a near point's; NaN without. */
     final double endDistance;
+    /** Where that end is; null without. */
+    final Coordinate endPlace;
     /** Over what length they run side by side beyond snap, metres. */
     public double length;
     /** Integral of length over width there. */
@@ -56,13 +58,21 @@ public final class NearPair {
 
     Between between = Between.POINT;
 
-    private NearPair(int p, int q, boolean crosses, double distance, Coordinate nearest, double endDistance) {
+    private NearPair(
+            int p,
+            int q,
+            boolean crosses,
+            double distance,
+            Coordinate nearest,
+            double endDistance,
+            Coordinate endPlace) {
         this.p = p;
         this.q = q;
         this.crosses = crosses;
         this.distance = distance;
         this.nearest = nearest;
         this.endDistance = endDistance;
+        this.endPlace = endPlace;
     }
 
     /** Looks at two pieces; empty where they are farther apart than a gap. */
@@ -78,6 +88,7 @@ public final class NearPair {
         double least = crosses ? 0 : Double.POSITIVE_INFINITY;
         Coordinate nearest = crosses ? crossing(pieces, p, q) : ends[0];
         double endDistance = Double.NaN;
+        Coordinate endPlace = null;
         for (int i = 0; i < 4; i++) {
             if (fromEnds[i] < least) {
                 least = fromEnds[i];
@@ -86,13 +97,16 @@ public final class NearPair {
             // The short side itself is reported where its two points are.
             boolean ofShort = pieces.length(i < 2 ? p : q) <= closeness.nearPoint();
             if (fromEnds[i] > closeness.snap() && fromEnds[i] <= closeness.nearPoint() && !ofShort) {
-                endDistance = Double.isNaN(endDistance) ? fromEnds[i] : Math.min(endDistance, fromEnds[i]);
+                if (Double.isNaN(endDistance) || fromEnds[i] < endDistance) {
+                    endDistance = fromEnds[i];
+                    endPlace = ends[i];
+                }
             }
         }
         if (least > closeness.gap()) {
             return Optional.empty();
         }
-        NearPair pair = new NearPair(p, q, crosses, least, nearest, endDistance);
+        NearPair pair = new NearPair(p, q, crosses, least, nearest, endDistance, endPlace);
         pair.meets = least <= closeness.snap();
         if (!isSameCircle(pieces, p, q, closeness)) {
             pair.sideBySide(pieces, closeness);

@@ -268,7 +268,7 @@ public final class NearRunFinder {
                 double distance = Double.isNaN(pair.endDistance) ? pair.distance : pair.endDistance;
                 if (distance > closeness.snap() && distance < width) {
                     width = distance;
-                    place = pair.nearest;
+                    place = pair.endPlace == null ? pair.nearest : pair.endPlace;
                 }
             }
         }

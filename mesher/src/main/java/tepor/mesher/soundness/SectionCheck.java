@@ -117,7 +117,8 @@ public final class SectionCheck {
                         huge,
                         "gap",
                         run,
-                        "between " + names(run) + " there is a gap, " + size + cost,
+                        "between " + names(run) + " there is a gap, " + size
+                                + (empty ? "; nothing is in it, so that no heat passes" : cost),
                         snapRemedy + " touching; a layer that is meant is a region of its own");
             case OVERLAP ->
                 add(
