@@ -28,6 +28,8 @@ class ArchitectureTest {
             "tepor.mesher.chain",
             "tepor.mesher.dxf",
             "tepor.mesher.section",
+            "tepor.mesher.soundness",
+            "tepor.mesher.mending",
             "tepor.mesher.triangulation",
             "tepor.mesher.refinement",
             "tepor.mesher.mesh",

@@ -29,6 +29,11 @@ public record DrawingUnit(String symbol, double metres) {
         return number(length, 6) + " " + symbol;
     }
 
+    /** An area given in square metres, as text in the square of this unit, for messages. */
+    public String area(double area) {
+        return number(area / metres, 6) + " " + symbol + "²";
+    }
+
     private String number(double inMetres, int digits) {
         String text = String.format(Locale.ROOT, "%." + digits + "g", inMetres / metres);
         return text.replaceFirst("(\\.\\d*?)0+(?=e|$)", "$1").replaceFirst("\\.(?=e|$)", "");

@@ -1,5 +1,7 @@
 package tepor.mesher.outline;
 
+import java.util.Locale;
+
 /**
  * One thing found in what a user wrote: what is wrong, where, and what would be right.
  *
@@ -7,19 +9,27 @@ package tepor.mesher.outline;
  * @param code short stable identifier in lower case with hyphens, such as {@code unknown-key}
  * @param place where in the user's file
  * @param what what is wrong, as a sentence without a full stop, with the value that was found
- * @param remedy what would be right, as a sentence without a full stop; empty only for warnings that ask for nothing
+ * @param remedy what would be right, as a sentence without a full stop; empty only where nothing is asked for
  */
 public record Finding(Severity severity, String code, Place place, String what, String remedy) {
-    /** An error refuses the case; a warning goes along with the answer. */
+    /**
+     * An error refuses the case; a warning goes along with the answer, and asks to be looked at; a note says what may well
+     * be meant so.
+     */
     public enum Severity {
         ERROR,
-        WARNING
+        WARNING,
+        NOTE;
+
+        /** The word in messages and in JSON. */
+        public String word() {
+            return name().toLowerCase(Locale.ROOT);
+        }
     }
 
     /** The finding as one line of text: {@code case.toml:12:3: error: what; remedy}. */
     @Override
     public String toString() {
-        String kind = severity == Severity.ERROR ? "error" : "warning";
-        return place + ": " + kind + ": " + what + (remedy.isEmpty() ? "" : "; " + remedy);
+        return place + ": " + severity.word() + ": " + what + (remedy.isEmpty() ? "" : "; " + remedy);
     }
 }

@@ -1,12 +1,13 @@
 package tepor.mesher.outline;
 
-import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Set;
 
 /** Collects what is found while a case is read, so that all of it is reported at once. */
 public final class Findings {
-    private final List<Finding> list = new ArrayList<>();
+    private final Set<Finding> list = new LinkedHashSet<>();
 
     /** Adds an error; see {@link Finding} for the parameters. */
     public void error(String code, Place place, String what, String remedy) {
@@ -18,11 +19,14 @@ public final class Findings {
         add(new Finding(Finding.Severity.WARNING, code, place, what, remedy));
     }
 
+    /** Adds a note; see {@link Finding} for the parameters. */
+    public void note(String code, Place place, String what, String remedy) {
+        add(new Finding(Finding.Severity.NOTE, code, place, what, remedy));
+    }
+
     /** Adds a finding, unless the very same one is here already. */
     public void add(Finding finding) {
-        if (!list.contains(finding)) {
-            list.add(finding);
-        }
+        list.add(finding);
     }
 
     public boolean hasErrors() {
@@ -38,9 +42,10 @@ public final class Findings {
                 .toList();
     }
 
+    /** What goes along with an answer: warnings and notes, in the order of their places. */
     public List<Finding> warnings() {
         return all().stream()
-                .filter(f -> f.severity() == Finding.Severity.WARNING)
+                .filter(f -> f.severity() != Finding.Severity.ERROR)
                 .toList();
     }
 

@@ -159,7 +159,7 @@ public final class PathBuilder {
     }
 
     /** The circle through three points; empty where they lie on one line. */
-    static Optional<Circle> circle(Coordinate a, Coordinate b, Coordinate c) {
+    public static Optional<Circle> circle(Coordinate a, Coordinate b, Coordinate c) {
         double bx = b.x - a.x;
         double by = b.y - a.y;
         double cx = c.x - a.x;

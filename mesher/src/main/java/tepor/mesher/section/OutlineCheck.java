@@ -7,7 +7,6 @@ import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Geometry;
 import org.locationtech.jts.geom.LinearRing;
 import org.locationtech.jts.geom.Polygon;
-import org.locationtech.jts.index.strtree.STRtree;
 import org.locationtech.jts.operation.overlayng.OverlayNG;
 import org.locationtech.jts.operation.overlayng.OverlayNGRobust;
 import org.locationtech.jts.operation.valid.IsValidOp;
@@ -25,6 +24,9 @@ import tepor.mesher.outline.Place;
 public final class OutlineCheck {
     /** Pieces that overlap by less than this share of their size only miss each other by round-off. */
     private static final double NO_OVERLAP = 1e-7;
+
+    /** Arcs are cut until what is between an arc and its chord is clear, or thinner than this share of the extent. */
+    private static final double ARC_TOLERANCE = 1e-7;
 
     private static final int PLACES_AT_MOST = 10;
 
@@ -73,16 +75,31 @@ public final class OutlineCheck {
             fault("no-polygon", "has no outline", "draw it as POLYGON or MULTIPOLYGON");
             return false;
         }
-        for (Polygon piece : pieces) {
-            checkRings(piece);
+        if (!pieces.stream().allMatch(this::isFinite)) {
+            return false;
+        }
+        // The chords of arcs may cross where the arcs do not, and the other way round.
+        List<Polygon> finer = new ArrayList<>();
+        double tolerance = ARC_TOLERANCE * polygons.getEnvelopeInternal().getDiameter();
+        ArcCutter.cut(List.<Geometry>copyOf(pieces), tolerance).forEach(p -> finer.add((Polygon) p));
+        finer.forEach(this::checkRings);
+        if (sound) {
+            finer.forEach(this::checkHoles);
         }
         if (sound) {
-            pieces.forEach(this::checkHoles);
-        }
-        if (sound) {
-            checkPieces(pieces);
+            checkPieces(finer);
         }
         return sound;
+    }
+
+    private boolean isFinite(Polygon piece) {
+        for (Coordinate c : piece.getCoordinates()) {
+            if (!Double.isFinite(c.x) || !Double.isFinite(c.y)) {
+                fault("not-finite", "has a coordinate that is no finite number", "write finite numbers");
+                return false;
+            }
+        }
+        return true;
     }
 
     private void checkRings(Polygon piece) {
@@ -93,12 +110,6 @@ public final class OutlineCheck {
     }
 
     private void checkRing(LinearRing ring, Coordinate first) {
-        for (Coordinate c : ring.getCoordinates()) {
-            if (!Double.isFinite(c.x) || !Double.isFinite(c.y)) {
-                fault("not-finite", "has a coordinate that is no finite number", "write finite numbers");
-                return;
-            }
-        }
         RingCheck check = new RingCheck(ring);
         if (!check.repeated().isEmpty()) {
             findings.warning(
@@ -115,11 +126,15 @@ public final class OutlineCheck {
         faults("self-crossing", "crosses itself at ", check.crossings(), "draw it so that its sides do not cross");
         faults(
                 "spike",
-                "turns back upon itself at ",
+                "turns back upon itself, over " + unit.length(check.spikeLength()) + " at most, at ",
                 check.spikes(),
                 "take the spike's point out: it encloses nothing");
         if (check.spikes().isEmpty()) {
-            faults("self-overlap", "runs over its own line between ", check.overlaps(), "draw each side once");
+            faults(
+                    "self-overlap",
+                    "runs over its own line, over " + unit.length(check.overlapLength()) + ", between ",
+                    check.overlaps(),
+                    "draw each side once");
             faults(
                     "self-touching",
                     "touches itself at ",
@@ -129,28 +144,58 @@ public final class OutlineCheck {
     }
 
     private void checkHoles(Polygon piece) {
-        Polygon shell = piece.getFactory().createPolygon(piece.getExteriorRing());
-        List<Polygon> holes = new ArrayList<>();
-        for (int h = 0; h < piece.getNumInteriorRing(); h++) {
-            Polygon hole = piece.getFactory().createPolygon(piece.getInteriorRingN(h));
-            Geometry outside = overlay(hole, shell, OverlayNG.DIFFERENCE);
-            if (isThick(outside, hole)) {
-                Coordinate at = outside.getInteriorPoint().getCoordinate();
-                String how = overlay(hole, shell, OverlayNG.INTERSECTION).getArea() > 0 ? "partly" : "wholly";
-                fault(
-                        "hole-outside",
-                        "has a hole that lies " + how + " outside it, at " + unit.point(at.x, at.y),
-                        "keep holes within the outer ring, or draw the notch into the outer ring itself");
-            }
-            holes.add(hole);
+        if (piece.getNumInteriorRing() == 0) {
+            return;
         }
-        overlaps(holes, "hole-overlap", "has holes that overlap", "join them to one hole");
+        List<Polygon> rings = new ArrayList<>();
+        rings.add(piece.getFactory().createPolygon(piece.getExteriorRing()));
+        for (int h = 0; h < piece.getNumInteriorRing(); h++) {
+            rings.add(piece.getFactory().createPolygon(piece.getInteriorRingN(h)));
+        }
+        RingNesting nesting = new RingNesting(rings);
+        for (int h = 1; h < rings.size(); h++) {
+            checkWithin(nesting, rings, h);
+        }
+        for (RingNesting.Pair pair : nesting.pairs()) {
+            if (pair.first() > 0) {
+                overlap(nesting, rings, pair, "hole-overlap", "has holes that overlap", "join them to one hole");
+            }
+        }
         if (sound) {
             TopologyValidationError error = new IsValidOp(piece).getValidationError();
             if (error != null) {
                 faultOfLibrary(error);
             }
         }
+    }
+
+    /** Checks that a hole lies within the outer ring, which is the first. */
+    private void checkWithin(RingNesting nesting, List<Polygon> rings, int h) {
+        Polygon hole = rings.get(h);
+        Geometry outside = hole;
+        String how = "wholly";
+        if (nesting.meet(0, h)) {
+            outside = OverlayNGRobust.overlay(hole, rings.get(0), OverlayNG.DIFFERENCE);
+            if (!isThick(outside, hole)) {
+                return;
+            }
+            how = outside.getArea() < (1 - NO_OVERLAP) * hole.getArea() ? "partly" : "wholly";
+        } else if (nesting.beginsInside(h, 0)) {
+            return;
+        } else if (nesting.beginsInside(0, h)) {
+            Coordinate at = hole.getCoordinate();
+            fault(
+                    "ring-order",
+                    "has its outer ring within a ring drawn as its hole, which begins at " + unit.point(at.x, at.y),
+                    "write the outer ring first, its holes after it");
+            return;
+        }
+        Coordinate at = outside.getInteriorPoint().getCoordinate();
+        fault(
+                "hole-outside",
+                "has a hole that lies " + how + " outside it, with " + unit.area(outside.getArea()) + ", at "
+                        + unit.point(at.x, at.y),
+                "keep holes within the outer ring, or draw the notch into the outer ring itself");
     }
 
     private void faultOfLibrary(TopologyValidationError error) {
@@ -170,32 +215,40 @@ public final class OutlineCheck {
     }
 
     private void checkPieces(List<Polygon> pieces) {
-        overlaps(
-                pieces, "piece-overlap", "has pieces that overlap", "join them to one piece, or make them two regions");
-    }
-
-    private void overlaps(List<Polygon> polygons, String code, String what, String remedy) {
-        STRtree index = new STRtree();
-        for (int i = 0; i < polygons.size(); i++) {
-            index.insert(polygons.get(i).getEnvelopeInternal(), i);
-        }
-        for (int i = 0; i < polygons.size() && polygons.size() > 1; i++) {
-            List<?> near = index.query(polygons.get(i).getEnvelopeInternal());
-            for (Object item : near) {
-                int j = (Integer) item;
-                if (j > i) {
-                    Geometry common = overlay(polygons.get(i), polygons.get(j), OverlayNG.INTERSECTION);
-                    if (isThick(common, polygons.get(j))) {
-                        Coordinate at = common.getInteriorPoint().getCoordinate();
-                        fault(code, what + " at " + unit.point(at.x, at.y), remedy);
-                    }
-                }
+        RingNesting nesting = new RingNesting(pieces);
+        for (RingNesting.Pair pair : nesting.pairs()) {
+            if (pair.meet()) {
+                overlap(
+                        nesting,
+                        pieces,
+                        pair,
+                        "piece-overlap",
+                        "has pieces that overlap",
+                        "join them to one piece, or make them two regions");
+            } else {
+                overlap(
+                        nesting,
+                        pieces,
+                        pair,
+                        "piece-nested",
+                        "has a piece that lies within another, where they overlap",
+                        "draw it as a hole of the other, or leave it out, or make it a region of its own");
             }
         }
     }
 
-    private static Geometry overlay(Geometry a, Geometry b, int operation) {
-        return OverlayNGRobust.overlay(a, b, operation);
+    private void overlap(
+            RingNesting nesting,
+            List<Polygon> polygons,
+            RingNesting.Pair pair,
+            String code,
+            String what,
+            String remedy) {
+        Geometry common = nesting.common(pair);
+        if (common != null && isThick(common, polygons.get(pair.second()))) {
+            Coordinate at = common.getInteriorPoint().getCoordinate();
+            fault(code, what + " with " + unit.area(common.getArea()) + ", at " + unit.point(at.x, at.y), remedy);
+        }
     }
 
     /** Whether a geometry has an area that is more than a round-off's breadth along the border of a reference. */

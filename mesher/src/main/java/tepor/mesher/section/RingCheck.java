@@ -27,6 +27,8 @@ final class RingCheck {
     private final Set<Coordinate> spikes = new LinkedHashSet<>();
     private final Set<Coordinate> overlaps = new LinkedHashSet<>();
     private final boolean flat;
+    private double overlapLength;
+    private double spikeLength;
 
     RingCheck(LinearRing ring) {
         List<Coordinate> kept = new ArrayList<>();
@@ -74,6 +76,16 @@ final class RingCheck {
         return spikes;
     }
 
+    /** Length of the longest spike, metres. */
+    double spikeLength() {
+        return spikeLength;
+    }
+
+    /** Over what length the ring runs over itself, metres. */
+    double overlapLength() {
+        return overlapLength;
+    }
+
     /** Between which points the ring runs over a part of itself that is not its neighbour. */
     Set<Coordinate> overlaps() {
         return overlaps;
@@ -88,6 +100,7 @@ final class RingCheck {
             double dot = (before.x - here.x) * (after.x - here.x) + (before.y - here.y) * (after.y - here.y);
             if (dot > 0 && Orientation.index(before, here, after) == Orientation.COLLINEAR) {
                 spikes.add(here);
+                spikeLength = Math.max(spikeLength, Math.min(here.distance(before), here.distance(after)));
             }
         }
     }
@@ -99,39 +112,47 @@ final class RingCheck {
             index.insert(new Envelope(points[i], points[i + 1]), i);
         }
         RobustLineIntersector intersector = new RobustLineIntersector();
+        Set<Coordinate> undecided = new LinkedHashSet<>();
         for (int i = 0; i < count; i++) {
             int one = i;
             index.query(new Envelope(points[i], points[i + 1]), item -> {
                 int other = (Integer) item;
                 boolean neighbours = other == one + 1 || (one == 0 && other == count - 1);
                 if (other > one && !neighbours) {
-                    meet(one, other, intersector);
+                    meet(one, other, intersector, undecided);
                 }
             });
         }
+        for (Coordinate at : undecided) {
+            (crossesAt(at, index) ? crossings : touches).add(at);
+        }
     }
 
-    private void meet(int i, int j, RobustLineIntersector intersector) {
+    private void meet(int i, int j, RobustLineIntersector intersector, Set<Coordinate> undecided) {
         intersector.computeIntersection(points[i], points[i + 1], points[j], points[j + 1]);
         if (!intersector.hasIntersection()) {
             return;
         }
         Coordinate at = intersector.getIntersection(0).copy();
         if (intersector.getIntersectionNum() == 2) {
+            Coordinate to = intersector.getIntersection(1).copy();
             overlaps.add(at);
-            overlaps.add(intersector.getIntersection(1).copy());
-        } else if (intersector.isProper() || crossesAt(at)) {
+            overlaps.add(to);
+            overlapLength += at.distance(to);
+        } else if (intersector.isProper()) {
             crossings.add(at);
         } else {
-            touches.add(at);
+            undecided.add(at);
         }
     }
 
     /** Whether the ring crosses itself, rather than touches, in a point that is a vertex: the passes alternate around it. */
-    private boolean crossesAt(Coordinate at) {
+    private boolean crossesAt(Coordinate at, HPRtree index) {
+        List<Integer> near = new ArrayList<>();
+        index.query(new Envelope(at), item -> near.add((Integer) item));
         int count = points.length - 1;
         List<double[]> passes = new ArrayList<>(); // angle of the way in (seen backwards) and of the way out
-        for (int i = 0; i < count; i++) {
+        for (int i : near) {
             Coordinate p = points[i];
             Coordinate q = points[i + 1];
             if (p.equals2D(at)) {

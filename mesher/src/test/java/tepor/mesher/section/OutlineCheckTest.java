@@ -54,7 +54,7 @@ class OutlineCheckTest {
                 "hole-at-side   | a side            | POLYGON ((0 0, 4 0, 4 4, 0 4, 0 0), (1 0, 3 0, 2 2, 1 0))",
                 "falls-apart    | MULTIPOLYGON      | POLYGON ((0 0, 4 0, 4 4, 0 4, 0 0), (2 0, 3 2, 2 4, 1 2, 2 0))",
                 "piece-overlap  | overlap           | MULTIPOLYGON (((0 0, 4 0, 4 4, 0 4, 0 0)), ((3 3, 6 3, 6 6, 3 6, 3 3)))",
-                "piece-overlap  | overlap           | MULTIPOLYGON (((0 0, 9 0, 9 9, 0 9, 0 0)), ((3 3, 6 3, 6 6, 3 6, 3 3)))",
+                "piece-nested   | 9 mm², at         | MULTIPOLYGON (((0 0, 9 0, 9 9, 0 9, 0 0)), ((3 3, 6 3, 6 6, 3 6, 3 3)))",
                 "no-polygon     | encloses no area  | LINESTRING (0 0, 1 1)",
                 "no-polygon     | encloses no area  | POLYGON EMPTY",
                 "no-polygon     | has no outline    | MULTIPOLYGON EMPTY",

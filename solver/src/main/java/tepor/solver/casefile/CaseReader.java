@@ -14,6 +14,8 @@ import tepor.mesher.outline.Findings;
 import tepor.mesher.section.RegionShape;
 import tepor.mesher.section.Section;
 import tepor.mesher.section.SectionBuilder;
+import tepor.mesher.soundness.Closeness;
+import tepor.mesher.soundness.SectionCheck;
 import tepor.solver.casefile.AirReader.WrittenAir;
 import tepor.solver.casefile.DrawingReader.Drawing;
 import tepor.solver.casefile.EdgeReader.WrittenEdge;
@@ -140,8 +142,10 @@ public final class CaseReader {
         if (tables == 0 || shapes.size() < tables || regions.stream().allMatch(WrittenRegion::hole)) {
             return Optional.empty();
         }
+        List<RegionShape> inOrder = List.copyOf(shapes.values());
+        SectionCheck.check(inOrder, Closeness.of(inOrder, drawing.snap()), drawing.unit(), findings);
         return SectionBuilder.build(
-                List.copyOf(shapes.values()),
+                inOrder,
                 whereReader.splitPoints(),
                 whereReader.cuts(),
                 drawing.snap(),

@@ -115,7 +115,7 @@ final class OutlineFinder {
     }
 
     /** Several records of one name are one region of several pieces. */
-    private static Geometry together(List<OutlineElement> records) {
+    static Geometry together(List<OutlineElement> records) {
         List<Polygon> polygons = new ArrayList<>();
         for (OutlineElement record : records) {
             for (Object polygon : PolygonExtracter.getPolygons(record.shape())) {

@@ -7,6 +7,8 @@ import tepor.solver.answer.Inspection;
 import tepor.solver.answer.Progress;
 import tepor.solver.answer.Solver;
 import tepor.solver.casefile.CaseReader;
+import tepor.solver.casefile.DrawnCase;
+import tepor.solver.casefile.DrawnCaseReader;
 import tepor.solver.model.Case;
 
 /** What the commands ask of the solver; throws what {@link CaseReader} and {@link Solver} throw. */
@@ -36,6 +38,11 @@ public interface Calculation {
 
     /** Reads a case file. */
     Case read(Path file);
+
+    /** Reads the outlines of a case, whatever else in it is wrong. */
+    default DrawnCase readOutlines(Path file) {
+        return DrawnCaseReader.read(file);
+    }
 
     /** Answers every ask. */
     Answer answer(Case subject, Progress progress);

@@ -60,10 +60,15 @@ final class CommonJson {
     }
 
     void warnings(List<Finding> warnings) throws IOException {
-        json.array("warnings", () -> {
-            for (Finding finding : warnings) {
+        findings("warnings", warnings);
+    }
+
+    void findings(String name, List<Finding> findings) throws IOException {
+        json.array(name, () -> {
+            for (Finding finding : findings) {
                 json.object(() -> {
                     json.text("code", finding.code());
+                    json.text("severity", finding.severity().word());
                     json.text(
                             "text",
                             finding.remedy().isEmpty() ? finding.what() : finding.what() + "; " + finding.remedy());

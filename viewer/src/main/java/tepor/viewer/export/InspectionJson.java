@@ -2,6 +2,7 @@ package tepor.viewer.export;
 
 import java.io.IOException;
 import java.io.OutputStream;
+import java.util.Optional;
 import tepor.mesher.section.Section;
 import tepor.solver.answer.Inspection;
 import tepor.solver.model.Case;
@@ -17,7 +18,10 @@ public final class InspectionJson {
     private final Case subject;
     private final JsonText json;
 
-    private InspectionJson(Inspection inspection, JsonText json) {
+    private final Optional<Repair> repair;
+
+    private InspectionJson(Inspection inspection, Optional<Repair> repair, JsonText json) {
+        this.repair = repair;
         this.inspection = inspection;
         this.subject = inspection.subject();
         this.json = json;
@@ -25,8 +29,13 @@ public final class InspectionJson {
 
     /** Writes an inspection as UTF-8; leaves the stream open. */
     public static void write(Inspection inspection, OutputStream out) throws IOException {
+        write(inspection, Optional.empty(), out);
+    }
+
+    /** Writes an inspection, and what was mended, as UTF-8; leaves the stream open. */
+    public static void write(Inspection inspection, Optional<Repair> repair, OutputStream out) throws IOException {
         try (JsonText json = new JsonText(out)) {
-            new InspectionJson(inspection, json).write();
+            new InspectionJson(inspection, repair, json).write();
         }
     }
 
@@ -69,6 +78,9 @@ public final class InspectionJson {
                 json.number("seconds", inspection.secondsMesh());
             });
             common.warnings(inspection.warnings());
+            if (repair.isPresent()) {
+                repair.get().write(json);
+            }
         });
     }
 

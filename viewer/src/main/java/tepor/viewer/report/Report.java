@@ -117,7 +117,9 @@ public final class Report {
         html.element("ul", () -> {
             for (Finding finding : answer.warnings()) {
                 html.element("li", () -> {
-                    html.text(finding.what() + (finding.remedy().isEmpty() ? "" : "; " + finding.remedy()) + " ");
+                    String note = finding.severity() == Finding.Severity.NOTE ? "Note: " : "";
+                    html.text(
+                            note + finding.what() + (finding.remedy().isEmpty() ? "" : "; " + finding.remedy()) + " ");
                     html.element("span", "place", finding.place().toString());
                 });
             }
