@@ -59,7 +59,7 @@ public final class MesherBenchmark {
         List<RegionShape> shapes = new ArrayList<>();
         outline.elements()
                 .forEach(e -> shapes.add(new RegionShape("region " + shapes.size(), e.shape(), false, e.place())));
-        return SectionBuilder.build(shapes, List.of(), Double.NaN, outline.unit(), findings)
+        return SectionBuilder.build(shapes, List.of(), List.of(), Double.NaN, outline.unit(), findings)
                 .orElseThrow(() -> new IllegalArgumentException(findings.all().toString()));
     }
 

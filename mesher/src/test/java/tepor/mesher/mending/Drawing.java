@@ -73,7 +73,7 @@ final class Drawing {
         }
         if (sound) {
             SectionCheck.check(shapes, Closeness.of(shapes, Double.NaN), MILLIMETRE, findings);
-            SectionBuilder.build(shapes, List.of(), Double.NaN, MILLIMETRE, findings);
+            SectionBuilder.build(shapes, List.of(), List.of(), Double.NaN, MILLIMETRE, findings);
         }
         return findings.all();
     }

@@ -145,12 +145,7 @@ public final class CaseReader {
         List<RegionShape> inOrder = List.copyOf(shapes.values());
         SectionCheck.check(inOrder, Closeness.of(inOrder, drawing.snap()), drawing.unit(), findings);
         return SectionBuilder.build(
-                inOrder,
-                whereReader.splitPoints(),
-                whereReader.cuts(),
-                drawing.snap(),
-                drawing.unit(),
-                findings);
+                inOrder, whereReader.splitPoints(), whereReader.cuts(), drawing.snap(), drawing.unit(), findings);
     }
 
     private Parts parts(
