@@ -83,11 +83,21 @@ class ArcMendingTest {
 
     @Test
     void aHoleThatOnlyCrossesBetweenTheArcsIsFound() {
-        // The hole's arcs reach to 0.0501; its points, and all its chords, stay within the outer circle's arcs.
-        List<Finding> found = Drawing.check(Drawing.of(pipe(0.05, 0.0495, 0.0006)));
-        assertThat(found).singleElement().satisfies(f -> {
+        // The chords next to the side x = 0.05 come to 0.0485 only; the arc between reaches to 0.0502.
+        Polygon plate = Drawing.FACTORY.createPolygon(
+                Drawing.FACTORY.createLinearRing(new Coordinate[] {
+                    new Coordinate(-0.2, -0.2),
+                    new Coordinate(0.05, -0.2),
+                    new Coordinate(0.05, 0.2),
+                    new Coordinate(-0.2, 0.2),
+                    new Coordinate(-0.2, -0.2)
+                }),
+                new LinearRing[] {turned(0, 0.0502)});
+        assertThat(plate.isValid()).isTrue();
+        assertThat(Drawing.check(Drawing.of(plate))).singleElement().satisfies(f -> {
             assertThat(f.code()).isEqualTo("hole-outside");
-            assertThat(f.what()).contains("partly");
+            // A segment of a circle, r² (φ − sin φ cos φ) with φ = acos(0.05/0.0502): 1.194 mm², here by its chords.
+            assertThat(f.what()).contains("partly", "with 1.16", " mm²", "(50.09");
         });
     }
 
