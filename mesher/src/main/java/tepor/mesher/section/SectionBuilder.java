@@ -2,6 +2,7 @@ package tepor.mesher.section;
 
 import java.util.ArrayList;
 import java.util.BitSet;
+import java.util.Collection;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
@@ -60,14 +61,22 @@ public final class SectionBuilder {
             findings.error("no-material", place, what, "draw at least one region with a material");
             return Optional.empty();
         }
+        return new SectionBuilder(shapes, snap(shapes, snap), unit, findings).build(splitPoints, cuts);
+    }
+
+    /**
+     * The snap that a section of these regions has, metres.
+     *
+     * @param stated the snap stated, metres; NaN for 1e-7 of the extent
+     */
+    public static double snap(Collection<RegionShape> shapes, double stated) {
         Envelope all = new Envelope();
         shapes.forEach(s -> all.expandToInclude(s.polygons().getEnvelopeInternal()));
-        double wanted = Double.isNaN(snap) ? DEFAULT_SNAP * all.getDiameter() : snap;
+        double wanted = Double.isNaN(stated) ? DEFAULT_SNAP * all.getDiameter() : stated;
         double largest = Math.max(
                 Math.max(Math.abs(all.getMinX()), Math.abs(all.getMaxX())),
                 Math.max(Math.abs(all.getMinY()), Math.abs(all.getMaxY())));
-        double used = Math.max(wanted, LEAST_SNAP_IN_ULPS * Math.ulp(largest));
-        return new SectionBuilder(shapes, used, unit, findings).build(splitPoints, cuts);
+        return Math.max(wanted, LEAST_SNAP_IN_ULPS * Math.ulp(largest));
     }
 
     private Optional<Section> build(List<Coordinate> splitPoints, List<LineString> cuts) {

@@ -3,6 +3,7 @@ package tepor.mesher.soundness;
 import java.util.Collection;
 import org.locationtech.jts.geom.Envelope;
 import tepor.mesher.section.RegionShape;
+import tepor.mesher.section.SectionBuilder;
 
 /**
  * What counts as one point, and what as too close, in a drawing.
@@ -16,9 +17,6 @@ public record Closeness(double extent, double snap) {
     /** Points closer than this many snaps, but not within snap, are reported wherever they are. */
     public static final double NEAR_POINT_SNAPS = 10;
 
-    private static final double DEFAULT_SNAP = 1e-7;
-    private static final double LEAST_SNAP_IN_ULPS = 32;
-
     /**
      * The closeness that the section of these regions will have.
      *
@@ -28,11 +26,7 @@ public record Closeness(double extent, double snap) {
     public static Closeness of(Collection<RegionShape> shapes, double stated) {
         Envelope all = new Envelope();
         shapes.forEach(s -> all.expandToInclude(s.polygons().getEnvelopeInternal()));
-        double largest = Math.max(
-                Math.max(Math.abs(all.getMinX()), Math.abs(all.getMaxX())),
-                Math.max(Math.abs(all.getMinY()), Math.abs(all.getMaxY())));
-        double wanted = Double.isNaN(stated) ? DEFAULT_SNAP * all.getDiameter() : stated;
-        return new Closeness(all.getDiameter(), Math.max(wanted, LEAST_SNAP_IN_ULPS * Math.ulp(largest)));
+        return new Closeness(all.getDiameter(), SectionBuilder.snap(shapes, stated));
     }
 
     /** Width below which a gap is reported, metres; never below a few snaps. */

@@ -114,11 +114,7 @@ class FaultyRegionAndEdgeTest {
                 fault("where = 'top'", "«where = { of = 'bar', line = 'LINESTRING (0 0, 1 0)' }", "2 keys", "union"),
                 fault("where = 'top'", "where = { «lien = 'LINESTRING (0 0, 1 0)' }", "unknown key 'lien'", "'line'"),
                 fault("where = 'top'", "where = { «layer = 'x' }", "'layer';'x';no outline file", "LINESTRING"),
-                fault(
-                        "where = 'top'",
-                        "where = { «cut = 'LINESTRING (0 0, 1 0)' }",
-                        "'cut' in where;does not do it yet",
-                        ""),
+                fault("where = 'top'", "where = { «cut = 'POINT (0 0)' }", "'cut';POINT;a line", "LINESTRING"),
                 fault("where = 'top'", "where = { «line = 'POINT (0 0)' }", "'line';POINT;a line", "LINESTRING"),
                 fault("where = 'top'", "where = { «line = 'LINESTRING (0 50, 100 y)' }", "y", ""),
                 fault("where = 'top'", "where = { «inside = 'POINT (0 0)' }", "'inside';POINT;an area", "POLYGON"),
