@@ -19,6 +19,7 @@ final class Overlaps {
     private final double snap;
     private final List<Piece> pieces = new ArrayList<>();
     private final List<Strand> once = new ArrayList<>();
+    private boolean found;
     private int doubled;
     private Strand firstDoubled;
 
@@ -28,13 +29,16 @@ final class Overlaps {
         private final Coordinate a;
         private final Coordinate b;
         private final Circle circle;
-        private final List<Coordinate> cuts = new ArrayList<>();
+        private final double length; // along the arc if it is one
+        private final List<Coordinate> cuts = new ArrayList<>(0);
 
         private Piece(int strand, Coordinate a, Coordinate b, Circle circle) {
             this.strand = strand;
             this.a = a;
             this.b = b;
             this.circle = circle;
+            double chord = a.distance(b);
+            length = circle == null ? chord : circle.arcLength(chord);
         }
 
         /** How far along the piece a point lies, metres along the chord, or metres of arc; NaN where it is off by more than snap. */
@@ -51,11 +55,6 @@ final class Overlaps {
             }
             double turn = circle.turn(a.x, a.y, b.x, b.y);
             return circle.radius() * Math.signum(turn) * circle.turn(a.x, a.y, p.x, p.y);
-        }
-
-        private double length() {
-            double chord = a.distance(b);
-            return circle == null ? chord : circle.arcLength(chord);
         }
 
         private boolean isLike(Piece other, double snap) {
@@ -89,7 +88,11 @@ final class Overlaps {
     static Overlaps resolve(List<Strand> strands, double snap) {
         Overlaps overlaps = new Overlaps(strands, snap);
         overlaps.cut();
-        overlaps.takeOnce();
+        if (overlaps.found) {
+            overlaps.takeOnce();
+        } else {
+            overlaps.once.addAll(strands);
+        }
         return overlaps;
     }
 
@@ -130,17 +133,18 @@ final class Overlaps {
     }
 
     private void cut(Piece one, Piece other) {
-        Piece longer = one.length() >= other.length() ? one : other;
+        Piece longer = one.length >= other.length ? one : other;
         Piece shorter = longer == one ? other : one;
         if (!one.isLike(other, snap)) {
             return;
         }
         double from = longer.along(shorter.a, snap);
         double to = longer.along(shorter.b, snap);
-        double common = Math.min(longer.length(), Math.max(from, to)) - Math.max(0, Math.min(from, to));
+        double common = Math.min(longer.length, Math.max(from, to)) - Math.max(0, Math.min(from, to));
         if (!(common > 2 * snap)) {
             return; // also where either is off
         }
+        found = true;
         cutAt(longer, shorter.a, from);
         cutAt(longer, shorter.b, to);
         cutAt(shorter, longer.a, shorter.along(longer.a, snap));
@@ -148,7 +152,7 @@ final class Overlaps {
     }
 
     private void cutAt(Piece piece, Coordinate p, double along) {
-        if (along > snap && along < piece.length() - snap) {
+        if (along > snap && along < piece.length - snap) {
             piece.cuts.add(p);
         }
     }

@@ -18,18 +18,17 @@ final class PointGrid {
     /** @param reach metres, greater than zero */
     PointGrid(double reach) {
         this.reach = reach;
-        cell = 2 * reach;
+        // Wide cells, so that what is within reach seldom lies in several.
+        cell = 8 * reach;
     }
 
     /** Number of the nearest point within reach; a new one where there is none. */
     int number(Coordinate p) {
-        long i = (long) Math.floor(p.x / cell);
-        long j = (long) Math.floor(p.y / cell);
         int nearest = -1;
         double least = reach;
-        for (long di = -1; di <= 1; di++) {
-            for (long dj = -1; dj <= 1; dj++) {
-                for (int candidate : cells.getOrDefault(new Cell(i + di, j + dj), List.of())) {
+        for (long i = index(p.x - reach); i <= index(p.x + reach); i++) {
+            for (long j = index(p.y - reach); j <= index(p.y + reach); j++) {
+                for (int candidate : cells.getOrDefault(new Cell(i, j), List.of())) {
                     double distance = points.get(candidate).distance(p);
                     if (distance < least || (distance == least && (nearest < 0 || candidate < nearest))) {
                         least = distance;
@@ -41,9 +40,14 @@ final class PointGrid {
         if (nearest < 0) {
             nearest = points.size();
             points.add(p);
-            cells.computeIfAbsent(new Cell(i, j), c -> new ArrayList<>()).add(nearest);
+            cells.computeIfAbsent(new Cell(index(p.x), index(p.y)), c -> new ArrayList<>(1))
+                    .add(nearest);
         }
         return nearest;
+    }
+
+    private long index(double coordinate) {
+        return (long) Math.floor(coordinate / cell);
     }
 
     Coordinate point(int number) {

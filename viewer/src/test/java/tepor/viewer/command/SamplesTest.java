@@ -89,4 +89,17 @@ class SamplesTest {
                         + json.at("/answers/5/value").asDouble())
                 .isCloseTo(34 + 24 + 15, within(1e-6));
     }
+
+    /** Reads a drawing in DXF. The values are this program's own. */
+    @Test
+    void pipeSupport() throws IOException {
+        JsonNode json = answer("04-pipe-support");
+        holds(json, "touch", 37.1811);
+        holds(json, "loss", -63.2505);
+        holds(json, "into the beam", 7.0611);
+        // The pipe alone in its wool, without the saddle: resistances of a layer and a surface in series.
+        double wool = Math.log(107.15 / 57.15) / (2 * Math.PI * 0.045);
+        double surface = 1 / (9 * 2 * Math.PI * 0.10715);
+        assertThat((180 - 25) / (wool + surface)).isCloseTo(63.2505, within(0.05 * 63.25));
+    }
 }
