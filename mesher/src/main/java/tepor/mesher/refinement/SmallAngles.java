@@ -18,6 +18,7 @@ import tepor.mesher.section.Section;
  */
 final class SmallAngles {
     private static final double SMALL = Math.PI / 3 - 1e-9;
+    private static final double CORNER = 2 * Math.PI / 3;
     private static final double STRAIGHT = 1e-6;
     /** Distances from the apex that differ by less than this part are equal. */
     private static final double EQUAL = 1e-3;
@@ -26,6 +27,7 @@ final class SmallAngles {
     private final int[] line;
     private final int[][] linesAt;
     private final boolean[] apexAtEnd;
+    private final boolean[] cornerAtEnd;
     private final boolean[] sharpLine;
     private final Map<Long, Integer> apexOf = new HashMap<>();
 
@@ -38,6 +40,7 @@ final class SmallAngles {
         line = new int[segments];
         Arrays.setAll(line, s -> s);
         apexAtEnd = new boolean[2 * segments];
+        cornerAtEnd = new boolean[2 * segments];
         sharpLine = new boolean[segments];
         linesAt = new int[section.vertexCount()][];
         List<List<Spoke>> spokes = spokes();
@@ -55,6 +58,12 @@ final class SmallAngles {
     boolean isApex(int segment, int vertex) {
         return (section.start(segment) == vertex && apexAtEnd[2 * segment])
                 || (section.end(segment) == vertex && apexAtEnd[2 * segment + 1]);
+    }
+
+    /** Whether the segment meets another at this vertex of the section under less than 120° with material between them. */
+    boolean isCorner(int segment, int vertex) {
+        return (section.start(segment) == vertex && cornerAtEnd[2 * segment])
+                || (section.end(segment) == vertex && cornerAtEnd[2 * segment + 1]);
     }
 
     /** Whether the segment, or one that continues it straight, meets another under a small angle at any end. */
@@ -134,6 +143,10 @@ final class SmallAngles {
             double angle = turn < 0 ? turn + 2 * Math.PI : turn;
             // Between a and b, counter-clockwise, lies what is on the left of a seen outward.
             boolean solid = a.outward() ? section.solidLeft(a.segment()) : section.solidRight(a.segment());
+            if (angle < CORNER && solid) {
+                cornerAtEnd[2 * a.segment() + (a.outward() ? 0 : 1)] = true;
+                cornerAtEnd[2 * b.segment() + (b.outward() ? 0 : 1)] = true;
+            }
             if (angle < SMALL && solid) {
                 apexAtEnd[2 * a.segment() + (a.outward() ? 0 : 1)] = true;
                 apexAtEnd[2 * b.segment() + (b.outward() ? 0 : 1)] = true;
