@@ -21,6 +21,7 @@ import tepor.mesher.section.Section;
  */
 final class SmallAngles {
     private static final double SMALL = Math.PI / 3 - 1e-9;
+    private static final double CORNER = 2 * Math.PI / 3;
     private static final double STRAIGHT = 1e-6;
     /** Distances from the apex that differ by less than this part are equal. */
     private static final double EQUAL = 1e-3;
@@ -31,6 +32,7 @@ final class SmallAngles {
     private final int[] line;
     private final int[][] linesAt;
     private final boolean[] apexAtEnd;
+    private final boolean[] cornerAtEnd;
     private final boolean[] sharpLine;
     private final boolean[] bentLine;
     private final Map<Long, int[]> apexesOf = new HashMap<>();
@@ -49,6 +51,7 @@ final class SmallAngles {
         line = new int[segments];
         Arrays.setAll(line, s -> s);
         apexAtEnd = new boolean[2 * segments];
+        cornerAtEnd = new boolean[2 * segments];
         sharpLine = new boolean[segments];
         linesAt = new int[section.vertexCount()][];
         List<List<Spoke>> spokes = spokes();
@@ -68,6 +71,12 @@ final class SmallAngles {
     boolean isApex(int segment, int vertex) {
         return (section.start(segment) == vertex && apexAtEnd[2 * segment])
                 || (section.end(segment) == vertex && apexAtEnd[2 * segment + 1]);
+    }
+
+    /** Whether the segment meets another at this vertex of the section under less than 120° with material between them. */
+    boolean isCorner(int segment, int vertex) {
+        return (section.start(segment) == vertex && cornerAtEnd[2 * segment])
+                || (section.end(segment) == vertex && cornerAtEnd[2 * segment + 1]);
     }
 
     /** Whether the segment, or one that continues it straight, meets another under a small angle at any end. */
@@ -186,6 +195,10 @@ final class SmallAngles {
             double angle = Math.min(ofChords, ofChords + b.bend() - a.bend());
             // Between a and b, counter-clockwise, lies what is on the left of a seen outward.
             boolean solid = a.outward() ? section.solidLeft(a.segment()) : section.solidRight(a.segment());
+            if (angle < CORNER && solid) {
+                cornerAtEnd[2 * a.segment() + (a.outward() ? 0 : 1)] = true;
+                cornerAtEnd[2 * b.segment() + (b.outward() ? 0 : 1)] = true;
+            }
             if (angle < SMALL && solid) {
                 apexAtEnd[2 * a.segment() + (a.outward() ? 0 : 1)] = true;
                 apexAtEnd[2 * b.segment() + (b.outward() ? 0 : 1)] = true;

@@ -150,25 +150,36 @@ final class SubsegmentRule {
         boolean atA = smallAngles.isApex(segment, a);
         boolean atB = smallAngles.isApex(segment, b);
         if (atA != atB) {
-            // The power of two that falls into the middle third.
-            double shell = shellUnit * Math.scalb(1.0, Math.getExponent(length / 1.5 / shellUnit));
-            Circle circle = section.circle(segment);
-            double part = circle == null
-                    ? shell / length
-                    : 2 * Math.asin(0.5 * shell / circle.radius()) / Math.abs(turn(circle, a, b));
-            return atA ? part : 1 - part;
+            return shellPart(segment, a, b, atA, length);
         }
-        return smallAngles.isSharp(segment) ? 0.5 : evenPart(a, b, length);
+        double part = smallAngles.isSharp(segment) ? Double.NaN : evenPart(a, b, length);
+        if (!Double.isNaN(part)) {
+            return part;
+        }
+        boolean cornerAtA = smallAngles.isCorner(segment, a);
+        // Halved towards a corner of about 100°, two segments can encroach on each other without end.
+        return cornerAtA != smallAngles.isCorner(segment, b) ? shellPart(segment, a, b, cornerAtA, length) : 0.5;
     }
 
-    // Where the size is even, cuts so that all pieces come out equal in the end, rather than halves of halves.
+    // The power of two that falls into the middle third.
+    private double shellPart(int segment, int a, int b, boolean fromA, double length) {
+        double shell = shellUnit * Math.scalb(1.0, Math.getExponent(length / 1.5 / shellUnit));
+        Circle circle = section.circle(segment);
+        double part = circle == null
+                ? shell / length
+                : 2 * Math.asin(0.5 * shell / circle.radius()) / Math.abs(turn(circle, a, b));
+        return fromA ? part : 1 - part;
+    }
+
+    // Where the size is even, cuts so that all pieces come out equal in the end, rather than halves of halves; NaN
+    // where it is not, or the subsegment not too long.
     private double evenPart(int a, int b, double length) {
         double middle = sizeInMiddle(a, b);
         double least = Math.min(middle, Math.min(vertices.size(a), vertices.size(b)));
         double greatest = Math.max(middle, Math.max(vertices.size(a), vertices.size(b)));
         double pieces = Math.ceil(length / COARSER / least);
         if (greatest > EVEN * least || !(pieces >= 2 && pieces < 1e6)) {
-            return 0.5;
+            return Double.NaN;
         }
         return Math.floor(0.5 * pieces) / pieces;
     }

@@ -12,6 +12,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.Arguments;
 import org.junit.jupiter.params.provider.MethodSource;
+import org.junit.jupiter.params.provider.ValueSource;
 import tepor.mesher.refinement.RefinementReport.Reason;
 import tepor.mesher.refinement.SizeField;
 import tepor.mesher.section.Section;
@@ -81,6 +82,26 @@ class MesherStressTest {
         assertThat(result.report().count(Reason.ELEMENT_LIMIT)).isZero();
         assertThat(result.report().count(Reason.SIZE_FLOOR)).isZero();
         assertThat(result.quality().smallestAngleMade()).isGreaterThan(ANGLE - 1e-9);
+    }
+
+    @Property(tries = 600, shrinking = ShrinkingMode.OFF)
+    void nestedStarsAreMeshedAt33Degrees(@ForAll long seed) {
+        Section section = StressSections.nested(seed);
+        MeshResult result = mesh(section, Math.toRadians(33), SizeField.even(Double.POSITIVE_INFINITY));
+        assertThat(MeshCheck.problems(result.mesh(), section)).isEmpty();
+        assertThat(result.report().count(Reason.ELEMENT_LIMIT)).isZero();
+        assertThat(result.report().count(Reason.SIZE_FLOOR)).isZero();
+        assertThat(result.quality().smallestAngleMade()).isGreaterThan(Math.toRadians(33) - 1e-9);
+    }
+
+    @ParameterizedTest
+    @ValueSource(ints = {1, 2, 3, 4, 5, 6, 7, 8})
+    void patchworkOfManySmallAnglesReaches33Degrees(int seed) {
+        Section section = SampleSections.patchwork(200, seed);
+        MeshResult result = mesh(section, Math.toRadians(33), SizeField.even(Double.POSITIVE_INFINITY));
+        assertThat(MeshCheck.problems(result.mesh(), section)).isEmpty();
+        assertThat(result.report().count(Reason.SIZE_FLOOR)).isZero();
+        assertThat(result.quality().smallestAngleMade()).isGreaterThan(Math.toRadians(33) - 1e-9);
     }
 
     @Property(tries = 300, shrinking = ShrinkingMode.OFF)
