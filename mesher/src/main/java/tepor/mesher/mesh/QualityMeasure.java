@@ -1,14 +1,13 @@
 package tepor.mesher.mesh;
 
 import java.util.BitSet;
+import tepor.mesher.refinement.SmallAngles;
 import tepor.mesher.section.Section;
 
 /** Measures the angles of a mesh, and tells those the outline imposes from those that were made. */
 final class QualityMeasure {
-    private static final double SMALL = Math.PI / 3;
-
     private final Mesh mesh;
-    private final Section section;
+    private final SmallAngles smallAngles;
     /** Where the facets at each corner begin in the list that follows, and their segments. */
     private final int[] firstAt;
 
@@ -18,7 +17,7 @@ final class QualityMeasure {
 
     private QualityMeasure(Mesh mesh, Section section) {
         this.mesh = mesh;
-        this.section = section;
+        smallAngles = new SmallAngles(section);
         firstAt = new int[mesh.cornerCount() + 1];
         segmentAt = new int[2 * mesh.facetCount()];
         for (int f = 0; f < mesh.facetCount(); f++) {
@@ -99,27 +98,11 @@ final class QualityMeasure {
         int b = mesh.node(t, (corner + 2) % 3);
         for (int i = firstAt[a]; i < firstAt[a + 1]; i++) {
             for (int j = firstAt[b]; j < firstAt[b + 1]; j++) {
-                if (segmentAt[i] != segmentAt[j] && meetSmall(segmentAt[i], segmentAt[j])) {
+                if (smallAngles.meet(segmentAt[i], segmentAt[j])) {
                     return true;
                 }
             }
         }
         return false;
-    }
-
-    private boolean meetSmall(int p, int q) {
-        int apex = section.start(p) == section.start(q) || section.start(p) == section.end(q)
-                ? section.start(p)
-                : section.end(p) == section.start(q) || section.end(p) == section.end(q) ? section.end(p) : Mesh.NONE;
-        if (apex == Mesh.NONE) {
-            return false;
-        }
-        int a = section.start(p) == apex ? section.end(p) : section.start(p);
-        int b = section.start(q) == apex ? section.end(q) : section.start(q);
-        double ax = section.x(a) - section.x(apex);
-        double ay = section.y(a) - section.y(apex);
-        double bx = section.x(b) - section.x(apex);
-        double by = section.y(b) - section.y(apex);
-        return Math.abs(Math.atan2(ax * by - ay * bx, ax * bx + ay * by)) < SMALL;
     }
 }

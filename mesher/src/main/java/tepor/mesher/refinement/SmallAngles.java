@@ -16,10 +16,10 @@ import tepor.mesher.section.Section;
  * <p>There two rules keep refinement from running away: segments are cut at equal distances from the apex, and a sharp
  * triangle whose shortest side joins both segments at equal distance is left alone. Sources: Ruppert 1995, J. Algorithms
  * 18:548–585 (shells); Miller, Pav & Walkington 2003, <em>When and why Ruppert's algorithm works</em>, IMR (triangles left
- * alone). Segments that continue each other straight or on the same circle count as one line; angles at arcs are those of their tangents,
- * or of their chords where these are smaller.
+ * alone). Segments that continue each other straight or on the same circle count as one line; angles at arcs are those of
+ * their tangents, or of their chords where these are smaller.
  */
-final class SmallAngles {
+public final class SmallAngles {
     private static final double SMALL = Math.PI / 3 - 1e-9;
     private static final double CORNER = 2 * Math.PI / 3;
     private static final double STRAIGHT = 1e-6;
@@ -45,7 +45,8 @@ final class SmallAngles {
      */
     private record Spoke(int segment, boolean outward, double direction, double bend) {}
 
-    SmallAngles(Section section) {
+    /** Looks at all vertices of the section. */
+    public SmallAngles(Section section) {
         this.section = section;
         int segments = section.segmentCount();
         line = new int[segments];
@@ -65,6 +66,11 @@ final class SmallAngles {
             linesAt[v] = linesOf(spokes.get(v));
             findApex(v, spokes.get(v));
         }
+    }
+
+    /** Whether two segments, or lines that they are part of, meet under a small angle with material in it. */
+    public boolean meet(int segment, int other) {
+        return line[segment] != line[other] && apexesOf.containsKey(pair(line[segment], line[other]));
     }
 
     /** Whether the segment meets another under a small angle at this vertex of the section. */
