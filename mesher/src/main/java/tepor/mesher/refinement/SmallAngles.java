@@ -21,7 +21,10 @@ import tepor.mesher.section.Section;
  */
 public final class SmallAngles {
     private static final double SMALL = Math.PI / 3 - 1e-9;
-    private static final double CORNER = 2 * Math.PI / 3;
+    /** Corners between these angles are cut at shells too: right angles do as well, and with fewer triangles, without. */
+    private static final double CORNER_LEAST = Math.toRadians(92);
+
+    private static final double CORNER_GREATEST = Math.toRadians(120);
     private static final double STRAIGHT = 1e-6;
     /** Distances from the apex that differ by less than this part are equal. */
     private static final double EQUAL = 1e-3;
@@ -79,7 +82,7 @@ public final class SmallAngles {
                 || (section.end(segment) == vertex && apexAtEnd[2 * segment + 1]);
     }
 
-    /** Whether the segment meets another at this vertex of the section under less than 120° with material between them. */
+    /** Whether the segment meets another at this vertex of the section under 92° to 120° with material between them. */
     boolean isCorner(int segment, int vertex) {
         return (section.start(segment) == vertex && cornerAtEnd[2 * segment])
                 || (section.end(segment) == vertex && cornerAtEnd[2 * segment + 1]);
@@ -201,7 +204,7 @@ public final class SmallAngles {
             double angle = Math.min(ofChords, ofChords + b.bend() - a.bend());
             // Between a and b, counter-clockwise, lies what is on the left of a seen outward.
             boolean solid = a.outward() ? section.solidLeft(a.segment()) : section.solidRight(a.segment());
-            if (angle < CORNER && solid) {
+            if (angle > CORNER_LEAST && angle < CORNER_GREATEST && solid) {
                 cornerAtEnd[2 * a.segment() + (a.outward() ? 0 : 1)] = true;
                 cornerAtEnd[2 * b.segment() + (b.outward() ? 0 : 1)] = true;
             }

@@ -74,7 +74,7 @@ class MesherStressTest {
         }
     }
 
-    @Property(tries = 3000, shrinking = ShrinkingMode.OFF)
+    @Property(tries = 2000, shrinking = ShrinkingMode.OFF)
     void nestedStarsAreMeshedWell(@ForAll long seed) {
         Section section = StressSections.nested(seed);
         MeshResult result = mesh(section, ANGLE, SizeField.even(Double.POSITIVE_INFINITY));
