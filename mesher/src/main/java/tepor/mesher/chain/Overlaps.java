@@ -29,6 +29,7 @@ final class Overlaps {
         private final Coordinate a;
         private final Coordinate b;
         private final Circle circle;
+        private final double chord;
         private final double length; // along the arc if it is one
         private final List<Coordinate> cuts = new ArrayList<>(0);
 
@@ -37,13 +38,12 @@ final class Overlaps {
             this.a = a;
             this.b = b;
             this.circle = circle;
-            double chord = a.distance(b);
+            chord = a.distance(b);
             length = circle == null ? chord : circle.arcLength(chord);
         }
 
         /** How far along the piece a point lies, metres along the chord, or metres of arc; NaN where it is off by more than snap. */
         private double along(Coordinate p, double snap) {
-            double chord = a.distance(b);
             if (circle == null) {
                 double ux = (b.x - a.x) / chord;
                 double uy = (b.y - a.y) / chord;

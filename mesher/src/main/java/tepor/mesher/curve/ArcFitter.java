@@ -10,7 +10,7 @@ import tepor.mesher.outline.PathBuilder;
  */
 public final class ArcFitter {
     private static final int SAMPLES = 8;
-    private static final int DEEPEST = 18;
+    private static final int DEEPEST = 12;
     /** What is off the chord by less than this share of the tolerance is straight. */
     private static final double STRAIGHT = 1e-3;
     /** Distances are looked at in a few points only: room for what lies between them. */
@@ -56,7 +56,9 @@ public final class ArcFitter {
             points[i][0] = sample[0];
             points[i][1] = sample[1];
         }
-        if (depth == 0 || isStraight(a, b)) {
+        // What is not finite is no curve; whoever reads the path finds that out.
+        boolean finite = Double.isFinite(a[0] + a[1] + a[2] + a[3] + b[0] + b[1] + b[2] + b[3]);
+        if (depth == 0 || !finite || isStraight(a, b)) {
             path.lineTo(end);
             return;
         }

@@ -117,7 +117,7 @@ class EntityAreaTest {
         DrawnDxf drawn = DrawnDxf.read(DrawnDxf.file("""
                 CIRCLE;8 a;10 0;20 0;40 1
                 CIRCLE;8 a;10 0;20 0;40 10
-                CIRCLE;8 a;10 0;20 0;40 9.9
+                ARC;8 a;10 0;20 0;40 9.9;50 15;51 375
                 CIRCLE;8 a;10 6;20 0;40 2
                 CIRCLE;8 a;10 6;20 0;40 1
                 """)).sound();
