@@ -21,10 +21,14 @@ import tepor.mesher.section.Section;
  */
 public final class SmallAngles {
     private static final double SMALL = Math.PI / 3 - 1e-9;
-    /** Corners between these angles are cut at shells too: right angles do as well, and with fewer triangles, without. */
-    private static final double CORNER_LEAST = Math.toRadians(92);
+    /**
+     * Corners between these angles are cut at shells too: halved towards such a corner, two segments may encroach on each
+     * other without end when 33° are asked. Right angles do as well, and with fewer triangles, without.
+     */
+    private static final double CORNER_LEAST = Math.toRadians(80);
 
-    private static final double CORNER_GREATEST = Math.toRadians(120);
+    private static final double CORNER_GREATEST = Math.toRadians(160);
+    private static final double ABOUT_RIGHT = Math.toRadians(0.1);
     private static final double STRAIGHT = 1e-6;
     /** Distances from the apex that differ by less than this part are equal. */
     private static final double EQUAL = 1e-3;
@@ -82,7 +86,7 @@ public final class SmallAngles {
                 || (section.end(segment) == vertex && apexAtEnd[2 * segment + 1]);
     }
 
-    /** Whether the segment meets another at this vertex of the section under 92° to 120° with material between them. */
+    /** Whether the segment meets another at this vertex under 80° to 160°, not 90°, with material between them. */
     boolean isCorner(int segment, int vertex) {
         return (section.start(segment) == vertex && cornerAtEnd[2 * segment])
                 || (section.end(segment) == vertex && cornerAtEnd[2 * segment + 1]);
@@ -201,10 +205,12 @@ public final class SmallAngles {
             Spoke b = spokes.get((i + 1) % spokes.size());
             double turn = b.direction() - a.direction();
             double ofChords = turn < 0 ? turn + 2 * Math.PI : turn;
-            double angle = Math.min(ofChords, ofChords + b.bend() - a.bend());
+            double ofTangents = ofChords + b.bend() - a.bend();
+            double angle = Math.min(ofChords, ofTangents);
             // Between a and b, counter-clockwise, lies what is on the left of a seen outward.
             boolean solid = a.outward() ? section.solidLeft(a.segment()) : section.solidRight(a.segment());
-            if (angle > CORNER_LEAST && angle < CORNER_GREATEST && solid) {
+            boolean right = Math.abs(ofTangents - Math.PI / 2) < ABOUT_RIGHT;
+            if (ofTangents > CORNER_LEAST && ofTangents < CORNER_GREATEST && !right && solid) {
                 cornerAtEnd[2 * a.segment() + (a.outward() ? 0 : 1)] = true;
                 cornerAtEnd[2 * b.segment() + (b.outward() ? 0 : 1)] = true;
             }

@@ -157,7 +157,6 @@ final class SubsegmentRule {
             return part;
         }
         boolean cornerAtA = smallAngles.isCorner(segment, a);
-        // Halved towards a corner of about 100°, two segments can encroach on each other without end.
         return cornerAtA != smallAngles.isCorner(segment, b) ? shellPart(segment, a, b, cornerAtA, length) : 0.5;
     }
 

@@ -26,8 +26,13 @@ public final class FirstSizes implements SizeField {
     /** Size at a singular point, relative to its clearance. */
     private static final double TIP = 0.04;
 
-    /** Many singular points, as of a grid of bars, are met by the adaptive rounds; the first mesh stays small. */
-    private static final int MANY = 300;
+    /**
+     * For so many singular points the size at each is that above; for more, as of a grid of bars or a ragged outline, it is
+     * greater by as much, so that the first mesh stays small. The adaptive rounds find out which of them matter.
+     */
+    private static final double MANY = 150;
+    /** Sizes at singular points above this part of the clearance change nothing that the outline does not ask for. */
+    private static final double LARGEST_TIP = 0.5;
 
     private static final int CELLS = 128;
 
@@ -51,8 +56,8 @@ public final class FirstSizes implements SizeField {
         double count = subject.mesh().nodesPerTriangle() == 3 ? TRIANGLES_LINEAR : TRIANGLES_QUADRATIC;
         base = Math.min(subject.mesh().size(), LONGEST_TO_MEAN * Math.sqrt(4 / Math.sqrt(3) * area / count));
         List<SingularPoints.Point> points = SingularPoints.of(subject);
-        tip = points.size() > MANY ? 2 * TIP : TIP;
-        for (SingularPoints.Point point : points) {
+        tip = TIP * Math.max(1, points.size() / MANY);
+        for (SingularPoints.Point point : tip < LARGEST_TIP ? points : List.<SingularPoints.Point>of()) {
             double reach = base / GRADATION;
             tree.insert(
                     new Envelope(point.x() - reach, point.x() + reach, point.y() - reach, point.y() + reach), point);
