@@ -3,16 +3,16 @@ package tepor.mesher.section;
 import java.util.ArrayList;
 import java.util.List;
 import org.locationtech.jts.geom.Coordinate;
+import org.locationtech.jts.geom.CoordinateSequence;
 import org.locationtech.jts.geom.Geometry;
 import org.locationtech.jts.geom.GeometryFactory;
 import org.locationtech.jts.geom.LineString;
-import org.locationtech.jts.geom.LinearRing;
-import org.locationtech.jts.geom.Polygon;
+import org.locationtech.jts.geom.util.GeometryTransformer;
 import tepor.mesher.outline.Arcs;
 import tepor.mesher.outline.Circle;
 
 /** Puts short chords in place of arcs, for questions that JTS answers for straight pieces only. */
-final class ArcFlattener {
+public final class ArcFlattener {
     /** However fine the tolerance, an arc of 30° takes no more chords. */
     private static final int MOST = 1024;
 
@@ -20,22 +20,18 @@ final class ArcFlattener {
     private final GeometryFactory factory = new GeometryFactory();
 
     /** @param tolerance greatest distance of a chord from its arc, metres */
-    ArcFlattener(double tolerance) {
+    public ArcFlattener(double tolerance) {
         this.tolerance = tolerance;
     }
 
-    /** Polygons with their rings of straight pieces. */
-    Geometry flatten(Geometry polygons) {
-        Polygon[] flat = new Polygon[polygons.getNumGeometries()];
-        for (int i = 0; i < flat.length; i++) {
-            Polygon polygon = (Polygon) polygons.getGeometryN(i);
-            LinearRing[] holes = new LinearRing[polygon.getNumInteriorRing()];
-            for (int h = 0; h < holes.length; h++) {
-                holes[h] = factory.createLinearRing(points(polygon.getInteriorRingN(h)));
+    /** A geometry of straight pieces in the place of one with arcs. */
+    public Geometry flatten(Geometry geometry) {
+        return new GeometryTransformer() {
+            @Override
+            protected CoordinateSequence transformCoordinates(CoordinateSequence coordinates, Geometry parent) {
+                return parent instanceof Arcs ? createCoordinateSequence(points((LineString) parent)) : coordinates;
             }
-            flat[i] = factory.createPolygon(factory.createLinearRing(points(polygon.getExteriorRing())), holes);
-        }
-        return flat.length == 1 ? flat[0] : factory.createMultiPolygon(flat);
+        }.transform(geometry);
     }
 
     private Coordinate[] points(LineString line) {

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.BitSet;
 import java.util.List;
+import tepor.mesher.outline.Circle;
 
 /**
  * Runs of boundary segments: pieces of boundary between corners over 30° or junctions, a junction being a vertex where an
@@ -70,11 +71,19 @@ public final class BoundaryRuns {
     }
 
     private boolean isSmooth(int s, int t) {
-        double ux = section.x(last(s)) - section.x(first(s));
-        double uy = section.y(last(s)) - section.y(first(s));
-        double vx = section.x(last(t)) - section.x(first(t));
-        double vy = section.y(last(t)) - section.y(first(t));
-        return ux * vx + uy * vy >= CORNER_COSINE * Math.hypot(ux, uy) * Math.hypot(vx, vy) * (1 - 1e-12);
+        double turn = direction(t, false) - direction(s, true);
+        return Math.cos(turn) >= CORNER_COSINE * (1 - 1e-12);
+    }
+
+    /** Direction of a segment, material on its left, at its last or first vertex: of its tangent if it is an arc. */
+    private double direction(int s, boolean atLast) {
+        double ax = section.x(first(s));
+        double ay = section.y(first(s));
+        double bx = section.x(last(s));
+        double by = section.y(last(s));
+        Circle circle = section.circle(s);
+        double bend = circle == null ? 0 : 0.5 * circle.turn(ax, ay, bx, by);
+        return Math.atan2(by - ay, bx - ax) + (atLast ? bend : -bend);
     }
 
     private List<int[]> runs() {

@@ -6,6 +6,11 @@ import static tepor.mesher.section.Drawn.box;
 import java.util.BitSet;
 import java.util.List;
 import org.junit.jupiter.api.Test;
+import org.locationtech.jts.geom.Coordinate;
+import org.locationtech.jts.geom.GeometryFactory;
+import org.locationtech.jts.geom.Polygon;
+import tepor.mesher.outline.Circle;
+import tepor.mesher.outline.PathBuilder;
 
 class BoundaryRunsTest {
     private static BitSet all(Section section) {
@@ -42,6 +47,45 @@ class BoundaryRunsTest {
         });
         Section eleven = new Drawn().region("a", polygon(11)).build();
         assertThat(BoundaryRuns.of(eleven, all(eleven))).hasSize(11);
+    }
+
+    @Test
+    void anArcGoesOnWhereItsTangentDoes() {
+        // A stadium: two sides that go over into half circles.
+        GeometryFactory factory = new GeometryFactory();
+        Coordinate a = new Coordinate(0, 0);
+        Polygon stadium = factory.createPolygon(new PathBuilder(a)
+                .lineTo(new Coordinate(4, 0))
+                .arcTo(new Circle(4, 1, 1), new Coordinate(4, 2), true)
+                .lineTo(new Coordinate(0, 2))
+                .arcTo(new Circle(0, 1, 1), a, true)
+                .ring(factory));
+        Section smooth = new Drawn().add("stadium", stadium, false).build();
+        assertThat(BoundaryRuns.of(smooth, all(smooth))).hasSize(1);
+        // An arc that leaves a side at 35° and turns back by 30°, so that its chord leaves the side at 20°.
+        double angle = Math.toRadians(35);
+        Circle circle = new Circle(4 + 4 * Math.sin(angle), -4 * Math.cos(angle), 4);
+        Coordinate end = new Coordinate(
+                circle.x() - 4 * Math.sin(Math.toRadians(5)), circle.y() + 4 * Math.cos(Math.toRadians(5)));
+        Polygon cornered = factory.createPolygon(new PathBuilder(a)
+                .lineTo(new Coordinate(4, 0))
+                .arcTo(circle, end, false)
+                .lineTo(new Coordinate(end.x, 5))
+                .lineTo(new Coordinate(0, 5))
+                .lineTo(a)
+                .ring(factory));
+        Section section = new Drawn().add("cornered", cornered, false).build();
+        assertThat(BoundaryRuns.of(section, all(section))).hasSize(5);
+    }
+
+    @Test
+    void aCutIsNoJunction() {
+        Section section = new Drawn()
+                .region("a", box(0, 0, 1, 1))
+                .cut(new Coordinate(0.5, -1), new Coordinate(0.5, 2))
+                .tryBuild()
+                .orElseThrow();
+        assertThat(BoundaryRuns.of(section, all(section))).hasSize(4);
     }
 
     @Test

@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Optional;
 import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Geometry;
+import org.locationtech.jts.geom.GeometryFactory;
 import org.locationtech.jts.geom.LineString;
 import org.locationtech.jts.io.ParseException;
 import org.locationtech.jts.io.WKTReader;
@@ -52,6 +53,11 @@ final class Drawn {
 
     Drawn snap(double metres) {
         snap = metres;
+        return this;
+    }
+
+    Drawn cut(Coordinate from, Coordinate to) {
+        cuts.add(new GeometryFactory().createLineString(new Coordinate[] {from, to}));
         return this;
     }
 

@@ -13,6 +13,7 @@ import org.locationtech.jts.operation.distance.IndexedFacetDistance;
 import org.locationtech.jts.operation.polygonize.Polygonizer;
 import tepor.mesher.mesh.SegmentCurve;
 import tepor.mesher.refinement.SizeField;
+import tepor.mesher.section.ArcFlattener;
 import tepor.mesher.section.Section;
 import tepor.solver.model.Case;
 import tepor.solver.model.Edge;
@@ -58,7 +59,7 @@ public final class AskedSizes implements SizeField {
         if (refinement.near() instanceof Target.OfEdge target) {
             return edge(section, target.edge());
         }
-        return refinement.geometry();
+        return new ArcFlattener(1e-4 * section.extent()).flatten(refinement.geometry());
     }
 
     private static Geometry edge(Section section, Edge edge) {
