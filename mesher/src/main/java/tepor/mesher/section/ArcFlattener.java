@@ -13,8 +13,8 @@ import tepor.mesher.outline.Circle;
 
 /** Puts short chords in place of arcs, for questions that JTS answers for straight pieces only. */
 public final class ArcFlattener {
-    /** However fine the tolerance, an arc of 30° takes no more chords. */
-    private static final int MOST = 1024;
+    /** Tolerance of a thousand chords to 30°, relative to the radius. */
+    private static final double FINEST = 3e-8;
 
     private final double tolerance;
     private final GeometryFactory factory = new GeometryFactory();
@@ -53,18 +53,11 @@ public final class ArcFlattener {
 
     private void append(List<Coordinate> points, Coordinate to, Circle circle) {
         Coordinate from = points.get(points.size() - 1);
-        if (circle != null) {
-            double turn = circle.turn(from.x, from.y, to.x, to.y);
-            // A chord that turns by a is off its arc by r (1 - cos(a/2)), about r a²/8.
-            double step = Math.sqrt(8 * tolerance / circle.radius());
-            int count = (int) Math.min(MOST, Math.ceil(Math.abs(turn) / step));
-            double start = Math.atan2(from.y - circle.y(), from.x - circle.x());
-            for (int i = 1; i < count; i++) {
-                double angle = start + turn * i / count;
-                points.add(new Coordinate(
-                        circle.x() + circle.radius() * Math.cos(angle),
-                        circle.y() + circle.radius() * Math.sin(angle)));
-            }
+        // However fine the tolerance, an arc of 30° takes no more chords than are of use.
+        double least = circle == null ? tolerance : Math.max(tolerance, FINEST * circle.radius());
+        double[] xy = SegmentCurve.points(circle, from.x, from.y, to.x, to.y, least);
+        for (int k = 2; k < xy.length - 2; k += 2) {
+            points.add(new Coordinate(xy[k], xy[k + 1]));
         }
         points.add(to);
     }

@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.BitSet;
 import java.util.List;
-import tepor.mesher.outline.Circle;
 
 /**
  * Runs of boundary segments: pieces of boundary between corners over 30° or junctions, a junction being a vertex where an
@@ -71,19 +70,12 @@ public final class BoundaryRuns {
     }
 
     private boolean isSmooth(int s, int t) {
-        double turn = direction(t, false) - direction(s, true);
-        return Math.cos(turn) >= CORNER_COSINE * (1 - 1e-12);
-    }
-
-    /** Direction of a segment, material on its left, at its last or first vertex: of its tangent if it is an arc. */
-    private double direction(int s, boolean atLast) {
-        double ax = section.x(first(s));
-        double ay = section.y(first(s));
-        double bx = section.x(last(s));
-        double by = section.y(last(s));
-        Circle circle = section.circle(s);
-        double bend = circle == null ? 0 : 0.5 * circle.turn(ax, ay, bx, by);
-        return Math.atan2(by - ay, bx - ax) + (atLast ? bend : -bend);
+        boolean startsAtStart = section.solidLeft(t);
+        boolean endsAtEnd = section.solidLeft(s);
+        // Both as seen from the vertex between them.
+        double onward = SegmentCurve.direction(section, t, startsAtStart);
+        double back = SegmentCurve.direction(section, s, !endsAtEnd);
+        return -Math.cos(onward - back) >= CORNER_COSINE * (1 - 1e-12);
     }
 
     private List<int[]> runs() {

@@ -73,23 +73,7 @@ public final class Cavity {
         if (!sees(x, y, side) || (other >= 0 && !sees(x, y, other))) {
             return false;
         }
-        begin(x, y);
-        open = other < 0;
-        leftCode = mesh.constraint[side];
-        rightCode = open ? Triangulation.NONE : mesh.constraint[other];
-        take(side / 3);
-        if (!open) {
-            take(other / 3);
-        }
-        push(Triangulation.previous(side));
-        push(Triangulation.next(side));
-        run();
-        firstPart = borderCount;
-        if (!open) {
-            push(Triangulation.previous(other));
-            push(Triangulation.next(other));
-            run();
-        }
+        digBothSides(x, y, side);
         collect();
         return true;
     }
@@ -102,9 +86,22 @@ public final class Cavity {
      * @return false if a constrained side, {@link #hindrance}, hides the point: then it must not be inserted
      */
     public boolean digAside(double x, double y, int side) {
+        aside = true;
+        digBothSides(x, y, side);
+        aside = false;
+        for (int i = 0; i < borderCount; i++) {
+            if (!sideSees(x, y, border[i])) {
+                hindrance = border[i];
+                return false;
+            }
+        }
+        collect();
+        return true;
+    }
+
+    private void digBothSides(double x, double y, int side) {
         int other = mesh.twin[side];
         begin(x, y);
-        aside = true;
         open = other < 0;
         leftCode = mesh.constraint[side];
         rightCode = open ? Triangulation.NONE : mesh.constraint[other];
@@ -121,15 +118,6 @@ public final class Cavity {
             push(Triangulation.next(other));
             run();
         }
-        aside = false;
-        for (int i = 0; i < borderCount; i++) {
-            if (!sideSees(x, y, border[i])) {
-                hindrance = border[i];
-                return false;
-            }
-        }
-        collect();
-        return true;
     }
 
     /** The side that made {@link #digAside} fail. */

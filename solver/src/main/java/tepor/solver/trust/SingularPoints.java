@@ -8,8 +8,8 @@ import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Envelope;
 import org.locationtech.jts.geom.LineSegment;
 import org.locationtech.jts.index.strtree.STRtree;
-import tepor.mesher.mesh.SegmentCurve;
 import tepor.mesher.section.Section;
+import tepor.mesher.section.SegmentCurve;
 import tepor.solver.model.Case;
 import tepor.solver.model.Edge;
 

@@ -1,4 +1,4 @@
-package tepor.mesher.mesh;
+package tepor.mesher.section;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;

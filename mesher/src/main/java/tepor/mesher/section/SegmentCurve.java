@@ -1,7 +1,6 @@
-package tepor.mesher.mesh;
+package tepor.mesher.section;
 
 import tepor.mesher.outline.Circle;
-import tepor.mesher.section.Section;
 
 /** How a segment of a section runs between its vertices: straight, or along the shorter arc of its circle. */
 public final class SegmentCurve {
