@@ -21,6 +21,9 @@ final class DxfDecoder {
     private static final Pattern CODE_PAGE = variable("DWGCODEPAGE", 3);
     private static final Pattern ESCAPE = Pattern.compile("\\\\[Uu]\\+([0-9A-Fa-f]{4})|%%([cdpCDP%]|[0-9]{3})");
 
+    /** That of UTF-8, read as bytes. */
+    private static final String BYTE_ORDER_MARK = "\u00EF\u00BB\u00BF";
+
     private DxfDecoder() {}
 
     private static Pattern variable(String name, int code) {
@@ -57,6 +60,9 @@ final class DxfDecoder {
 
     private static String decode(byte[] bytes, String head, DxfFaults faults) {
         Optional<String> utf8 = strictly(bytes, StandardCharsets.UTF_8);
+        if (head.startsWith(BYTE_ORDER_MARK) && utf8.isPresent()) {
+            return utf8.get();
+        }
         String version = find(VERSION, head);
         String page = find(CODE_PAGE, head);
         if (version.isEmpty() ? page.isEmpty() : version.compareTo(FIRST_UTF8) >= 0) {

@@ -110,6 +110,7 @@ final class DxfDocumentReader {
         switch (record.type()) {
             case "SECTION" -> begin(record);
             case "ENDSEC" -> {
+                checkEnded(record);
                 endBlock();
                 section = "";
                 parent = null;
@@ -189,6 +190,16 @@ final class DxfDocumentReader {
         parent = null;
     }
 
+    private void checkEnded(DxfRecord record) {
+        if (parent != null && parent.type().equals("POLYLINE")) {
+            faults.warning(
+                    "no-seqend",
+                    record.line(),
+                    "the POLYLINE of line " + parent.line() + " is not ended by SEQEND before this " + record.type(),
+                    "save the drawing again, lest vertices be missing");
+        }
+    }
+
     private void takeEntity(DxfRecord record, List<DxfRecord> entities) {
         boolean part = record.type().equals("VERTEX") || record.type().equals("ATTRIB");
         if (record.type().equals("SEQEND")) {
@@ -199,13 +210,7 @@ final class DxfDocumentReader {
             parent.children().add(record);
             return;
         }
-        if (parent != null && parent.type().equals("POLYLINE")) {
-            faults.warning(
-                    "no-seqend",
-                    record.line(),
-                    "the POLYLINE of line " + parent.line() + " is not ended by SEQEND before this " + record.type(),
-                    "save the drawing again, lest vertices be missing");
-        }
+        checkEnded(record);
         parent = record.type().equals("POLYLINE") || record.type().equals("INSERT") ? record : null;
         if (record.type().equals("VERTEX")) {
             faults.error(

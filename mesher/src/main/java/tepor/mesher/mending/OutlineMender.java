@@ -9,6 +9,7 @@ import java.util.Set;
 import java.util.TreeMap;
 import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Geometry;
+import tepor.mesher.outline.Arcs;
 import tepor.mesher.outline.DrawingUnit;
 import tepor.mesher.outline.Finding;
 import tepor.mesher.outline.Findings;
@@ -125,9 +126,9 @@ public final class OutlineMender {
                         faulty.name(),
                         faulty.place(),
                         fault.what() + ": " + done + (pieces > 1 ? ", in " + pieces + " pieces" : "") + "; its area is "
-                                + unit.area(area.getArea()),
+                                + unit.area(Arcs.area(area)),
                         at,
-                        area.getArea()));
+                        Arcs.area(area)));
             }
         }
         shapes.set(r, with(faulty, area));

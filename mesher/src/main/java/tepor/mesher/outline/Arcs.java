@@ -1,7 +1,9 @@
 package tepor.mesher.outline;
 
 import org.locationtech.jts.geom.Coordinate;
+import org.locationtech.jts.geom.Geometry;
 import org.locationtech.jts.geom.LineString;
+import org.locationtech.jts.geom.Polygon;
 
 /**
  * Pieces end to end between points, some of them arcs. An arc piece turns by at most {@link #GREATEST_TURN}; longer arcs
@@ -30,6 +32,19 @@ public interface Arcs {
             Circle circle = circle(ring, i - 1);
             if (circle != null) {
                 area += circle.lens(a.x, a.y, b.x, b.y);
+            }
+        }
+        return area;
+    }
+
+    /** Area of polygons, their arcs included, m². */
+    static double area(Geometry polygons) {
+        double area = 0;
+        for (int i = 0; i < polygons.getNumGeometries(); i++) {
+            Polygon polygon = (Polygon) polygons.getGeometryN(i);
+            area += Math.abs(signedArea(polygon.getExteriorRing()));
+            for (int h = 0; h < polygon.getNumInteriorRing(); h++) {
+                area -= Math.abs(signedArea(polygon.getInteriorRingN(h)));
             }
         }
         return area;

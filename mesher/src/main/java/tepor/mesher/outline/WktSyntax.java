@@ -167,7 +167,12 @@ final class WktSyntax {
             throw empty(token);
         } else if (Character.isLetter(text.charAt(0))) {
             // A word here most often means that the brackets before it do not close: nothing behind it can be trusted.
-            throw lost("no-number", token, "a number is wanted, not " + token.shown(), unclosed());
+            boolean geometry = WktKind.isKind(text);
+            throw lost(
+                    "no-number",
+                    token,
+                    "a number is wanted, not " + token.shown(),
+                    geometry ? unclosed() : "write numbers as 12, -3.5 or 1.2e3; or " + unclosed());
         } else {
             fault("no-number", token, token.shown() + " is no number", "write numbers as 12, -3.5 or 1.2e3");
         }

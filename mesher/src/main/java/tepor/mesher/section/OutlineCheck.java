@@ -8,9 +8,9 @@ import org.locationtech.jts.geom.Geometry;
 import org.locationtech.jts.geom.LinearRing;
 import org.locationtech.jts.geom.Polygon;
 import org.locationtech.jts.operation.overlayng.OverlayNG;
-import org.locationtech.jts.operation.overlayng.OverlayNGRobust;
 import org.locationtech.jts.operation.valid.IsValidOp;
 import org.locationtech.jts.operation.valid.TopologyValidationError;
+import tepor.mesher.outline.Arcs;
 import tepor.mesher.outline.DrawingUnit;
 import tepor.mesher.outline.Findings;
 import tepor.mesher.outline.Place;
@@ -27,6 +27,9 @@ public final class OutlineCheck {
 
     /** Arcs are cut until what is between an arc and its chord is clear, or thinner than this share of the extent. */
     private static final double ARC_TOLERANCE = 1e-7;
+
+    /** Areas that differ by a smaller part are the same, arcs having been cut in chords. */
+    private static final double NEARLY_ALL = 1e-4;
 
     private static final int PLACES_AT_MOST = 10;
 
@@ -175,11 +178,11 @@ public final class OutlineCheck {
         Geometry outside = hole;
         String how = "wholly";
         if (nesting.meet(0, h)) {
-            outside = OverlayNGRobust.overlay(hole, rings.get(0), OverlayNG.DIFFERENCE);
+            outside = RingNesting.overlay(hole, rings.get(0), OverlayNG.DIFFERENCE);
             if (!isThick(outside, hole)) {
                 return;
             }
-            how = outside.getArea() < (1 - NO_OVERLAP) * hole.getArea() ? "partly" : "wholly";
+            how = outside.getArea() < (1 - NEARLY_ALL) * Arcs.area(hole) ? "partly" : "wholly";
         } else if (nesting.beginsInside(h, 0)) {
             return;
         } else if (nesting.beginsInside(0, h)) {

@@ -19,6 +19,8 @@ import org.locationtech.jts.operation.overlayng.OverlayNGRobust;
 
 /** Which of several polygons, each sound by itself, meet in their borders, and which lie within each other. */
 final class RingNesting {
+    private static final double ARC_TOLERANCE = 1e-6;
+
     /** Two polygons that may have something in common. */
     record Pair(int first, int second, boolean meet) {}
 
@@ -118,11 +120,20 @@ final class RingNesting {
     /** What two polygons of a pair have in common; null where that is nothing, or a touch without a doubt. */
     Geometry common(Pair pair) {
         if (pair.meet()) {
-            return OverlayNGRobust.overlay(
-                    polygons.get(pair.first()), polygons.get(pair.second()), OverlayNG.INTERSECTION);
+            return overlay(polygons.get(pair.first()), polygons.get(pair.second()), OverlayNG.INTERSECTION);
         } else if (beginsInside(pair.second(), pair.first())) {
-            return polygons.get(pair.second());
+            return overlay(polygons.get(pair.second()), null, OverlayNG.UNION);
         }
-        return beginsInside(pair.first(), pair.second()) ? polygons.get(pair.first()) : null;
+        return beginsInside(pair.first(), pair.second())
+                ? overlay(polygons.get(pair.first()), null, OverlayNG.UNION)
+                : null;
+    }
+
+    /** An overlay whose area is that of the arcs, but for a millionth of the polygon's size. */
+    static Geometry overlay(Geometry polygon, Geometry other, int operation) {
+        ArcFlattener flattener =
+                new ArcFlattener(ARC_TOLERANCE * polygon.getEnvelopeInternal().getDiameter());
+        return OverlayNGRobust.overlay(
+                flattener.flatten(polygon), other == null ? null : flattener.flatten(other), operation);
     }
 }

@@ -17,6 +17,12 @@ public final class NearRunFinder {
     private static final double LONG = 20;
     /** A strip along so much of the inner ring is there on purpose. */
     private static final double ALL_AROUND = 0.9;
+    /** Borders this far apart, in gaps, have parted. */
+    private static final double PARTED = 0.95;
+    /** Of what parts for good, less than this share is narrower than half a gap. */
+    private static final double WEDGE_NARROW = 0.8;
+    /** Mean of the greatest width of what lies beside a circle that touches: a third, and room for coarse pieces. */
+    private static final double TOUCHING_MEAN = 0.45;
     /** How far along its ring a piece must be from another, in gaps, to be near it for another reason. */
     private static final double APART = 4;
 
@@ -186,12 +192,37 @@ public final class NearRunFinder {
                 .orElse(Double.NaN);
     }
 
+    /**
+     * Whether borders that meet part for good, as sides do at a sharp corner, or circles that touch: no gap, however sharp.
+     * A gap keeps its width over most of its length; of a wedge half is narrower than half its greatest width, and beside a
+     * circle that touches the mean width is a third of the greatest.
+     */
+    private boolean isWedge(List<NearPair> group) {
+        if (!meets(group)) {
+            return false;
+        }
+        double widest = group.stream().mapToDouble(pair -> pair.widest).max().orElse(0);
+        double narrow = 0;
+        double area = 0;
+        boolean bent = false;
+        for (NearPair pair : group) {
+            narrow += pair.widest < 0.5 * closeness.gap() ? pair.length : 0;
+            area += pair.middle == null ? 0 : 0.5 * (pair.width + pair.widest) * pair.length;
+            bent |= pieces.circle(pair.p) != null || pieces.circle(pair.q) != null;
+        }
+        boolean parts = widest >= PARTED * closeness.gap() && narrow < WEDGE_NARROW * length(group);
+        return parts || (bent && area <= TOUCHING_MEAN * widest * length(group));
+    }
+
     private static boolean meets(List<NearPair> group) {
         return group.stream().anyMatch(pair -> pair.meets);
     }
 
     private void withinRegion(List<NearPair> group, List<NearRun> runs) {
         boolean isLong = length(group) >= LONG * closeness.gap();
+        if (isWedge(group)) {
+            return;
+        }
         boolean isSlit = between(group) == NearPair.Between.GAP && (isLong || !meets(group) && length(group) > 0);
         boolean isNear = !meets(group) && (!sameRing(group) || !Double.isNaN(endDistance(group)));
         if (isSlit && (isLong || !sameRing(group))) {
@@ -212,6 +243,9 @@ public final class NearRunFinder {
             }
         }
         if (open.isEmpty()) {
+            return;
+        }
+        if (meets && isWedge(open)) {
             return;
         }
         boolean isLong = length(open) >= LONG * closeness.gap();

@@ -10,11 +10,14 @@ import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Geometry;
 import org.locationtech.jts.operation.overlayng.OverlayNG;
 import org.locationtech.jts.operation.overlayng.OverlayNGRobust;
-import tepor.mesher.section.ArcCutter;
+import tepor.mesher.section.ArcFlattener;
 import tepor.mesher.section.RegionShape;
 
 /** Which regions overlap in part, neither lying wholly over the other. */
 final class PartialOverlaps {
+    /** How far chords may be off their arcs where an area is computed, in extents. */
+    private static final double ARC_TOLERANCE = 1e-6;
+
     /** Of so many pairs the area in common is computed; the others are only counted. */
     private static final int COMPUTED_AT_MOST = 40;
 
@@ -57,9 +60,10 @@ final class PartialOverlaps {
                 overlaps.add(new Overlap(a, b, Double.NaN, entry.getValue()));
                 continue;
             }
-            List<Geometry> cut = ArcCutter.cut(
-                    List.of(shapes.get(a).polygons(), shapes.get(b).polygons()), closeness.snap());
-            Geometry common = OverlayNGRobust.overlay(flat(cut.get(0)), flat(cut.get(1)), OverlayNG.INTERSECTION);
+            ArcFlattener flattener = new ArcFlattener(ARC_TOLERANCE * closeness.extent());
+            Geometry first = flattener.flatten(shapes.get(a).polygons());
+            Geometry second = flattener.flatten(shapes.get(b).polygons());
+            Geometry common = OverlayNGRobust.overlay(flat(first), flat(second), OverlayNG.INTERSECTION);
             // A strip of the width w and the length l has the area w·l, and a border of 2·(w + l).
             if (common.getArea() > 0.5 * closeness.gap() * common.getLength()) {
                 Coordinate at = common.getInteriorPoint().getCoordinate();

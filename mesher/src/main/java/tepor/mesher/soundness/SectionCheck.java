@@ -10,10 +10,12 @@ import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Envelope;
 import org.locationtech.jts.geom.Geometry;
 import org.locationtech.jts.geom.Location;
+import tepor.mesher.outline.Arcs;
 import tepor.mesher.outline.DrawingUnit;
 import tepor.mesher.outline.Finding;
 import tepor.mesher.outline.Finding.Severity;
 import tepor.mesher.outline.Findings;
+import tepor.mesher.section.ArcFlattener;
 import tepor.mesher.section.RegionShape;
 
 /**
@@ -30,12 +32,14 @@ public final class SectionCheck {
     private final Closeness closeness;
     private final DrawingUnit unit;
     private final Map<Integer, PointOnGeometryLocator> locators = new HashMap<>();
+    private final ArcFlattener flattener;
     private final FindingList list = new FindingList();
 
     private SectionCheck(List<RegionShape> shapes, Closeness closeness, DrawingUnit unit) {
         this.shapes = shapes;
         this.closeness = closeness;
         this.unit = unit;
+        flattener = new ArcFlattener(closeness.snap());
     }
 
     /**
@@ -77,7 +81,8 @@ public final class SectionCheck {
                                 Severity.WARNING,
                                 "drawn-twice",
                                 shapes.get(r).place(),
-                                names(first, r) + " have the same outline, of " + unit.area(shape.getArea())
+                                names(first, r) + " have the same outline, of "
+                                        + unit.area(Arcs.area(shapes.get(r).polygons()))
                                         + ": the later hides the earlier",
                                 "leave one of them out"),
                         0);
@@ -164,7 +169,7 @@ public final class SectionCheck {
             Geometry polygons = shapes.get(r).polygons();
             if (polygons.getEnvelopeInternal().contains(place)) {
                 PointOnGeometryLocator locator =
-                        locators.computeIfAbsent(r, k -> new IndexedPointInAreaLocator(polygons));
+                        locators.computeIfAbsent(r, k -> new IndexedPointInAreaLocator(flattener.flatten(polygons)));
                 if (locator.locate(place) != Location.EXTERIOR) {
                     return shapes.get(r).hole();
                 }

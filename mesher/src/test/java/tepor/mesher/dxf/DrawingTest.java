@@ -178,6 +178,14 @@ class DrawingTest {
     }
 
     @Test
+    void aByteOrderMarkCountsForMoreThanTheCodePage() {
+        String text = "\uFEFF"
+                + DrawnDxf.file("CIRCLE;8 Träger;10 0;20 0;40 1")
+                        .replace("AC1032\n", "AC1015\n  9\n$DWGCODEPAGE\n  3\nANSI_1252\n");
+        assertThat(DrawnDxf.read(text).sound().regions("Träger")).hasSize(1);
+    }
+
+    @Test
     void anUnknownCodePageIsSaid() {
         String text = DrawnDxf.file("CIRCLE;8 Träger;10 0;20 0;40 1")
                 .replace("AC1032\n", "AC1015\n  9\n$DWGCODEPAGE\n  3\nANSI_77\n");

@@ -118,6 +118,10 @@ class SpoiledDrawingTest {
                 Arguments.of(
                         "ends within its section ENTITIES; save or copy",
                         good.substring(0, good.indexOf(" 20\n", good.indexOf("CIRCLE"))) + "« 20"),
+                Arguments.of(
+                        "not ended by SEQEND before this ENDSEC; save",
+                        DrawnDxf.pairs("SECTION;2 HEADER;9 $INSUNITS;70 6;ENDSEC;SECTION;2 ENTITIES;" + SOUND
+                                + ";POLYLINE;8 a;66 1;VERTEX;10 0;20 0;VERTEX;10 1;20 0;«ENDSEC;EOF")),
                 Arguments.of("no section ENTITIES", DrawnDxf.pairs("SECTION;2 HEADER;9 $INSUNITS;70 6;ENDSEC;«EOF")),
                 Arguments.of("neither the drawing; nor the case; never guessed", good.replace(" 70\n6\n", " 70\n«0\n")),
                 Arguments.of(

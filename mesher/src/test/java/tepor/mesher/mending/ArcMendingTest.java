@@ -96,8 +96,8 @@ class ArcMendingTest {
         assertThat(plate.isValid()).isTrue();
         assertThat(Drawing.check(Drawing.of(plate))).singleElement().satisfies(f -> {
             assertThat(f.code()).isEqualTo("hole-outside");
-            // A segment of a circle, r² (φ − sin φ cos φ) with φ = acos(0.05/0.0502): 1.194 mm², here by its chords.
-            assertThat(f.what()).contains("partly", "with 1.16", " mm²", "(50.09");
+            // A segment of a circle, r² (φ − sin φ cos φ) with φ = acos(0.05/0.0502): 1.1941 mm², here by short chords.
+            assertThat(f.what()).contains("partly", "with 1.193", " mm²", "(50.09");
         });
     }
 

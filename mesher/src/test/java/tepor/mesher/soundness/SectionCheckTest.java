@@ -8,11 +8,14 @@ import org.junit.jupiter.api.Test;
 import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.Geometry;
 import org.locationtech.jts.geom.GeometryFactory;
+import org.locationtech.jts.geom.Polygon;
 import org.locationtech.jts.geom.util.AffineTransformation;
+import tepor.mesher.outline.Circle;
 import tepor.mesher.outline.DrawingUnit;
 import tepor.mesher.outline.Finding;
 import tepor.mesher.outline.Finding.Severity;
 import tepor.mesher.outline.Findings;
+import tepor.mesher.outline.PathBuilder;
 import tepor.mesher.outline.Place;
 import tepor.mesher.section.RegionShape;
 
@@ -133,6 +136,31 @@ class SectionCheckTest {
             new Coordinate(1, 0), new Coordinate(2, 0), new Coordinate(1.1, 1), new Coordinate(1, 0)
         }));
         assertThat(check()).isEmpty();
+    }
+
+    private static Polygon disc(double x, double y, double radius) {
+        return FACTORY.createPolygon(PathBuilder.ring(new Circle(x, y, radius), FACTORY));
+    }
+
+    @Test
+    void circlesThatTouchAreNoFault() {
+        draw(box(-3, -1, 5, 3)).draw(disc(0, 0, 1)).draw(disc(2, 0, 1)).draw(disc(1, Math.sqrt(3), 1));
+        draw(disc(2.5, 0, 0.5)); // from inside
+        assertThat(check()).isEmpty();
+    }
+
+    @Test
+    void areasInCommonAreThoseOfTheArcs() {
+        draw(disc(0, 0, 1)).draw(disc(1, 0, 1));
+        // two discs of radius 1 at a distance of 1: 2π/3 − √3/2, plane geometry
+        assertThat(2 * Math.PI / 3 - Math.sqrt(3) / 2).isBetween(1.2283695, 1.2283705);
+        only(check(), Severity.NOTE, "partial-overlap", "1.2283");
+    }
+
+    @Test
+    void aThinRingIsNotedWithItsCost() {
+        draw(disc(0, 0, 1)).draw(disc(0, 0, 0.99995));
+        only(check(), Severity.NOTE, "thin-layer", "meshing it takes about 1,");
     }
 
     @Test
