@@ -41,6 +41,11 @@ public record RefinementReport(List<Stop> stops) {
         return new RefinementReport(all);
     }
 
+    /** The first places at which it stopped short for a reason. */
+    public List<Stop> first(Reason reason, int atMost) {
+        return stops.stream().filter(s -> s.reason() == reason).limit(atMost).toList();
+    }
+
     public long count(Reason reason) {
         return stops.stream().filter(s -> s.reason() == reason).count();
     }

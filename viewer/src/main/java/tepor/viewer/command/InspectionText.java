@@ -2,6 +2,7 @@ package tepor.viewer.command;
 
 import java.io.PrintStream;
 import java.util.Locale;
+import java.util.stream.Collectors;
 import tepor.mesher.mesh.MeshResult;
 import tepor.mesher.refinement.RefinementReport;
 import tepor.solver.answer.Inspection;
@@ -15,6 +16,8 @@ import tepor.viewer.wording.Rounding;
 
 /** An inspection as text for a terminal. */
 final class InspectionText {
+    private static final int PLACES_AT_MOST = 3;
+
     private static final int DIGITS = 6;
 
     private final Inspection inspection;
@@ -84,8 +87,12 @@ final class InspectionText {
         for (RefinementReport.Reason reason : RefinementReport.Reason.values()) {
             long count = result.report().count(reason);
             if (count > 0) {
+                String places = result.report().first(reason, PLACES_AT_MOST).stream()
+                        .map(stop -> subject.unit().point(stop.x(), stop.y()))
+                        .collect(Collectors.joining(", "));
                 out.println("  stopped short in " + count + (count == 1 ? " place: " : " places: ")
-                        + reason.name().toLowerCase(Locale.ROOT).replace('_', ' '));
+                        + reason.name().toLowerCase(Locale.ROOT).replace('_', ' ') + ", at " + places
+                        + (count > PLACES_AT_MOST ? " and elsewhere" : ""));
             }
         }
     }

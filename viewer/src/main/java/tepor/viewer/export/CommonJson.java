@@ -13,6 +13,9 @@ import tepor.viewer.wording.InsulatedRun;
 
 /** What {@code answers.json} and the JSON of an inspection have in common. */
 final class CommonJson {
+    /** Places told of each reason why refinement stopped short. */
+    private static final int PLACES_AT_MOST = 20;
+
     private final JsonText json;
 
     CommonJson(JsonText json) {
@@ -37,9 +40,23 @@ final class CommonJson {
     void refused(RefinementReport report) throws IOException {
         json.object("refused", () -> {
             for (RefinementReport.Reason reason : RefinementReport.Reason.values()) {
-                json.whole(reason.name().toLowerCase(Locale.ROOT), report.count(reason));
+                json.whole(word(reason), report.count(reason));
             }
         });
+        json.array("refused_places", () -> {
+            for (RefinementReport.Reason reason : RefinementReport.Reason.values()) {
+                for (RefinementReport.Stop stop : report.first(reason, PLACES_AT_MOST)) {
+                    json.object(() -> {
+                        json.text("reason", word(reason));
+                        point("at", stop.x(), stop.y());
+                    });
+                }
+            }
+        });
+    }
+
+    private static String word(RefinementReport.Reason reason) {
+        return reason.name().toLowerCase(Locale.ROOT);
     }
 
     void insulated(Insulated insulated, Section section) throws IOException {

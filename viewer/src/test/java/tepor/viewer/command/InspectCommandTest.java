@@ -29,7 +29,7 @@ class InspectCommandTest {
                 .containsPattern("outer skin +0\\.2 +film 8 W/\\(m2\\.K\\) ± 20 % to room")
                 .contains("Insulated because nothing was stated: 440 mm")
                 .contains("Mesh: 120 triangles, 273 nodes", "smallest angle 27 deg")
-                .contains("stopped short in 1 place: imposed by outline");
+                .contains("stopped short in 1 place: imposed by outline, at (10 10) mm");
         assertThat(Files.readString(picture)).contains("<svg");
     }
 
@@ -38,6 +38,9 @@ class InspectCommandTest {
         assertThat(fixture.run("inspect", "--json", caseFile(place, "duct"))).isZero();
         JsonNode json = new ObjectMapper().readTree(fixture.out());
         assertThat(json.at("/mesh/triangles").asInt()).isEqualTo(120);
+        assertThat(json.at("/mesh/refused/imposed_by_outline").asInt()).isEqualTo(1);
+        assertThat(json.at("/mesh/refused_places/0/reason").asText()).isEqualTo("imposed_by_outline");
+        assertThat(json.at("/mesh/refused_places/0/at/0").asDouble()).isEqualTo(0.01);
         assertThat(fixture.out()).startsWith("{").endsWith("}\n");
         try (var files = Files.list(place)) {
             assertThat(files).hasSize(1);
