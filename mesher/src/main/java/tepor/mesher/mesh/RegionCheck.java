@@ -182,14 +182,15 @@ final class RegionCheck {
         Circle circle = section.circle(s);
         double ax = section.x(section.start(s));
         double ay = section.y(section.start(s));
-        double turn = circle.turn(ax, ay, section.x(section.end(s)), section.y(section.end(s)));
+        double bx = section.x(section.end(s));
+        double by = section.y(section.end(s));
+        double turn = circle.turn(ax, ay, bx, by);
         double height = y - circle.y();
         double[] met = {};
         if (Math.abs(height) < circle.radius()) {
             double half = Math.sqrt((circle.radius() - height) * (circle.radius() + height));
             for (int sign = -1; sign <= 1; sign += 2) {
-                double toPlace = circle.turn(ax, ay, circle.x() + sign * half, y);
-                if (toPlace * turn > 0 && Math.abs(toPlace) < Math.abs(turn)) {
+                if (circle.spans(ax, ay, bx, by, circle.x() + sign * half, y)) {
                     met = Arrays.copyOf(met, met.length + 2);
                     met[met.length - 2] = circle.x() + sign * half - x;
                     met[met.length - 1] = sign * turn > 0 ? 1 : -1;

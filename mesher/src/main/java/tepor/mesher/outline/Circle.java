@@ -41,6 +41,19 @@ public record Circle(double x, double y, double radius) {
         return new Coordinate(x + mx + reach * nx, y + my + reach * ny);
     }
 
+    /** Point at a part (0 to 1) of the shorter arc from a to b, metres. */
+    public Coordinate at(double ax, double ay, double bx, double by, double part) {
+        double angle = Math.atan2(ay - y, ax - x) + part * turn(ax, ay, bx, by);
+        return new Coordinate(x + radius * Math.cos(angle), y + radius * Math.sin(angle));
+    }
+
+    /** Whether a place, seen from the centre, lies between the ends a and b of the shorter arc. */
+    public boolean spans(double ax, double ay, double bx, double by, double px, double py) {
+        double turn = turn(ax, ay, bx, by);
+        double toPlace = turn(ax, ay, px, py);
+        return toPlace * turn > 0 && Math.abs(toPlace) < Math.abs(turn);
+    }
+
     /** Greatest distance of the shorter arc from its chord, metres, for a chord of this length (metres). */
     public double sagitta(double chord) {
         double half = Math.min(0.5 * chord, radius);
@@ -81,12 +94,10 @@ public record Circle(double x, double y, double radius) {
     /** Bounding box of the shorter arc from a to b, metres. */
     public Envelope envelope(double ax, double ay, double bx, double by) {
         Envelope box = new Envelope(ax, bx, ay, by);
-        double turn = turn(ax, ay, bx, by);
         for (int i = 0; i < 4; i++) {
             double px = x + (i == 0 ? radius : i == 1 ? -radius : 0);
             double py = y + (i == 2 ? radius : i == 3 ? -radius : 0);
-            double toPoint = turn(ax, ay, px, py);
-            if (toPoint * turn > 0 && Math.abs(toPoint) < Math.abs(turn)) {
+            if (spans(ax, ay, bx, by, px, py)) {
                 box.expandToInclude(px, py);
             }
         }

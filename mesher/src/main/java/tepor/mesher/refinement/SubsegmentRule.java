@@ -129,15 +129,11 @@ final class SubsegmentRule {
     }
 
     private void placeOn(Circle circle, int a, int b, double part) {
-        if (part == 0.5) {
-            Coordinate middle = circle.middle(mesh.x(a), mesh.y(a), mesh.x(b), mesh.y(b));
-            x = middle.x;
-            y = middle.y;
-            return;
-        }
-        double angle = Math.atan2(mesh.y(a) - circle.y(), mesh.x(a) - circle.x()) + part * turn(circle, a, b);
-        x = circle.x() + circle.radius() * Math.cos(angle);
-        y = circle.y() + circle.radius() * Math.sin(angle);
+        Coordinate at = part == 0.5
+                ? circle.middle(mesh.x(a), mesh.y(a), mesh.x(b), mesh.y(b))
+                : circle.at(mesh.x(a), mesh.y(a), mesh.x(b), mesh.y(b), part);
+        x = at.x;
+        y = at.y;
     }
 
     private double turn(Circle circle, int a, int b) {

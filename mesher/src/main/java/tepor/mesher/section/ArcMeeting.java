@@ -63,9 +63,7 @@ final class ArcMeeting {
 
     /** Whether a place near a bent piece's circle lies between the piece's ends. */
     private boolean isInSpan(double x, double y, Border bent) {
-        double turn = turn(bent);
-        double toPlace = bent.circle.turn(vertices.x(bent.a), vertices.y(bent.a), x, y);
-        return toPlace * turn > 0 && Math.abs(toPlace) < Math.abs(turn);
+        return bent.circle.spans(vertices.x(bent.a), vertices.y(bent.a), vertices.x(bent.b), vertices.y(bent.b), x, y);
     }
 
     private double turn(Border p) {

@@ -204,9 +204,7 @@ final class SectionAssembler {
             return new Coordinate(
                     x0 + part * (vertices.x(piece.end()) - x0), y0 + part * (vertices.y(piece.end()) - y0));
         }
-        double angle = Math.atan2(y0 - circle.y(), x0 - circle.x()) + part * turn(piece);
-        return new Coordinate(
-                circle.x() + circle.radius() * Math.cos(angle), circle.y() + circle.radius() * Math.sin(angle));
+        return circle.at(x0, y0, x(piece.end()), y(piece.end()), part);
     }
 
     private double turn(Piece arc) {
